@@ -1,5 +1,7 @@
 /** What may fail because of outside input: a value, or one clear reason. A programmer's error throws instead. */
-export type Result<T, E = Refusal> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: E };
+export type Result<T, E = Refusal> =
+  | { readonly ok: true; readonly value: T }
+  | { readonly ok: false; readonly error: E };
 
 /** Why outside input was refused: what, where, why, what to do. Nothing is lost by it. */
 export interface Refusal {
