@@ -1,0 +1,134 @@
+/** The whole judgement of a design: every figure with its trace, the responses, the findings and the cautions. Plain data. */
+import type { Origin } from "../job/part.ts";
+import type { Finding, Level } from "../standards/finding.ts";
+import type { SheetData } from "../standards/sheet.ts";
+
+export interface FrequencyResponse {
+  readonly frequency_Hz: readonly number[];
+  /** Relative to the dc scale factor: 0 dB at dc. */
+  readonly magnitude_dB: readonly number[];
+  readonly phase_deg: readonly number[];
+  readonly inputImpedance_ohm: readonly number[];
+  /** The finding sentence, computed from the data. */
+  readonly sentence: string;
+}
+
+export interface StepTrace {
+  readonly time_s: readonly number[];
+  /** Scale factor × output over step height: 1 is right. */
+  readonly value: readonly number[];
+}
+
+export interface StepResponse {
+  /** Nanoseconds to microseconds. */
+  readonly fast: StepTrace;
+  /** Microseconds to seconds. */
+  readonly slow: StepTrace;
+  readonly sentence: string;
+}
+
+/** One instrument judged on this LV arm, with a scale factor of its own. */
+export interface InstrumentRow {
+  readonly id: string;
+  readonly name: string;
+  readonly principal: boolean;
+  readonly scaleFactor: number;
+  readonly readingAtWorking_V: number;
+  readonly readingAtGreatest_Vpeak: number;
+  readonly greatestInput_Vpeak: number;
+  /** Relative error if the principal instrument's scale factor were used with this one. */
+  readonly errorIfReused: number;
+}
+
+/** One single fault: what the instrument sees at dc and on a fast edge, side by side. */
+export interface FaultRow {
+  readonly id: string;
+  readonly name: string;
+  readonly element: number;
+  readonly output_V: number;
+  readonly fastOutput_V: number;
+  readonly greatestElementVoltage_V: number;
+  readonly outputShare: number;
+  readonly level: Level;
+  readonly sentence: string;
+}
+
+export interface Caution {
+  readonly id: string;
+  readonly text: string;
+  /** Screens on which it stands. */
+  readonly where: readonly ("prove" | "build" | "calibrate" | "use")[];
+}
+
+export interface Proof {
+  /** The job as one sentence. */
+  readonly job: string;
+  readonly sheet: SheetData;
+  /** Origin of every given by JSON pointer. */
+  readonly origins: Readonly<Record<string, Origin>>;
+  /** How many inputs are assumed, and which. */
+  readonly assumed: readonly string[];
+  readonly frequency: FrequencyResponse;
+  readonly step: StepResponse;
+  readonly instruments: readonly InstrumentRow[];
+  readonly faults: readonly FaultRow[];
+  readonly worstFault: FaultRow | null;
+  readonly findings: readonly Finding[];
+  readonly cautions: readonly Caution[];
+  readonly level: Level;
+}
+
+/** The kinds of figure that a proof's sheet holds: path, plain name, unit. Arrays hold one number per element, tap first. */
+export const figures = {
+  "working.dc_V": "working voltage, dc part",
+  "working.rms_V": "working voltage, rms",
+  "working.peak_V": "working voltage, peak",
+  "working.greatest_Vpeak": "greatest peak",
+  "hvArm.resistance_ohm": "HV arm resistance R1",
+  "hvArm.capacitance_F": "HV arm capacitance C1, string alone",
+  "hvArm.effectiveCapacitance_F": "HV arm capacitance with strays",
+  "hvArm.columnLength_m": "column length",
+  "strays.toEarth_F": "stray capacitance of the column to earth",
+  "element.resistance_ohm": "element resistance",
+  "element.voltage_Vdc": "element voltage, dc",
+  "element.voltage_Vrms": "element voltage, rms",
+  "element.voltage_Vpeak": "element voltage, peak",
+  "element.voltageLimit_V": "element voltage limit, derated",
+  "element.dissipation_W": "element dissipation",
+  "element.dissipationLimit_W": "element dissipation limit, derated",
+  "element.nodePotential_V": "potential of the element's upper end",
+  "lvArm.wanted_ohm": "LV arm resistance wanted",
+  "lvArm.fitted_ohm": "LV arm resistance fitted",
+  "lvArm.withInstrument_ohm": "LV arm with the instrument in parallel",
+  "lvArm.dissipation_W": "LV arm dissipation",
+  "lvArm.capacitanceResponseTime_F": "LV capacitance, zero response time",
+  "lvArm.capacitanceHighFrequency_F": "LV capacitance, edge equal to dc",
+  "lvArm.capacitanceFlattest_F": "LV capacitance, flattest over the band",
+  "lvArm.capacitanceFitted_F": "LV capacitance fitted, cable and instrument not counted",
+  "scaleFactor.predicted": "scale factor, predicted",
+  "scaleFactor.deviation": "deviation from the wanted scale factor",
+  "scaleFactor.uncertainty": "relative uncertainty of the scale factor, k = 2, from parts",
+  "scaleFactor.instrumentShare": "share of the scale factor that belongs to the instrument",
+  "scaleFactor.voltageShift": "shift of the scale factor by voltage coefficient at working voltage",
+  "input.resistance_ohm": "input resistance",
+  "input.capacitance_F": "input capacitance",
+  "input.current_A": "input current",
+  "input.dissipation_W": "dissipation of the whole divider",
+  "source.sag": "sag of the source under the divider",
+  "reading.atWorking_V": "reading at working voltage",
+  "reading.atGreatest_Vpeak": "reading at the greatest peak",
+  "response.bandwidth_Hz": "bandwidth, −3 dB",
+  "response.riseTime_s": "rise time, 10-90 %",
+  "response.responseTime_s": "response time",
+  "response.overshoot": "overshoot",
+  "response.settlingTime_s": "settling time to 1 %",
+  "response.lvPole_Hz": "pole of the LV arm",
+  "response.bandDeviation_dB": "greatest deviation over the wanted band",
+  "insulation.clearance_m": "clearance required along the column",
+  "insulation.creepage_m": "creepage required along the column",
+  "insulation.elementCreepage_m": "creepage required along one element",
+  "insulation.elementClearance_m": "clearance required along one element",
+  "fault.worstOutput_V": "worst single fault at the instrument",
+  "charge.waitTime_s": "time to fall to 60 V through the divider alone",
+} as const;
+export type FigurePath = keyof typeof figures;
