@@ -1,4 +1,6 @@
 /** The solver's only door: the rest of the program imports from here and from nowhere deeper. */
+export type { FaultRow } from "./checks/faults.ts";
+export type { InstrumentRow } from "./checks/instruments.ts";
 export type * from "./job/brief.ts";
 export type * from "./job/design.ts";
 export type * from "./job/document.ts";

@@ -1,4 +1,6 @@
 /** The whole judgement of a design: every figure with its trace, the responses, the findings and the cautions. Plain data. */
+import type { FaultRow } from "../checks/faults.ts";
+import type { InstrumentRow } from "../checks/instruments.ts";
 import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
@@ -24,32 +26,6 @@ export interface StepResponse {
   readonly fast: StepTrace;
   /** Microseconds to seconds. */
   readonly slow: StepTrace;
-  readonly sentence: string;
-}
-
-/** One instrument judged on this LV arm, with a scale factor of its own. */
-export interface InstrumentRow {
-  readonly id: string;
-  readonly name: string;
-  readonly principal: boolean;
-  readonly scaleFactor: number;
-  readonly readingAtWorking_V: number;
-  readonly readingAtGreatest_Vpeak: number;
-  readonly greatestInput_Vpeak: number;
-  /** Relative error if the principal instrument's scale factor were used with this one. */
-  readonly errorIfReused: number;
-}
-
-/** One single fault: what the instrument sees at dc and on a fast edge, side by side. */
-export interface FaultRow {
-  readonly id: string;
-  readonly name: string;
-  readonly element: number;
-  readonly output_V: number;
-  readonly fastOutput_V: number;
-  readonly greatestElementVoltage_V: number;
-  readonly outputShare: number;
-  readonly level: Level;
   readonly sentence: string;
 }
 

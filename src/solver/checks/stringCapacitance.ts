@@ -1,0 +1,81 @@
+import { formula } from "../standards/formula.ts";
+import { computedHere } from "../standards/source.ts";
+import { type CapacitiveTwoPort, capacitiveLadder, capacitiveLadderRecord } from "./capacitiveLadder.ts";
+import { type ColumnStrays, columnStrays } from "./columnStrays.ts";
+import { givenPerElement, type Judging } from "./judging.ts";
+
+const F = (symbol: string, meaning: string) => ({ symbol, unit: "F", meaning });
+
+export const capacitanceFormulas = {
+  element: formula({
+    id: "capacitance.element",
+    title: "Capacitance of an element",
+    statement: "{=} = {p} · ({body} + {fitted})",
+    result: F("C_i", "element capacitance, all strings"),
+    inputs: {
+      p: { symbol: "p", unit: "1", meaning: "strings in parallel" },
+      body: F("C_b", "the resistor's own"),
+      fitted: F("C_f", "capacitor across it"),
+    },
+    holds: "Lumped.",
+    source: computedHere("parallel sum"),
+    compute: ({ p, body, fitted }) => p * (body + fitted),
+  }),
+  string: formula<never, "C">({
+    id: "capacitance.string",
+    title: "HV arm capacitance, string alone",
+    statement: "1 / {=} = Σ 1 / {C}",
+    result: F("C_1", "string alone"),
+    inputs: { C: F("C_i", "element capacitances") },
+    arrays: ["C"],
+    holds: "Without strays.",
+    source: computedHere("series sum"),
+    compute: ({ C }) => (C.some((c) => c === 0) ? 0 : 1 / C.reduce((sum, c) => sum + 1 / c, 0)),
+  }),
+};
+
+export interface StringCapacitance {
+  readonly element_F: readonly number[];
+  readonly strays: ColumnStrays;
+  readonly twoPort: CapacitiveTwoPort;
+}
+
+/** Writes `hvArm.capacitance_F`, `hvArm.effectiveCapacitance_F`, `input.capacitance_F`, `strays.*`. */
+export function stringCapacitance(j: Judging): StringCapacitance {
+  const { sheet, design } = j;
+  const { elements } = design.hvArm;
+  const n = elements.length;
+  const body = givenPerElement(j, "selfCapacitance_F", (part) => part.selfCapacitance_F);
+  sheet.given(
+    "/design/hvArm/elements/*/capacitance_F",
+    elements.map((element) => element.capacitance_F),
+  );
+  const element_F = sheet.deriveEach(
+    "element.capacitance_F",
+    capacitanceFormulas.element,
+    { p: "/design/hvArm/strings", body, fitted: "/design/hvArm/elements/*/capacitance_F" },
+    n,
+  ) as number[];
+  sheet.derive("hvArm.capacitance_F", capacitanceFormulas.string, { C: "element.capacitance_F" });
+  const strays = straysOf(j, n);
+  const twoPort = capacitiveLadder(element_F, strays.toEarth_F, strays.toElectrode_F, strays.electrodeToTap_F);
+  const inputs = { C: "element.capacitance_F", Ce: "strays.eachToEarth_F", Ch: "strays.eachToElectrode_F" };
+  sheet.given("strays.eachToEarth_F", strays.toEarth_F);
+  sheet.given("strays.eachToElectrode_F", strays.toElectrode_F);
+  sheet.solved("hvArm.effectiveCapacitance_F", capacitiveLadderRecord, twoPort.transfer_F, inputs, twoPort.residual);
+  sheet.solved("input.capacitance_F", capacitiveLadderRecord, twoPort.electrode_F, inputs, twoPort.residual);
+  return { element_F, strays, twoPort };
+}
+
+function straysOf(j: Judging, n: number): ColumnStrays {
+  const { strays, geometry } = j.design;
+  if (strays.from !== "typed") return columnStrays(geometry, n, j.sheet);
+  const padded = (list: readonly number[]) => Array.from({ length: Math.max(n - 1, 0) }, (_, i) => list[i] ?? 0);
+  const toEarth_F = padded(strays.toEarth_F);
+  j.sheet.given("/design/strays/toEarth_F", toEarth_F);
+  j.sheet.given(
+    "strays.toEarth_F",
+    toEarth_F.reduce((sum, c) => sum + c, 0),
+  );
+  return { toEarth_F, toElectrode_F: padded(strays.toElectrode_F), electrodeToTap_F: strays.electrodeToTap_F };
+}
