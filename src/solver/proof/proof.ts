@@ -4,6 +4,7 @@ import type { InstrumentRow } from "../checks/instruments.ts";
 import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
+import type { Caution } from "./cautions.ts";
 
 export interface FrequencyResponse {
   readonly frequency_Hz: readonly number[];
@@ -27,13 +28,6 @@ export interface StepResponse {
   /** Microseconds to seconds. */
   readonly slow: StepTrace;
   readonly sentence: string;
-}
-
-export interface Caution {
-  readonly id: string;
-  readonly text: string;
-  /** Screens on which it stands. */
-  readonly where: readonly ("prove" | "build" | "calibrate" | "use")[];
 }
 
 export interface Proof {

@@ -1,0 +1,41 @@
+import { capacitiveLadderRecord } from "../checks/capacitiveLadder.ts";
+import { chargeFormulas } from "../checks/charge.ts";
+import { strayFormulas } from "../checks/columnStrays.ts";
+import { faultRecord } from "../checks/faults.ts";
+import { insulationFormulas } from "../checks/insulation.ts";
+import { loadingFormulas } from "../checks/loading.ts";
+import { lvArmFormulas } from "../checks/lvArm.ts";
+import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
+import { resistanceAbove, stressFormulas } from "../checks/stress.ts";
+import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
+import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
+import { sizingFormulas } from "../sizing/formulas.ts";
+import type { Formula, Solution } from "../standards/formula.ts";
+import { responseFormulas, responseRecords } from "./response.ts";
+
+/** Every formula that may stand behind a figure, by id. */
+export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
+  [
+    workingVoltageFormulas,
+    stressFormulas,
+    scaleFactorFormulas,
+    lvArmFormulas,
+    loadingFormulas,
+    strayFormulas,
+    capacitanceFormulas,
+    insulationFormulas,
+    chargeFormulas,
+    responseFormulas,
+  ]
+    .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
+    .concat(sizingFormulas as unknown as Formula<string, string>[])
+    .map((record) => [record.id, record]),
+);
+
+/** Every solution record, by id: what no closed formula gives. */
+export const solutions: ReadonlyMap<string, Solution> = new Map(
+  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords)].map((record) => [
+    record.id,
+    record,
+  ]),
+);
