@@ -1,0 +1,42 @@
+const prefixes: Readonly<Record<number, string>> = {
+  "-15": "f",
+  "-12": "p",
+  "-9": "n",
+  "-6": "µ",
+  "-3": "m",
+  0: "",
+  3: "k",
+  6: "M",
+  9: "G",
+  12: "T",
+};
+
+/** Tick text in engineering steps: 1, 10, 100, 1 k, 10 k; thin space before the prefix. */
+export function axisText(value: number): string {
+  if (value === 0) return "0";
+  const size = Math.abs(value);
+  const exponent = Math.min(12, Math.max(-15, 3 * Math.floor((Math.log10(size) + 1e-9) / 3)));
+  const digits = Number((value / 10 ** exponent).toPrecision(6));
+  const prefix = prefixes[exponent]!;
+  return `${minus(String(digits))}${prefix === "" ? "" : `\u2009${prefix}`}`;
+}
+
+/** Plain number for an axis of dB, percent or degrees. */
+export function plainText(value: number): string {
+  return minus(String(Number(value.toPrecision(6))));
+}
+
+const minus = (text: string): string => text.replace("-", "\u2212");
+
+/** A value with prefix and unit, `digits` significant: "12.6 kHz". */
+export function withUnit(value: number, unit: string, digits = 4): string {
+  const rounded = Number(value.toPrecision(digits));
+  const text = axisText(rounded);
+  return text.includes("\u2009") ? `${text}${unit}` : `${text}\u2009${unit}`;
+}
+
+/** A signed number: "+0.03", "−1.2", "0". */
+export function signed(value: number, digits = 3): string {
+  const rounded = Number(value.toPrecision(digits));
+  return rounded > 0 ? `+${rounded}` : plainText(rounded);
+}
