@@ -1,5 +1,8 @@
 import type { Raw } from "./shape.ts";
 
+/** Beyond it no divider is asked for. */
+const highest_Hz = 1e12;
+
 const positive = (value: unknown): number | null =>
   typeof value === "number" && Number.isFinite(value) && value > 0 ? value : null;
 
@@ -9,10 +12,10 @@ const positive = (value: unknown): number | null =>
  */
 export function contentBand_Hz(waveform: Raw): readonly [number, number] {
   const frequency = positive(waveform.frequency_Hz);
-  const rise = positive(waveform.riseTime_s) ?? 1e-6;
+  const edge = Math.min(0.35 / (positive(waveform.riseTime_s) ?? 1e-6), highest_Hz);
   if (waveform.kind === "sine") return [frequency ?? 50, frequency ?? 50];
-  if (waveform.kind === "square") return [frequency ?? 1000, Math.max(0.35 / rise, frequency ?? 1000)];
+  if (waveform.kind === "square") return [frequency ?? 1000, Math.max(edge, frequency ?? 1000)];
   if (waveform.kind !== "pulse") return [0, 0];
-  const lowest = 1 / (2 * Math.PI * 10 * (positive(waveform.width_s) ?? 50e-6));
-  return [lowest, Math.max(0.35 / rise, lowest)];
+  const lowest = Math.min(1 / (2 * Math.PI * 10 * (positive(waveform.width_s) ?? 50e-6)), highest_Hz);
+  return [lowest, Math.max(edge, lowest)];
 }

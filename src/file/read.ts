@@ -128,7 +128,7 @@ function readList(spec: ListSpec, value: unknown, place: Place, reading: Reading
   const kept: unknown[] = [];
   value.forEach((raw, i) => {
     const at = { from: `${place.from}/${i}`, to: `${place.to}/${kept.length}` };
-    const item = reading.attempt(() => read(spec.item, raw, at, {}, reading));
+    const item = reading.attempt(() => readItem(spec.item, raw, at, reading));
     if (item instanceof Lost) {
       reading.repair(item.from, "dropped", `${item.why}; entry ${i + 1} of the list is left out.`, item.was ?? raw);
       reading.moved.push({ from: at.from, to: null });
@@ -139,6 +139,12 @@ function readList(spec: ListSpec, value: unknown, place: Place, reading: Reading
   });
   return kept;
 }
+
+/** Defaults stand in for an object that is missing, never for an item of a list that is something else. */
+const readItem = (spec: Spec, raw: unknown, at: Place, reading: Reading): unknown =>
+  spec.kind === "object" && !isObject(raw)
+    ? new Lost(at.from, "An object belongs here", raw)
+    : read(spec, raw, at, {}, reading);
 
 function readNullable(spec: ObjectSpec, value: unknown, place: Place, reading: Reading): unknown {
   if (value === undefined || value === null) return null;

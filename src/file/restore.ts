@@ -8,6 +8,7 @@ import { isObject, Lost, Reading } from "./reading.ts";
 import { type Restored, shown } from "./repair.ts";
 import { settled } from "./settle.ts";
 import type { Raw } from "./shape.ts";
+import { lineAndColumn, syntaxFault } from "./syntaxFault.ts";
 
 const refused = (where: string, why: string, cure: string): Restored => ({
   kind: "refused",
@@ -25,8 +26,8 @@ export function restoreDocument(text: string): Restored {
   let parsed: unknown;
   try {
     parsed = JSON.parse(body);
-  } catch (error) {
-    return notJson(body, error);
+  } catch {
+    return notJson(body);
   }
   return restoreValue(parsed);
 }
@@ -61,12 +62,9 @@ const versionOf = (raw: Raw): number =>
 const notOurs = (why: string): Restored =>
   refused("the file", why, "Open a file that ends in .stringwright.json, or one written by the published schema.");
 
-/** Line and column of a syntax error, where the engine names a position. */
-function notJson(body: string, error: unknown): Restored {
-  const message = error instanceof Error ? error.message : "";
-  const position = /position (\d+)/.exec(message)?.[1];
-  const before = position === undefined ? null : body.slice(0, Number(position)).split("\n");
-  const where = before === null ? "the file" : `line ${before.length}, column ${before.at(-1)!.length + 1}`;
+function notJson(body: string): Restored {
+  const at = syntaxFault(body);
+  const where = at === null ? "the file" : lineAndColumn(body, at);
   return refused(
     where,
     "The text is not JSON from there on.",

@@ -22,10 +22,10 @@ export function scaleFactorFor(waveform: Waveform, instrument: Instrument): numb
     (3 * greatest_Vpeak(waveform)) / instrument.greatestInput_Vpeak,
     2,
   );
+  if (least >= 1e12) return 1e12;
   const most = nominal / (0.2 * instrument.range_V);
-  const nice = niceFrom(least);
   const decade = 10 ** Math.ceil(Math.log10(least) - 1e-12);
-  return Math.min(decade <= most ? decade : nice, 1e12);
+  return decade <= most ? decade : niceFrom(least);
 }
 
 /** The smallest 1-2-5 number at or above `least`. */
