@@ -1,3 +1,4 @@
+import { ZIndexLayer } from "recharts";
 import type { Band, Mark } from "./LinePlot.tsx";
 import { type Axis, shareOf } from "./logAxis.ts";
 import type { PlotBox } from "./plotBox.ts";
@@ -27,13 +28,15 @@ const lineHeight = 14;
 /** Names written where the things are: traces at their ends, limits on their lines, bands in their corner. */
 export function PlotLabels(p: Props) {
   return (
-    <g className="plot-labels">
-      {spread(labelsOf(p), p.box).map((label) => (
-        <text key={label.id} x={label.x} y={label.y} textAnchor={label.anchor} fill={label.fill} fontSize={12}>
-          {label.text}
-        </text>
-      ))}
-    </g>
+    <ZIndexLayer zIndex={2100}>
+      <g className="plot-labels">
+        {spread(labelsOf(p), p.box).map((label) => (
+          <text key={label.id} x={label.x} y={label.y} textAnchor={label.anchor} fill={label.fill} fontSize={12}>
+            {label.text}
+          </text>
+        ))}
+      </g>
+    </ZIndexLayer>
   );
 }
 
@@ -52,7 +55,7 @@ function labelsOf({ box, x, y, rows, traces, marks, bands }: Props): readonly La
       return { id: mark.id, text: mark.name, x: box.right - 6, y: up(mark.at) - 5, anchor: "end", fill };
     const turned = across(mark.at) > box.right - 6.2 * mark.name.length - 8;
     const at = across(mark.at) + (turned ? -5 : 5);
-    return { id: mark.id, text: mark.name, x: at, y: box.bottom - 8, anchor: turned ? "end" : "start", fill };
+    return { id: mark.id, text: mark.name, x: at, y: box.top + 13, anchor: turned ? "end" : "start", fill };
   });
   const areas = bands.map((band): Label => {
     const left = Math.max(box.left, band.x === null ? box.left : across(Math.max(band.x[0], x.domain[0])));
@@ -73,19 +76,19 @@ const span = (label: Label): readonly [number, number] => {
   return label.anchor === "start" ? [label.x, label.x + width] : [label.x - width, label.x];
 };
 
-/** Lifts a label by a line as long as it would write over one already placed. */
+/** Moves a label by a line, towards the middle, as long as it would write over one already placed. */
 function spread(labels: readonly Label[], box: PlotBox): readonly Label[] {
   const placed: Label[] = [];
   for (const label of labels) {
-    let y = Math.min(Math.max(label.y, box.top + 10), box.bottom - 4);
+    let y = Math.min(Math.max(label.y, box.top + 10), box.bottom - 8);
     const [left, right] = span(label);
     const over = (at: number) =>
       placed.some((other) => {
         const [l, r] = span(other);
         return left < r && l < right && Math.abs(other.y - at) < lineHeight;
       });
-    for (let tries = 0; tries < 12 && over(y); tries += 1)
-      y = y - lineHeight > box.top + 8 ? y - lineHeight : box.bottom - 4 - lineHeight * tries;
+    const step = label.y < (box.top + box.bottom) / 2 ? lineHeight : -lineHeight;
+    for (let tries = 0; tries < 8 && over(y); tries += 1) y += step;
     placed.push({ ...label, y });
   }
   return placed;

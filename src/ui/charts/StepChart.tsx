@@ -1,11 +1,12 @@
-import { useDeferredValue, useMemo } from "react";
+import { useDeferredValue, useMemo, useState } from "react";
 import type { StepResponse, StepTrace } from "../../solver/index.ts";
 import { plainText, signed, withUnit } from "./axisText.ts";
 import { ChartFrame } from "./ChartFrame.tsx";
+import { Choice } from "./Choice.tsx";
 import type { Column } from "./columns.ts";
 import type { Band, Mark } from "./LinePlot.tsx";
 import { LinePlot } from "./lazyPlots.tsx";
-import { type Axis, linearAxis, logAxis } from "./logAxis.ts";
+import { type Axis, linearAxis, logAxis, niceStep } from "./logAxis.ts";
 import { PlotPanel } from "./PlotPanel.tsx";
 import { plotBox } from "./plotBox.ts";
 import { checkSeries, thinRows } from "./trace.ts";
@@ -18,6 +19,11 @@ interface Props {
   readonly file: string;
 }
 
+type View = "whole" | "near";
+const views = [
+  ["whole", "whole step"],
+  ["near", "near 100\u2009%"],
+] as const;
 const height = 250;
 const gap = 16;
 const narrow = 560;
@@ -30,9 +36,10 @@ export function StepChart(p: Props) {
   const fast = useMemo(() => seriesOf(step.fast), [step]);
   const slow = useMemo(() => seriesOf(step.slow), [step]);
   const cursor = useCursor(fast.xs.length + slow.xs.length);
+  const [view, setView] = useState<View>("whole");
   const y = useMemo(
-    () => linearAxis([0, 110, 100 * (1 + 1.5 * p.tolerance), ...fast.percent, ...slow.percent], 6),
-    [fast, slow, p.tolerance],
+    () => outputAxis(view, [...fast.percent, ...slow.percent], p.tolerance),
+    [view, fast, slow, p.tolerance],
   );
   const bands = useMemo(() => toleranceBand(p.tolerance), [p.tolerance]);
   const columns = useMemo(() => columnsOf(step), [step]);
@@ -42,6 +49,7 @@ export function StepChart(p: Props) {
       title="step response"
       sentence={step.sentence}
       file={p.file}
+      controls={<Choice label="output shown" options={views} value={view} onChange={setView} />}
       note={left > 0 ? `${left} points at or before the start of the step, or not finite, are not drawn.` : null}
       columns={columns}
       cursor={cursor}
@@ -107,6 +115,13 @@ function seriesOf(trace: StepTrace) {
   const percent = trace.value.map((v) => 100 * v);
   const checked = checkSeries(trace.time_s, [{ ...outputTrace[0], y: percent }], { x: true, y: false });
   return { xs: trace.time_s, percent, left: checked.left, rows: thinRows(checked.rows, ["output"], 400) };
+}
+
+/** The whole step from 0, or the neighbourhood of 100 % in which the wanted tolerance is seen. */
+function outputAxis(view: View, percent: readonly number[], tolerance: number): Axis | null {
+  if (view === "whole") return linearAxis([0, 110, 100 * (1 + 1.5 * tolerance), ...percent], 6);
+  const half = Math.min(100, 3 * niceStep(100 * tolerance));
+  return linearAxis([100 - half, 100 + half], 6);
 }
 
 function toleranceBand(tolerance: number): readonly Band[] {

@@ -31,6 +31,7 @@ const minus = (text: string): string => text.replace("-", "\u2212");
 /** A value with prefix and unit, `digits` significant: "12.6 kHz". */
 export function withUnit(value: number, unit: string, digits = 4): string {
   const rounded = Number(value.toPrecision(digits));
+  if (unit === "") return plainText(rounded);
   const text = axisText(rounded);
   return text.includes("\u2009") ? `${text}${unit}` : `${text}\u2009${unit}`;
 }

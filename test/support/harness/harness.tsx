@@ -1,45 +1,30 @@
-import { StrictMode } from "react";
+import { StrictMode, useState } from "react";
 import { createRoot } from "react-dom/client";
 import "./harness.css";
-import { ElementChart } from "../../../src/ui/charts/ElementChart.tsx";
-import { FrequencyChart } from "../../../src/ui/charts/FrequencyChart.tsx";
-import { StepChart } from "../../../src/ui/charts/StepChart.tsx";
+import { SizeSheet } from "../../../src/ui/size/SizeSheet.tsx";
+import { inventedDocument } from "../inventedDocument.ts";
 import { inventedProof } from "../inventedProof.ts";
+import { closedWindow, inventedSizing } from "../inventedSizing.ts";
 
-const values = inventedProof.sheet.values;
-const list = (path: string) => values[path] as readonly number[];
+function Size({ shut }: { readonly shut: boolean }) {
+  const [document, setDocument] = useState(inventedDocument);
+  const actions = {
+    onTake: (c: (typeof inventedSizing.candidates)[number]) => setDocument({ ...document, design: c.design }),
+    onSizeAgain: () => setDocument(inventedDocument),
+    onCure: console.log,
+    onWhy: console.log,
+  };
+  const sizing = shut ? { ...inventedSizing, window: closedWindow, candidates: [] } : inventedSizing;
+  return <SizeSheet document={document} sizing={sizing} proof={inventedProof} actions={actions} />;
+}
+
+const screens: Record<string, () => React.ReactNode> = {
+  "#size": () => <Size shut={false} />,
+  "#shut": () => <Size shut />,
+};
 
 createRoot(document.getElementById("root")!).render(
   <StrictMode>
-    <main>
-      <FrequencyChart
-        response={inventedProof.frequency}
-        tolerance={0.03}
-        band_Hz={[0, 3.5e6]}
-        bandwidth_Hz={30e6}
-        file="invented-frequency"
-      />
-      <StepChart step={inventedProof.step} tolerance={0.03} file="invented-step" />
-      <ElementChart
-        title="voltage per element"
-        quantity="voltage"
-        unit="V"
-        file="invented-voltage"
-        bases={[
-          {
-            id: "peak",
-            name: "peak",
-            values: list("element.greatest_Vpeak"),
-            limits: list("element.voltageLimit_Vpeak"),
-          },
-          {
-            id: "rms",
-            name: "dc or rms",
-            values: list("element.greatestRms_V"),
-            limits: list("element.voltageLimit_V"),
-          },
-        ]}
-      />
-    </main>
+    <main>{screens[location.hash]?.()}</main>
   </StrictMode>,
 );

@@ -1,0 +1,84 @@
+import { useMemo, useState } from "react";
+import type { Candidate } from "../../solver/index.ts";
+import { type CandidateColumn, candidateColumns, type Order, sorted } from "./candidateColumns.ts";
+
+interface Props {
+  readonly candidates: readonly Candidate[];
+  readonly chosen: Candidate | null;
+  readonly onTake: (candidate: Candidate) => void;
+}
+
+/** Every candidate with the figures it is judged on; sorted by any of them. */
+export function CandidateTable({ candidates, chosen, onTake }: Props) {
+  const [order, setOrder] = useState<Order>({ id: "rank", down: false });
+  const rows = useMemo(() => sorted(candidates, order), [candidates, order]);
+  const press = (column: CandidateColumn) =>
+    setOrder((now) =>
+      now.id === column.id ? { id: now.id, down: !now.down } : { id: column.id, down: column.greaterFirst ?? false },
+    );
+  return (
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled region must be reachable by keyboard
+    <section className="sheet-scroll" tabIndex={0} aria-label="candidates">
+      <table className="sheet-table candidates">
+        <thead>
+          <tr>
+            <th scope="col">
+              <span className="unseen">choose</span>
+            </th>
+            {candidateColumns.map((column) => (
+              <th
+                key={column.id}
+                scope="col"
+                className={column.number ? "number" : ""}
+                aria-sort={order.id !== column.id ? "none" : order.down ? "descending" : "ascending"}
+              >
+                <button type="button" className="sort-button" title={column.title} onClick={() => press(column)}>
+                  {column.head}
+                  <span aria-hidden="true">{order.id !== column.id ? "" : order.down ? " ↓" : " ↑"}</span>
+                </button>
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map((candidate) => (
+            <Row key={candidate.rank} candidate={candidate} chosen={candidate === chosen} onTake={onTake} />
+          ))}
+        </tbody>
+      </table>
+    </section>
+  );
+}
+
+interface RowProps {
+  readonly candidate: Candidate;
+  readonly chosen: boolean;
+  readonly onTake: (candidate: Candidate) => void;
+}
+
+function Row({ candidate, chosen, onTake }: RowProps) {
+  const stops = candidate.stops.length;
+  return (
+    <tr className={chosen ? "chosen" : ""} aria-current={chosen ? "true" : undefined}>
+      <td>
+        {chosen ? (
+          <span className="quiet">chosen</span>
+        ) : (
+          <button type="button" className="quiet-button" onClick={() => onTake(candidate)}>
+            take<span className="unseen"> candidate {candidate.rank}</span>
+          </button>
+        )}
+        {stops > 0 ? (
+          <span className="stop-word" title={candidate.stops.join(", ")}>
+            {` ${stops} stop${stops > 1 ? "s" : ""}`}
+          </span>
+        ) : null}
+      </td>
+      {candidateColumns.map((column) => (
+        <td key={column.id} className={column.number ? "number" : ""}>
+          {column.show(candidate)}
+        </td>
+      ))}
+    </tr>
+  );
+}
