@@ -1,0 +1,49 @@
+import type { DividerDocument, Result, Sizing } from "../solver/index.ts";
+
+/** Keeps the results last used, at most `most` of them. */
+export class Cache<T> {
+  readonly #kept = new Map<string, T>();
+  readonly #most: number;
+  constructor(most: number) {
+    this.#most = most;
+  }
+
+  get(key: string, make: () => T): T {
+    const value = this.#kept.has(key) ? (this.#kept.get(key) as T) : make();
+    this.#kept.delete(key);
+    this.#kept.set(key, value);
+    for (const oldest of this.#kept.keys()) {
+      if (this.#kept.size <= this.#most) break;
+      this.#kept.delete(oldest);
+    }
+    return value;
+  }
+
+  get size(): number {
+    return this.#kept.size;
+  }
+}
+
+/** The same text for the same value, whatever the order of its keys. A text rather than a digest: two inputs never share it. */
+export function canonical(value: unknown): string {
+  return JSON.stringify(value, (_, item: unknown) =>
+    typeof item === "object" && item !== null && !Array.isArray(item)
+      ? Object.fromEntries(Object.entries(item).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : item,
+  );
+}
+
+/** What a search depends on: not the design, the name, the typed texts or what was measured. */
+export const sizingKey = ({ brief, parts, instruments, principal, origins }: DividerDocument, top: number): string =>
+  canonical([brief, parts, instruments, principal, ownOrigins(origins), top]);
+
+const ownOrigins = (origins: DividerDocument["origins"]): DividerDocument["origins"] =>
+  Object.fromEntries(Object.entries(origins).filter(([pointer]) => !pointer.startsWith("/design")));
+
+type Size = (document: DividerDocument, options: { readonly top: number }) => Result<Sizing>;
+
+/** `size` that answers from memory when nothing it depends on has changed. */
+export function cachedSize(size: Size, most = 24): Size {
+  const cache = new Cache<Result<Sizing>>(most);
+  return (document, options) => cache.get(sizingKey(document, options.top), () => size(document, options));
+}

@@ -1,0 +1,122 @@
+import { describe, expect, it } from "vitest";
+import type { Candidate, DividerDocument, Proof, Sizing } from "../../src/solver/index.ts";
+import { answer } from "../../src/work/answer.ts";
+import { Cache, cachedSize, canonical, sizingKey } from "../../src/work/cache.ts";
+import { inlineWorker } from "../../src/work/inline.ts";
+import type { OutcomeMessage } from "../../src/work/job.ts";
+import { Lane } from "../../src/work/lane.ts";
+import { jobsOf } from "../../src/work/outcomeOf.ts";
+import { inventedDesign, inventedStart } from "../file/invented.ts";
+
+const candidate = { rank: 1, design: inventedDesign().design!, parts: [] } as unknown as Candidate;
+const sizingWith = (candidates: Candidate[]) => ({ candidates, lost: [] }) as unknown as Sizing;
+function door(candidates: Candidate[] = [candidate]) {
+  const calls: string[] = [];
+  const run = jobsOf({
+    size: (_, { top }) => {
+      calls.push(`size ${top}`);
+      return { ok: true, value: sizingWith(candidates) };
+    },
+    prove: (document) => {
+      calls.push(`prove ${document.design === null ? "nothing" : document.design.follows}`);
+      return { ok: true, value: { level: "clear" } as Proof };
+    },
+    takeCandidate: (document, { design }) => ({ ...document, design: { ...design, follows: false } }),
+  });
+  return { calls, run };
+}
+const standing = (): DividerDocument => {
+  const document = inventedDesign();
+  return { ...document, design: { ...document.design!, follows: false } };
+};
+
+describe("a job that follows the brief", () => {
+  it("chooses the best candidate where there is no design yet, and proves it", () => {
+    const { calls, run } = door();
+    const outcome = run({ kind: "follow", document: inventedStart(), top: 3 });
+    expect(calls).toEqual(["size 3", "prove true"]);
+    expect(outcome.ok && outcome.value.document.design?.follows).toBe(true);
+    expect(outcome.ok && outcome.value.sizing?.candidates).toHaveLength(1);
+  });
+
+  it("leaves a design that stands as it is, without a search", () => {
+    const { calls, run } = door();
+    const document = standing();
+    const outcome = run({ kind: "follow", document, top: 3 });
+    expect(calls).toEqual(["prove false"]);
+    expect(outcome.ok && outcome.value.document).toBe(document);
+  });
+
+  it("judges the old design when no candidate is left, and nothing when there is none", () => {
+    const { calls, run } = door([]);
+    run({ kind: "follow", document: inventedDesign(), top: 1 });
+    const none = run({ kind: "follow", document: inventedStart(), top: 1 });
+    expect(calls).toEqual(["size 1", "prove true", "size 1"]);
+    expect(none.ok && none.value.proof).toBeNull();
+    expect(none.ok && none.value.sizing).not.toBeNull();
+  });
+});
+
+describe("an answer", () => {
+  it("says a fault of the program instead of throwing it", () => {
+    const said: OutcomeMessage[] = [];
+    const run = () => {
+      throw new TypeError("broken");
+    };
+    answer(
+      { number: 7, job: { kind: "prove", document: standing() } },
+      run,
+      (m) => said.push(m),
+      () => 0,
+    );
+    expect(said).toHaveLength(1);
+    expect(said[0]).toMatchObject({ number: 7, kind: "refused" });
+    expect(JSON.stringify(said[0])).toContain("broken");
+  });
+
+  it("comes from a stand-in on the same thread as from a worker, and survives a structured clone", async () => {
+    const lane = new Lane({ startWorker: () => inlineWorker(door().run), now: () => 0, patience_ms: 0 });
+    const kinds: string[] = [];
+    const outcome = await new Promise((resolve) => {
+      lane.ask({ kind: "follow", document: inventedStart(), top: 1 }, (heard) => {
+        kinds.push(heard.kind);
+        if (heard.kind === "done") resolve(structuredClone(heard.outcome));
+      });
+    });
+    expect(kinds).toEqual(["progress", "done"]);
+    expect(outcome).toMatchObject({ proof: { level: "clear" } });
+  });
+});
+
+describe("the memory of searches", () => {
+  it("answers again without a search until something that a search depends on changes", () => {
+    let searches = 0;
+    const size = cachedSize(() => {
+      searches += 1;
+      return { ok: true, value: sizingWith([]) };
+    });
+    const document = inventedDesign();
+    size(document, { top: 3 });
+    size({ ...document, name: "other", design: null, typed: { "/brief/scaleFactor": "1k" } }, { top: 3 });
+    expect(searches).toBe(1);
+    size(document, { top: 4 });
+    size({ ...document, brief: { ...document.brief, scaleFactor: 999 } }, { top: 3 });
+    size({ ...document, origins: {} }, { top: 3 });
+    expect(searches).toBe(4);
+  });
+
+  it("does not depend on the order of keys", () => {
+    expect(canonical({ b: [1, { d: 1, c: 2 }], a: null })).toBe(canonical({ a: null, b: [1, { c: 2, d: 1 }] }));
+    expect(sizingKey(inventedDesign(), 1)).not.toBe(sizingKey(inventedDesign(), 2));
+  });
+
+  it("keeps the results last used", () => {
+    const cache = new Cache<number>(2);
+    let made = 0;
+    const get = (key: string) => cache.get(key, () => (made += 1));
+    for (const key of ["a", "b", "a", "c", "a"]) get(key);
+    expect(made).toBe(3);
+    expect(cache.size).toBe(2);
+    expect(get("b")).toBe(4);
+  });
+});
