@@ -156,7 +156,7 @@ export const inventedProof: Proof = {
   worstFault: null,
   findings: [
     finding({
-      id: "insulation.creepage",
+      id: "creepage.column",
       level: "stop",
       what: "creepage along the column",
       actual: 0.3,
@@ -186,7 +186,7 @@ export const inventedProof: Proof = {
       reason: "Rests on an assumed source resistance.",
     }),
     finding({
-      id: "insulation.clearance",
+      id: "clearance.column",
       what: "clearance along the column",
       actual: 0.24,
       limit: 0.041,

@@ -36,7 +36,9 @@ export function linearAxis(values: readonly number[], most: number): Axis | null
   if (drawn.length === 0) return null;
   const low = least(drawn);
   const high = greatest(drawn);
-  const step = niceStep((high - low || Math.abs(high) || 1) / most);
+  const size = Math.max(Math.abs(low), Math.abs(high));
+  const span = high - low > 1e-6 * size ? high - low : size;
+  const step = niceStep((span > 1e-30 ? span : 1) / most);
   const first = Math.floor(low / step + 1e-9);
   const last = Math.max(first + 1, Math.ceil(high / step - 1e-9));
   const ticks = Array.from({ length: last - first + 1 }, (_, i) => Number(((first + i) * step).toPrecision(12)));
