@@ -38,6 +38,20 @@ function inside(spec: Spec, key: string, here: unknown): Spec | null {
   }
 }
 
+/** What stands at a place when nothing is stated there, and whether that is an assumption. */
+export function defaultAt(
+  document: DividerDocument,
+  pointer: string,
+): Result<{ readonly value: unknown; readonly assumed: boolean }> {
+  const spec = specAt(document, pointer);
+  if (spec === undefined || spec === null) return refuse(pointer, "There is no such place in the document.");
+  const reading = new Reading(document as unknown as Raw);
+  const parent = { ...(valueAt(document, pointer.slice(0, pointer.lastIndexOf("/"))) as Raw) };
+  const value = read(spec, undefined, { from: pointer, to: pointer }, parent, reading);
+  if (value instanceof Lost || value === undefined) return refuse(pointer, "A value is needed here.");
+  return { ok: true, value: { value, assumed: reading.assumed.includes(pointer) } };
+}
+
 const refuse = (where: string, why: string): Result<never> => ({
   ok: false,
   error: { where, why, cure: "Type a value that fits, or leave what stood there." },
@@ -55,6 +69,7 @@ export function checkAt(document: DividerDocument, pointer: string, value: unkno
   const place = { from: pointer, to: pointer };
   const checked = read(spec ?? { kind: "any", about: "" }, value, place, isObject(parent) ? parent : {}, reading);
   if (checked instanceof Lost) return refuse(pointer, `${checked.why}.`);
+  if (reading.filled.includes(pointer)) return refuse(pointer, "A value is needed here.");
   const fault = reading.repairs[0];
   if (fault !== undefined) return refuse(fault.pointer, fault.why);
   return { ok: true, value: checked };

@@ -1,5 +1,5 @@
 /** One change of a document as a pure function: the value, its origin, the text typed, and whether the design still follows. */
-import { checkAt } from "../file/checkAt.ts";
+import { checkAt, defaultAt } from "../file/checkAt.ts";
 import { inconsistency } from "../file/consistent.ts";
 import { isAtOrBelow, keysOf, valueAt, withoutItemAt, withValueAt } from "../file/pointer.ts";
 import type { DividerDocument, Origin, Result } from "../solver/index.ts";
@@ -31,6 +31,19 @@ export function edited(document: DividerDocument, change: Change): Result<Divide
   const changed = withValueAt(document, pointer, checked.value);
   if (changed === undefined) return refuse(pointer, "There is no such place in the document.");
   return finished(noted(changed, pointer, change), pointer);
+}
+
+/** The default in place of what was stated, *assumed* where it says something of the world. */
+export function cleared(document: DividerDocument, pointer: string): Result<DividerDocument> {
+  const standard = defaultAt(document, pointer);
+  if (!standard.ok) return standard;
+  const { value, assumed } = standard.value;
+  const changed = withValueAt(document, pointer, value);
+  if (changed === undefined || isBookkeeping(pointer))
+    return refuse(pointer, "There is no such place in the document.");
+  const origins: Record<string, Origin> = without(changed.origins, pointer);
+  if (assumed) origins[pointer] = "assumed";
+  return finished({ ...changed, origins, typed: without(changed.typed, pointer) }, pointer);
 }
 
 /** Without the list item at a pointer; origins and typed texts of the items after it move up. */

@@ -65,6 +65,8 @@ export type Done = Result<null>;
 export interface Actions {
   /** Sets the value at a JSON pointer (`-` appends to a list). Typing in one field stays one step until `leaveField`. */
   readonly editAt: (pointer: string, value: unknown, options: EditOptions) => Done;
+  /** A field left blank: its default stands there again, marked as assumed. */
+  readonly clearAt: (pointer: string, step: string) => Done;
   /** Takes one item out of a list. */
   readonly removeAt: (pointer: string, step: string) => Done;
   /** Blur: the next edit is a new step, also in the same field. */

@@ -3,7 +3,7 @@ import { createStore, type StoreApi } from "zustand/vanilla";
 import { encodeDocument } from "../file/encode.ts";
 import { valueAt } from "../file/pointer.ts";
 import type { Candidate, DividerDocument, Result } from "../solver/index.ts";
-import { type Change, edited, removed } from "./edit.ts";
+import { type Change, cleared, edited, removed } from "./edit.ts";
 import { redone, stepped, undone } from "./history.ts";
 import type { Done, FileState, Snapshot, State, Store } from "./state.ts";
 import { withDesignOf } from "./take.ts";
@@ -77,6 +77,7 @@ export function createDividerStore(
       ...start(document, file),
       editAt: (pointer, value, options) =>
         change(options.step, pointer, (old) => sameOr(old, { pointer, value, ...options })),
+      clearAt: (pointer, step) => change(step, null, (old) => cleared(old, pointer)),
       removeAt: (pointer, step) => change(step, null, (old) => removed(old, pointer)),
       leaveField: () => set({ typing: null }),
       acceptAssumed: (pointer) =>
