@@ -1,9 +1,12 @@
+import type { SeriesName } from "../standards/preferred.ts";
+import type { MaterialGroup, PollutionDegree } from "../standards/surroundings.ts";
+
 /** What the engineer asks. Shapes only; every physical key carries its unit. */
 export type WaveformKind = "dc" | "sine" | "pulse" | "square" | "recorded";
 export type StatedAs = "dc" | "rms" | "peak";
-export type PollutionDegree = 1 | 2 | 3;
-export type MaterialGroup = "I" | "II" | "IIIa" | "IIIb";
-export type SeriesName = "E3" | "E6" | "E12" | "E24" | "E48" | "E96" | "E192";
+export type { SeriesName } from "../standards/preferred.ts";
+export type { MaterialGroup, PollutionDegree } from "../standards/surroundings.ts";
+export type { MaterialGroup, PollutionDegree, SeriesName };
 
 export interface Waveform {
   readonly kind: WaveformKind;

@@ -1,0 +1,157 @@
+import type { Edit } from "../standards/finding.ts";
+import { computedHere, practice, type Source } from "../standards/source.ts";
+import { type Judging, plainFinding } from "./judging.ts";
+import type { Show } from "./show.ts";
+
+const iec60664: Source = {
+  title: "IEC 60664-1",
+  edition: "ed. 3 (2020)",
+  clause: "table A.2, to 20 000 m",
+  status: "figures from a secondary copy, primary not seen",
+};
+
+/** Uses of a divider that no choice of parts repairs, and inputs that contradict each other. */
+export function misuse(j: Judging, show: Show): void {
+  earth(j);
+  instrumentFit(j, show);
+  voltages(j, show);
+  surroundings(j, show);
+}
+
+function earth(j: Judging): void {
+  const { earth } = j.document.brief.source;
+  if (earth === "oneSide") return;
+  plainFinding(j, {
+    id: "source.earth",
+    level: "stop",
+    what: earth === "floating" ? "a divider to earth on a floating source" : "no point of the source is earthed",
+    reason:
+      "A divider to earth on a floating source shorts it, measures common mode, or lifts the instrument. " +
+      "Earth one side of the source, or take two matched dividers and their difference, or an isolated way.",
+    source: practice("which point is earth comes first"),
+    cure: { label: "one side is earthed", edits: [{ pointer: "/brief/source/earth", value: "oneSide" }] },
+  });
+}
+
+function instrumentFit(j: Judging, show: Show): void {
+  const { instrument, document, sheet } = j;
+  if (instrument.resistance_ohm <= 100) {
+    const at = document.instruments.indexOf(instrument);
+    plainFinding(j, {
+      id: "instrument.fiftyOhm",
+      level: "stop",
+      what: "input resistance of the instrument",
+      actual: instrument.resistance_ohm,
+      unit: "ohm",
+      reason: `${instrument.name} has ${show(instrument.resistance_ohm, "ohm")}: that becomes the LV arm, and the scale factor R1 over it. Set the input to 1 MΩ.`,
+      source: computedHere("LV arm in parallel with the instrument"),
+      cure: {
+        label: "set the input to 1 MΩ",
+        edits: [
+          { pointer: `/instruments/${at}/resistance_ohm`, value: 1e6 },
+          { pointer: `/instruments/${at}/function`, value: "scope 1 MΩ" },
+          { pointer: `/instruments/${at}/greatestInput_Vpeak`, value: 300 },
+          { pointer: `/instruments/${at}/range_V`, value: 100 },
+        ],
+      },
+    });
+  }
+  if (sheet.number("lvArm.wanted_ohm") === null) {
+    const R1 = sheet.number("hvArm.resistance_ohm") as number;
+    const alone = 1 + R1 / instrument.resistance_ohm;
+    plainFinding(j, {
+      id: "scaleFactor.existence",
+      level: "stop",
+      what: "wanted scale factor",
+      actual: document.brief.scaleFactor,
+      limit: alone,
+      unit: "1",
+      sense: "atLeast",
+      margin: 1 - alone / document.brief.scaleFactor,
+      reason:
+        `No LV arm gives ${show(document.brief.scaleFactor, "1")}: the instrument alone already divides by ${show(alone, "1")}. ` +
+        `Lower R1 below ${show((document.brief.scaleFactor - 1) * instrument.resistance_ohm, "ohm")} or use a larger scale factor.`,
+      source: computedHere("scale factor > 1 + R1/Rm"),
+      path: "lvArm.wanted_ohm",
+      cure: {
+        label: "ten times the scale factor",
+        edits: [{ pointer: "/brief/scaleFactor", value: document.brief.scaleFactor * 10 }],
+      },
+    });
+  }
+}
+
+function voltages(j: Judging, show: Show): void {
+  const { document, instrument } = j;
+  const { waveform } = document.brief;
+  const stated = Math.abs(waveform.nominal_V);
+  const peak = j.sheet.number("working.peak_V") as number;
+  if (peak * 1.25 <= instrument.greatestInput_Vpeak) {
+    const edits: Edit[] = [{ pointer: "/brief/waveform/nominal_V", value: waveform.nominal_V * 1000 }];
+    plainFinding(j, {
+      id: "voltage.low",
+      level: "caution",
+      what: "a divider may not be needed",
+      actual: peak,
+      limit: instrument.greatestInput_Vpeak,
+      unit: "V",
+      sense: "atMost",
+      margin: 1 - peak / instrument.greatestInput_Vpeak,
+      reason: `${show(stated, "V")} is within what ${instrument.name} takes directly (${show(instrument.greatestInput_Vpeak, "V")}). Did you mean ${show(stated * 1000, "V")}? It is kept as typed.`,
+      source: practice("the simplest route that survives"),
+      path: "working.peak_V",
+      cure: { label: `it is ${show(stated * 1000, "V")}`, edits },
+    });
+  }
+  if (waveform.greatest_Vpeak !== null && Math.abs(waveform.greatest_Vpeak) < peak * (1 - 1e-9)) {
+    plainFinding(j, {
+      id: "voltage.greatest",
+      level: "stop",
+      what: "greatest peak below the working peak",
+      actual: Math.abs(waveform.greatest_Vpeak),
+      limit: peak,
+      unit: "V",
+      sense: "atLeast",
+      margin: 1 - peak / Math.abs(waveform.greatest_Vpeak),
+      reason: `The greatest peak is typed as ${show(Math.abs(waveform.greatest_Vpeak), "V")}, the working peak is ${show(peak, "V")}. Are they swapped? Sizes use the larger.`,
+      source: computedHere("peak of the stated waveform"),
+      path: "working.greatest_Vpeak",
+      cure: {
+        label: "leave the greatest peak to the default",
+        edits: [{ pointer: "/brief/waveform/greatest_Vpeak", value: null }],
+      },
+    });
+  }
+}
+
+function surroundings(j: Judging, show: Show): void {
+  const { altitude_m, relativeHumidity } = j.document.brief.surroundings;
+  if (altitude_m > 20000 || altitude_m < -500) {
+    plainFinding(j, {
+      id: "surroundings.altitude",
+      level: "stop",
+      what: "altitude outside the table",
+      actual: altitude_m,
+      limit: 20000,
+      unit: "m",
+      sense: "atMost",
+      margin: 1 - altitude_m / 20000,
+      reason: `The altitude factor is tabulated to 20 000 m and is 1 to 2000 m; ${show(altitude_m, "m")} is refused, so no clearance can be judged.`,
+      source: iec60664,
+    });
+  }
+  if (relativeHumidity > 0.7) {
+    plainFinding(j, {
+      id: "surroundings.humidity",
+      level: "caution",
+      what: "relative humidity",
+      actual: relativeHumidity,
+      limit: 0.7,
+      unit: "1",
+      sense: "atMost",
+      margin: 1 - relativeHumidity / 0.7,
+      reason: "Above 70 % relative humidity surface leakage shifts the scale factor of a high-resistance string.",
+      source: practice("warn above 70 % relative humidity"),
+    });
+  }
+}

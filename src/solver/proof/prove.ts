@@ -1,0 +1,119 @@
+import { charge } from "../checks/charge.ts";
+import { faults, worstFault } from "../checks/faults.ts";
+import { instrumentRows } from "../checks/instruments.ts";
+import { insulation } from "../checks/insulation.ts";
+import { judging } from "../checks/judging.ts";
+import { judgeLoading, loading } from "../checks/loading.ts";
+import { judgeLvArm } from "../checks/lvArm.ts";
+import { misuse } from "../checks/misuse.ts";
+import { networkOf } from "../checks/networkOf.ts";
+import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
+import { show } from "../checks/show.ts";
+import { judgeStress } from "../checks/stress.ts";
+import { stringCapacitance } from "../checks/stringCapacitance.ts";
+import { workingVoltages } from "../checks/workingVoltage.ts";
+import type { DividerDocument } from "../job/document.ts";
+import { ok, type Result, refuse } from "../quantities/result.ts";
+import { type Level, worstFirst } from "../standards/finding.ts";
+import { cautions } from "./cautions.ts";
+import { jobSentence } from "./jobSentence.ts";
+import type { Proof } from "./proof.ts";
+import { response } from "./response.ts";
+import { judgeUncertainty } from "./uncertainty.ts";
+
+/**
+ * Judges a document's design: every figure with its trace, the responses, the fault table, the findings and the cautions.
+ * Refuses a document without a design, with a part or a principal instrument that it does not hold. Pure.
+ */
+export function prove(document: DividerDocument): Result<Proof> {
+  const refused = unusable(document);
+  if (refused !== null) return refused;
+  const j = judging(document);
+  const working = workingVoltages(document.brief, j.sheet);
+  scaleFactor(j);
+  loading(j);
+  const string = stringCapacitance(j);
+  judgeStress(j, working, show);
+  scaleFactorUncertainty(j);
+  judgeUncertainty(j, show);
+  judgeLoading(j, show);
+  insulation(j, show);
+  judgeLvArm(j);
+  misuse(j, show);
+  const rows = faults(j, string, show);
+  charge(j, show);
+  const { frequency, step } = response(j, networkOf(j, string), string, show);
+  const findings = worstFirst(j.findings);
+  return ok({
+    job: jobSentence(document.brief, j.instrument),
+    sheet: j.sheet.data(),
+    origins: document.origins,
+    assumed: Object.keys(document.origins).filter((pointer) => document.origins[pointer] === "assumed"),
+    frequency,
+    step,
+    instruments: instrumentRows(j),
+    faults: rows,
+    worstFault: worstFault(rows),
+    findings,
+    cautions,
+    level: findings.reduce<Level>(
+      (worst, finding) => (rank[finding.level] < rank[worst] ? finding.level : worst),
+      "clear",
+    ),
+  });
+}
+
+const rank: Record<Level, number> = { stop: 0, caution: 1, clear: 2 };
+
+function unusable(document: DividerDocument): Result<never> | null {
+  const { design } = document;
+  if (design === null) return refuse("/design", "There is no design yet.", "Size it first: size FILE --take 1.");
+  if (design.hvArm.elements.length === 0) {
+    return refuse(
+      "/design/hvArm/elements",
+      "The HV arm has no element.",
+      "Give at least one, or size the design again.",
+    );
+  }
+  if (!document.instruments.some((each) => each.id === document.principal)) {
+    return refuse(
+      "/principal",
+      `The principal instrument "${document.principal}" is not among the instruments.`,
+      `Name one of: ${document.instruments.map((each) => each.id).join(", ") || "(none: add one)"}.`,
+    );
+  }
+  return missingPart(document);
+}
+
+/** Every part that the design names must be held by the document, and be of the right kind. */
+function missingPart(document: DividerDocument): Result<never> | null {
+  const kinds = new Map(document.parts.map((part) => [part.id, part.kind]));
+  const design = document.design!;
+  const named: [string, string, string][] = [];
+  design.hvArm.elements.forEach((element, i) => {
+    named.push([`/design/hvArm/elements/${i}/part`, element.part, "resistor"]);
+    if (element.capacitor !== null)
+      named.push([`/design/hvArm/elements/${i}/capacitor`, element.capacitor, "capacitor"]);
+  });
+  design.lvArm.branches.forEach((branch, b) => {
+    const at = `/design/lvArm/branches/${b}`;
+    if (!("series" in branch)) {
+      named.push([`${at}/part`, branch.part, "trimmer" in branch ? "trimmer" : "capacitor"]);
+      return;
+    }
+    branch.series.forEach((item, i) => {
+      named.push([`${at}/series/${i}/part`, item.part, "rheostat" in item ? "trimmer" : "resistor"]);
+    });
+  });
+  design.protectors.forEach((fitted, i) => {
+    named.push([`/design/protectors/${i}/part`, fitted.part, "protector"]);
+  });
+  for (const [where, id, kind] of named) {
+    if (kinds.get(id) === kind) continue;
+    const why = kinds.has(id)
+      ? `The part "${id}" is a ${kinds.get(id)}, not a ${kind}.`
+      : `The document holds no part "${id}".`;
+    return refuse(where, why, `Add the ${kind} to /parts with every rating, or name another.`);
+  }
+  return null;
+}
