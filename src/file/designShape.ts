@@ -73,6 +73,7 @@ const seriesItemShape = variant<LvSeriesItem>(
       rheostat: rheostatShape,
     }),
   },
+  { fixed: "resistance_ohm", rheostat: "rheostat" },
 );
 
 const name = text("Reference designator, e.g. R2a.", "", 100);
@@ -117,6 +118,7 @@ const branchShape = variant<LvBranch>(
       ),
     }),
   },
+  { series: "series", capacitor: "capacitance_F", link: "link", trimmer: "trimmer" },
 );
 
 const lvArmShape = object<LvArm>("The arm between tap and earth.", {

@@ -75,6 +75,8 @@ export interface VariantSpec {
   readonly options: Readonly<Record<string, ObjectSpec>>;
   /** Which option an object is, or null. */
   readonly pick: (raw: Raw) => string | null;
+  /** The key that each option must have. */
+  readonly marks: Readonly<Record<string, string>>;
   /** How the kind is told, for a message: `"kind"` or `one of "series", "link"`. */
   readonly toldBy: string;
 }

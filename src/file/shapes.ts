@@ -115,7 +115,8 @@ export const variant = <T>(
   toldBy: string,
   pick: (raw: Raw) => string | null,
   options: Readonly<Record<string, ObjectSpec>>,
-): Shape<T, VariantSpec> => ({ kind: "variant", about, toldBy, pick, options });
+  marks: Readonly<Record<string, string>> = {},
+): Shape<T, VariantSpec> => ({ kind: "variant", about, toldBy, pick, options, marks });
 
 export const map = <T extends string>(
   about: string,
