@@ -69,8 +69,8 @@ export function checkAt(document: DividerDocument, pointer: string, value: unkno
   const place = { from: pointer, to: pointer };
   const checked = read(spec ?? { kind: "any", about: "" }, value, place, isObject(parent) ? parent : {}, reading);
   if (checked instanceof Lost) return refuse(pointer, `${checked.why}.`);
-  if (reading.filled.includes(pointer)) return refuse(pointer, "A value is needed here.");
   const fault = reading.repairs[0];
-  if (fault !== undefined) return refuse(fault.pointer, fault.why);
+  if (fault !== undefined) return refuse(fault.pointer, `${fault.fault}.`);
+  if (reading.filled.includes(pointer)) return refuse(pointer, "A value is needed here.");
   return { ok: true, value: checked };
 }

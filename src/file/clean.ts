@@ -13,7 +13,7 @@ export const wellFormed = (text: string): string => text.replace(loneSurrogate, 
 export function cleaned(value: unknown, pointer: string, reading: Reading): unknown {
   if (typeof value === "number") {
     if (Number.isFinite(value)) return value + 0;
-    reading.repair(pointer, "replaced", "The number is too large to be held; null stands in its place.", value);
+    reading.repair(pointer, "replaced", "The number is too large to be held", "null stands in its place", value);
     return null;
   }
   if (typeof value === "string") return cleanedText(value, pointer, reading);
@@ -31,18 +31,18 @@ export function cleaned(value: unknown, pointer: string, reading: Reading): unkn
 export function cleanedText(text: string, pointer: string, reading: Reading): string {
   const clean = wellFormed(text);
   if (clean !== text)
-    reading.repair(pointer, "replaced", "The text had half a character in it; \uFFFD stands there.", clean);
+    reading.repair(pointer, "replaced", "The text had half a character in it", "\uFFFD stands there now", clean);
   return clean;
 }
 
 /** A key that may be kept, or null. */
 export function safeKey(key: string, pointer: string, value: unknown, reading: Reading): string | null {
   if (key === "__proto__") {
-    reading.repair(pointer, "dropped", 'A key named "__proto__" is never kept.', value);
+    reading.repair(pointer, "dropped", 'No key may be named "__proto__"', "it is left out", value);
     return null;
   }
   const clean = wellFormed(key);
   if (clean !== key)
-    reading.repair(pointer, "renamed", "The key had half a character in it; \uFFFD stands there.", clean);
+    reading.repair(pointer, "renamed", "The key had half a character in it", "\uFFFD stands there now", clean);
   return clean;
 }

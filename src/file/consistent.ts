@@ -3,6 +3,11 @@ import type { DividerDocument, Refusal } from "../solver/index.ts";
 /** What no single key can tell: ids that clash, a principal instrument that is not there. Null when nothing is wrong. */
 export function inconsistency(document: DividerDocument): Refusal | null {
   const { instruments, parts, principal } = document;
+  const [lowest, highest] = document.brief.band_Hz;
+  if (lowest > highest) {
+    const why = `The lowest frequency, ${lowest} Hz, would stand above the highest, ${highest} Hz.`;
+    return { where: "/brief/band_Hz", why, cure: "Change the other one first." };
+  }
   if (instruments.length === 0) {
     return { where: "/instruments", why: "No instrument would be left.", cure: "Add another instrument first." };
   }

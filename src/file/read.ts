@@ -44,7 +44,13 @@ export function read(spec: Spec, value: unknown, place: Place, parent: Raw, read
       return readMap(spec, value, place, reading);
     case "literal":
       if (value !== undefined && value !== spec.value) {
-        reading.repair(place.from, "replaced", `Only ${JSON.stringify(spec.value)} can stand here.`, value);
+        reading.repair(
+          place.from,
+          "replaced",
+          `Only ${JSON.stringify(spec.value)} can stand here`,
+          "it does now",
+          value,
+        );
       }
       return spec.value;
     case "any":
@@ -56,13 +62,19 @@ function readText(spec: TextSpec, value: unknown, place: Place, reading: Reading
   if (typeof value === "string") {
     const clean = cleanedText(value, place.from, reading);
     if (clean.length <= spec.longest) return clean;
-    reading.repair(place.from, "replaced", `The text is cut to the ${spec.longest} characters that are kept.`, value);
+    reading.repair(
+      place.from,
+      "replaced",
+      `The text is longer than ${spec.longest} characters`,
+      "the rest is cut off",
+      value,
+    );
     return cleanedText(clean.slice(0, spec.longest), place.from, reading);
   }
   const missing = value === undefined || value === null;
   if (value === null && spec.nullable) return null;
   if (spec.fallback === undefined) return new Lost(place.from, "A text belongs here", value);
-  if (!missing) reading.repair(place.from, "replaced", `A text belongs here; ${nowText(spec.fallback)}.`, value);
+  if (!missing) reading.repair(place.from, "replaced", "A text belongs here", nowText(spec.fallback), value);
   reading.fill(place, false);
   return spec.fallback;
 }
@@ -75,7 +87,7 @@ function readChoice(spec: ChoiceSpec, value: unknown, place: Place, parent: Raw,
   const instead = fallbackOf(spec.fallback, parent, reading.root);
   const why = `One of ${Object.keys(spec.values).join(", ")} belongs here`;
   if (instead === undefined) return new Lost(place.from, why, value);
-  if (!missing) reading.repair(place.from, "replaced", `${why}; ${instead} stands there now.`, value);
+  if (!missing) reading.repair(place.from, "replaced", why, `${instead} stands there now`, value);
   reading.fill(place, spec.assumable);
   return instead;
 }
@@ -85,7 +97,7 @@ function readFlag(spec: FlagSpec, value: unknown, place: Place, reading: Reading
   const missing = value === undefined || value === null;
   if (spec.fallback === undefined) return new Lost(place.from, "true or false belongs here", value);
   if (!missing) {
-    reading.repair(place.from, "replaced", `true or false belongs here; ${spec.fallback} stands there now.`, value);
+    reading.repair(place.from, "replaced", "true or false belongs here", `${spec.fallback} stands there now`, value);
   }
   reading.fill(place, spec.assumable);
   return spec.fallback;
@@ -96,13 +108,19 @@ function readPair(spec: PairSpec, value: unknown, place: Place, parent: Raw, rea
     const [low, high] = value.map((v) => readNumber({ ...spec.item, fallback: undefined }, v, place, parent, reading));
     if (typeof low === "number" && typeof high === "number") {
       if (low <= high) return [low, high];
-      reading.repair(place.from, "replaced", "The lowest stood after the highest; they are exchanged.", value);
+      reading.repair(place.from, "replaced", "The lowest stands after the highest", "they are exchanged", value);
       return [high, low];
     }
   }
   const instead = fallbackOf(spec.fallback, parent, reading.root)!;
   if (value !== undefined && value !== null) {
-    reading.repair(place.from, "replaced", `Two numbers belong here; [${instead}] stands there now.`, value);
+    reading.repair(
+      place.from,
+      "replaced",
+      "Two numbers belong here, lowest and highest",
+      `[${instead}] stands there now`,
+      value,
+    );
   }
   reading.fill(place, true);
   return instead;
@@ -115,7 +133,7 @@ function readList(spec: ListSpec, value: unknown, place: Place, reading: Reading
     return [];
   }
   if (!Array.isArray(value)) {
-    reading.repair(place.from, "replaced", "A list belongs here; it is empty now.", value);
+    reading.repair(place.from, "replaced", "A list belongs here", "it is empty now", value);
     return [];
   }
   if (value.length > spec.longest) {
@@ -130,7 +148,7 @@ function readList(spec: ListSpec, value: unknown, place: Place, reading: Reading
     const at = { from: `${place.from}/${i}`, to: `${place.to}/${kept.length}` };
     const item = reading.attempt(() => readItem(spec.item, raw, at, reading));
     if (item instanceof Lost) {
-      reading.repair(item.from, "dropped", `${item.why}; entry ${i + 1} of the list is left out.`, item.was ?? raw);
+      reading.repair(item.from, "dropped", item.why, `entry ${i + 1} of the list is left out`, item.was ?? raw);
       reading.moved.push({ from: at.from, to: null });
       return;
     }
@@ -152,7 +170,7 @@ function readNullable(spec: ObjectSpec, value: unknown, place: Place, reading: R
     ? reading.attempt(() => readObject(spec, value, place, reading))
     : new Lost(place.from, "An object belongs here", value);
   if (!(found instanceof Lost)) return found;
-  reading.repair(found.from, "dropped", `${found.why}; ${place.from} is left out as a whole.`, found.was);
+  reading.repair(found.from, "dropped", found.why, `${place.from} is left out as a whole`, found.was);
   reading.moved.push({ from: place.from, to: null });
   return null;
 }
@@ -160,7 +178,7 @@ function readNullable(spec: ObjectSpec, value: unknown, place: Place, reading: R
 export function readObject(spec: ObjectSpec, value: unknown, place: Place, reading: Reading): unknown {
   const raw = isObject(value) ? unaliased(spec, value) : {};
   if (!isObject(value) && value !== undefined && value !== null) {
-    reading.repair(place.from, "replaced", "An object belongs here; it holds defaults now.", value);
+    reading.repair(place.from, "replaced", "An object belongs here", "it holds defaults now", value);
   }
   const found: Record<string, unknown> = {};
   for (const [key, field] of Object.entries(spec.fields)) {
@@ -207,7 +225,7 @@ function readMap(spec: MapSpec, value: unknown, place: Place, reading: Reading):
   const kept: Record<string, unknown> = {};
   if (value === undefined || value === null) return kept;
   if (!isObject(value)) {
-    reading.repair(place.from, "replaced", "An object belongs here; it is empty now.", value);
+    reading.repair(place.from, "replaced", "An object belongs here", "it is empty now", value);
     return kept;
   }
   for (const [key, raw] of Object.entries(value)) {
@@ -215,7 +233,7 @@ function readMap(spec: MapSpec, value: unknown, place: Place, reading: Reading):
     const item = key.startsWith("/")
       ? read(spec.value, raw, at, value, reading)
       : new Lost(at.from, "The key is no JSON pointer", raw);
-    if (item instanceof Lost) reading.repair(at.from, "dropped", `${item.why}; it is left out.`, raw);
+    if (item instanceof Lost) reading.repair(at.from, "dropped", item.why, "it is left out", raw);
     else kept[cleanedText(key, at.from, reading)] = item;
   }
   return kept;

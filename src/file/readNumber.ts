@@ -34,10 +34,10 @@ export function readNumber(
   if (!missing && fault === null) return (value as number) + 0;
   const instead = fallbackOf(spec.fallback, parent, reading.root);
   if (instead === undefined) return new Lost(place.from, fault ?? `${spec.about} It is missing`, value);
-  if (fault !== null) reading.repair(place.from, "replaced", `${fault}. ${standsNow(instead, spec)}.`, value);
+  if (fault !== null) reading.repair(place.from, "replaced", fault, standsNow(instead, spec), value);
   reading.fill(place, spec.assumable && (instead !== null || spec.ruled));
   return instead;
 }
 
 const standsNow = (value: number | null, spec: NumberSpec): string =>
-  value === null ? "It counts as not stated" : `The default ${value}${unitOf(spec)} stands there, assumed`;
+  value === null ? "it counts as not stated" : `the default ${value}${unitOf(spec)} stands there now, assumed`;

@@ -32,8 +32,9 @@ export class Reading {
     this.root = root;
   }
 
-  repair(pointer: string, what: Repair["what"], why: string, was: unknown): void {
-    this.repairs.push({ pointer, what, why, was: shown(was) });
+  /** `fault`: what is wrong with what stood there; `now`: what was done about it. */
+  repair(pointer: string, what: Repair["what"], fault: string, now: string, was: unknown): void {
+    this.repairs.push({ pointer, what, fault, why: `${fault}; ${now}.`, was: shown(was) });
   }
 
   fill(place: Place, assumed: boolean): void {

@@ -5,7 +5,9 @@ export interface Repair {
   /** JSON pointer into the file as it was. */
   readonly pointer: string;
   readonly what: "replaced" | "dropped" | "renamed";
-  /** One sentence: what stood there, why it could not stay, what stands there now. */
+  /** Why what stood there could not stay, without a full stop. */
+  readonly fault: string;
+  /** One sentence: the fault and what stands there now. */
   readonly why: string;
   /** What stood there, as JSON, shortened; empty where nothing did. */
   readonly was: string;

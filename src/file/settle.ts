@@ -35,7 +35,7 @@ function withOwnIds<T extends { readonly id: string }>(
     taken.add(id);
     seen.add(id);
     const why = item.id === "" ? "It had no id" : `The id ${item.id} stood twice`;
-    reading.repair(`${pointer}/${i}/id`, "renamed", `${why}; it is ${id} now.`, item.id);
+    reading.repair(`${pointer}/${i}/id`, "renamed", why, `it is ${id} now`, item.id);
     return { ...item, id };
   });
 }
@@ -44,7 +44,8 @@ function substitute(reading: Reading): Instrument {
   reading.repair(
     "/instruments",
     "replaced",
-    "No instrument could be read; a hand-held meter stands in, all assumed.",
+    "No instrument could be read",
+    "a hand-held meter stands in, all of it assumed",
     [],
   );
   const place = { from: "/instruments/0", to: "/instruments/0" };
@@ -59,7 +60,8 @@ function principalOf(id: string, instruments: readonly Instrument[], reading: Re
     reading.repair(
       "/principal",
       "replaced",
-      `There is no instrument ${id}; ${first} is the principal instrument now.`,
+      `There is no instrument ${id}`,
+      `${first} is the principal instrument now`,
       id,
     );
   }

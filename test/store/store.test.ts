@@ -47,6 +47,7 @@ describe("an edit", () => {
     ["/design/hvArm/elements/99/resistance_ohm", 1],
     ["/design/geometry", { columnLength_m: Number.NaN }],
     ["/principal", "nobody"],
+    ["/brief/band_Hz/0", 3],
     ["/instruments/0/id", ""],
     ["/version", 2],
     ["/origins", {}],
