@@ -66,6 +66,7 @@ const candidate = (rank: number, elements: number, value: number, over: Partial<
   elementDissipation_W: 0.33,
   governing: "element voltage, peak",
   stops: [],
+  findings: [],
   design: {
     ...design,
     follows: false,

@@ -7,7 +7,7 @@ export function PartsTable({ list }: { readonly list: PartsList }) {
   const places = [...new Set(list.lines.map((line) => line.place))];
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled region must be reachable by keyboard
-    <section className="sheet-scroll" tabIndex={0} aria-label="parts list">
+    <section className="sheet-scroll" tabIndex={0} aria-label="table of parts">
       <table className="sheet-table parts">
         <thead>
           <tr>
@@ -22,7 +22,6 @@ export function PartsTable({ list }: { readonly list: PartsList }) {
             <th scope="col" className="number">
               tolerance
             </th>
-            <th scope="col">rating</th>
             <th scope="col" className="number">
               fit
             </th>
@@ -38,7 +37,7 @@ export function PartsTable({ list }: { readonly list: PartsList }) {
         {places.map((place) => (
           <tbody key={place}>
             <tr className="place">
-              <th scope="rowgroup" colSpan={10}>
+              <th scope="rowgroup" colSpan={9}>
                 {place}
               </th>
             </tr>
@@ -51,7 +50,7 @@ export function PartsTable({ list }: { readonly list: PartsList }) {
         ))}
         <tfoot>
           <tr>
-            <th scope="row" colSpan={6}>
+            <th scope="row" colSpan={5}>
               in all
             </th>
             <td className="number">{list.total}</td>
@@ -71,11 +70,15 @@ function Line({ line }: { readonly line: PartsLine }) {
       <th scope="row" className="designators" title={line.designators.join(" ")}>
         {designatorRuns(line.designators)}
       </th>
-      <td>{line.name}</td>
+      <td>
+        {line.name}
+        {line.rating === "" ? null : <span className="rating">{line.rating}</span>}
+      </td>
       <td className="number">{line.valueText === "" ? "–" : line.valueText}</td>
-      <td className="number quiet">{line.value === null ? "–" : `${baseText(line.value)} ${line.unit}`}</td>
+      <td className="number quiet">
+        {line.value === null ? "–" : `${baseText(line.value)}\u2009${line.unit === "ohm" ? "Ω" : line.unit}`}
+      </td>
       <td className="number">{line.tolerance === null ? "–" : `±${percentText(line.tolerance)}`}</td>
-      <td>{line.rating === "" ? "–" : line.rating}</td>
       <td className="number">{line.quantity}</td>
       <td className="number">{line.spares}</td>
       <td className="number buy">{line.buy}</td>

@@ -1,4 +1,5 @@
 import { type PointerEvent, useCallback, useMemo } from "react";
+import type { UnitName } from "../../solver/index.ts";
 import { withUnit } from "./axisText.ts";
 import type { ElementBars } from "./elementBars.ts";
 import { BarPlot } from "./lazyPlots.tsx";
@@ -12,7 +13,7 @@ interface Props {
   readonly bars: ElementBars;
   readonly cursor: Cursor;
   readonly yName: string;
-  readonly unit: string;
+  readonly unit: UnitName;
 }
 
 /** The bars with the cursor over them. */

@@ -130,7 +130,7 @@ function axisParts(y: Axis, yName: string, xName: string, xTicks: readonly strin
         value: yName,
         angle: -90,
         position: "insideLeft",
-        offset: 8,
+        offset: 4,
         fontSize: 12,
         fill: "var(--quiet)",
         style: { textAnchor: "middle" },

@@ -1,4 +1,5 @@
 import { useDeferredValue, useMemo, useState } from "react";
+import type { UnitName } from "../../solver/index.ts";
 import { withUnit } from "./axisText.ts";
 import { BarPanel } from "./BarPanel.tsx";
 import { ChartFrame } from "./ChartFrame.tsx";
@@ -74,7 +75,7 @@ function noteOf(run: number, left: number): string | null {
   return said.length === 0 ? null : said.join(" ");
 }
 
-function readoutAt(basis: ElementBasis, element: number, unit: string): string {
+function readoutAt(basis: ElementBasis, element: number, unit: UnitName): string {
   const value = basis.values[element - 1] ?? null;
   const limit = basis.limits[element - 1] ?? null;
   const text = value === null ? "no value" : withUnit(value, unit);

@@ -103,7 +103,7 @@ function axisParts(x: Axis, y: Axis, xName: string, yName: string) {
         value: yName,
         angle: -90,
         position: "insideLeft",
-        offset: 8,
+        offset: 4,
         fontSize: 12,
         fill: "var(--quiet)",
         style: { textAnchor: "middle" },

@@ -1,3 +1,5 @@
+import { formatQuantity, type UnitName } from "../../solver/index.ts";
+
 const prefixes: Readonly<Record<number, string>> = {
   "-15": "f",
   "-12": "p",
@@ -28,13 +30,9 @@ export function plainText(value: number): string {
 
 const minus = (text: string): string => text.replace("-", "\u2212");
 
-/** A value with prefix and unit, `digits` significant: "12.6 kHz". */
-export function withUnit(value: number, unit: string, digits = 4): string {
-  const rounded = Number(value.toPrecision(digits));
-  if (unit === "") return plainText(rounded);
-  const text = axisText(rounded);
-  return text.includes("\u2009") ? `${text}${unit}` : `${text}\u2009${unit}`;
-}
+/** A value with prefix and unit, at most `digits` significant, no trailing zeros: "12.6 kHz". */
+export const withUnit = (value: number, unit: UnitName, digits = 4): string =>
+  formatQuantity(value, unit, { digits, trailing: false });
 
 /** A signed number: "+0.03", "−1.2", "0". */
 export function signed(value: number, digits = 3): string {

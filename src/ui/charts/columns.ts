@@ -1,3 +1,5 @@
+import { plainDecimal } from "../../solver/index.ts";
+
 /** The numbers behind a chart: one column a quantity, in base units. */
 export interface Column {
   /** Name with its unit for the data file: `frequency_Hz`. */
@@ -5,19 +7,6 @@ export interface Column {
   /** Head of the table: "frequency / Hz". */
   readonly head: string;
   readonly values: readonly (number | string | null)[];
-}
-
-/** A number as a plain decimal, never with an exponent, all its digits. */
-export function plainDecimal(value: number): string {
-  const text = String(value);
-  const parts = /^(-?)(\d+)(?:\.(\d+))?e([+-]\d+)$/.exec(text);
-  if (parts === null) return text;
-  const [, sign, whole, fraction = "", power] = parts;
-  const digits = `${whole}${fraction}`;
-  const point = whole!.length + Number(power);
-  if (point <= 0) return `${sign}0.${"0".repeat(-point)}${digits}`;
-  if (point >= digits.length) return `${sign}${digits}${"0".repeat(point - digits.length)}`;
-  return `${sign}${digits.slice(0, point)}.${digits.slice(point)}`;
 }
 
 const cell = (value: number | string | null | undefined): string => {

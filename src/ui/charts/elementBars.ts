@@ -1,3 +1,4 @@
+import type { UnitName } from "../../solver/index.ts";
 import { plainText, withUnit } from "./axisText.ts";
 import type { BarRow } from "./BarPlot.tsx";
 
@@ -61,7 +62,7 @@ function tickNames(rows: readonly BarRow[]): readonly string[] {
 /** The finding in words: the hardest-used element and how many are past their limit. */
 export function elementSentence(
   quantity: string,
-  unit: string,
+  unit: UnitName,
   values: readonly (number | null)[],
   limits: readonly (number | null)[],
 ): string {

@@ -8,7 +8,7 @@ export interface PlotBox {
   readonly bottom: number;
 }
 
-export const axisWidth = 52;
+export const axisWidth = 60;
 export const axisHeight = 34;
 export const topMargin = 10;
 

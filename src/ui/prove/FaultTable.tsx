@@ -14,7 +14,7 @@ interface Props {
 export function FaultTable({ rows, greatestInput_Vpeak, wantedUncertainty }: Props) {
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled region must be reachable by keyboard
-    <section className="sheet-scroll" tabIndex={0} aria-label="fault table">
+    <section className="sheet-scroll" tabIndex={0} aria-label="table of faults">
       <table className="sheet-table faults">
         <thead>
           <tr>

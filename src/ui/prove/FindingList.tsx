@@ -1,4 +1,4 @@
-import { type Cure, citation, type Finding } from "../../solver/index.ts";
+import { type Cure, citation, type Finding, type UnitName } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 import { percentText } from "../size/candidateText.ts";
 import { LevelMark } from "./LevelMark.tsx";
@@ -63,7 +63,7 @@ function Numbers({ finding, onWhy }: { readonly finding: Finding; readonly onWhy
 /** A number in its finding's unit; a share reads as percent. */
 export function numberText(value: number, unit: string): string {
   if (unit === "1") return percentText(value);
-  return withUnit(value, unit === "ohm" ? "Ω" : unit === "degC" ? "°C" : unit, 3);
+  return withUnit(value, unit as UnitName, 3);
 }
 
 const marginText = (margin: number): string =>

@@ -1,4 +1,4 @@
-import { useCallback, useMemo } from "react";
+import { useMemo } from "react";
 import type { Cure, DividerDocument, Proof } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 import { ElementChart } from "../charts/ElementChart.tsx";
@@ -9,7 +9,7 @@ import { Cautions } from "./Cautions.tsx";
 import { dissipationOn, voltageOn } from "./elementBases.ts";
 import { FaultTable } from "./FaultTable.tsx";
 import { FindingList } from "./FindingList.tsx";
-import { faultMark } from "./faultMarks.ts";
+import { faultMark, worstFaultsFirst } from "./faultMarks.ts";
 import { Insulation } from "./Insulation.tsx";
 import "../size/size.css";
 import "./prove.css";
@@ -78,16 +78,12 @@ function Stress({ proof }: { readonly proof: Proof }) {
 function Faults({ document, proof }: Omit<Props, "actions">) {
   const limit = document.instruments.find((each) => each.id === document.principal)?.greatestInput_Vpeak ?? null;
   const wanted = document.brief.wantedUncertainty;
-  const sentence = useCallback(() => faultSentence(proof, limit, wanted), [proof, limit, wanted]);
+  const rows = useMemo(() => worstFaultsFirst(proof.faults), [proof.faults]);
   return (
     <section className="sheet-section" aria-labelledby="faults-heading">
       <h2 id="faults-heading">fault table</h2>
-      <p className="finding-sentence">{sentence()}</p>
-      <FaultTable
-        rows={proof.faults}
-        greatestInput_Vpeak={limit ?? Number.POSITIVE_INFINITY}
-        wantedUncertainty={wanted}
-      />
+      <p className="finding-sentence">{faultSentence(proof, limit, wanted)}</p>
+      <FaultTable rows={rows} greatestInput_Vpeak={limit ?? Number.POSITIVE_INFINITY} wantedUncertainty={wanted} />
     </section>
   );
 }

@@ -32,7 +32,7 @@ export function BoundTable({ window, onWhy }: Props) {
                   "–"
                 ) : (
                   <button type="button" className="number-button" onClick={() => onWhy(bound.path)}>
-                    {withUnit(bound.resistance_ohm, "Ω", 4)}
+                    {withUnit(bound.resistance_ohm, "ohm", 4)}
                   </button>
                 )}
               </td>

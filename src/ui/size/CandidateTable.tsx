@@ -18,7 +18,7 @@ export function CandidateTable({ candidates, chosen, onTake }: Props) {
     );
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled region must be reachable by keyboard
-    <section className="sheet-scroll" tabIndex={0} aria-label="candidates">
+    <section className="sheet-scroll" tabIndex={0} aria-label="table of candidates">
       <table className="sheet-table candidates">
         <thead>
           <tr>

@@ -1,4 +1,4 @@
-import type { LvArm, SheetData } from "../../solver/index.ts";
+import type { LvArm, SheetData, UnitName } from "../../solver/index.ts";
 import { signed, withUnit } from "../charts/axisText.ts";
 import { percentText } from "./candidateText.ts";
 import { sheetNumber } from "./sheetNumber.ts";
@@ -10,7 +10,7 @@ interface Props {
 
 interface NumberProps extends Props {
   readonly path: string;
-  readonly unit: string;
+  readonly unit: UnitName | "%";
   readonly digits?: number;
 }
 
@@ -36,28 +36,28 @@ export function Exactness({ sheet, onWhy }: Props) {
         <tr>
           <th scope="row">exact, for the wanted scale factor</th>
           <td className="number">
-            <SheetFigure sheet={sheet} path="lvArm.wanted_ohm" unit="Ω" onWhy={onWhy} digits={6} />
+            <SheetFigure sheet={sheet} path="lvArm.wanted_ohm" unit="ohm" onWhy={onWhy} digits={6} />
           </td>
           <td />
         </tr>
         <tr>
           <th scope="row">fitted</th>
           <td className="number">
-            <SheetFigure sheet={sheet} path="lvArm.fitted_ohm" unit="Ω" onWhy={onWhy} digits={6} />
+            <SheetFigure sheet={sheet} path="lvArm.fitted_ohm" unit="ohm" onWhy={onWhy} digits={6} />
           </td>
           <td className="quiet">{off === null ? "" : `${signed(100 * off)}\u2009% of the exact value`}</td>
         </tr>
         <tr>
           <th scope="row">with the instrument in parallel</th>
           <td className="number">
-            <SheetFigure sheet={sheet} path="lvArm.withInstrument_ohm" unit="Ω" onWhy={onWhy} digits={6} />
+            <SheetFigure sheet={sheet} path="lvArm.withInstrument_ohm" unit="ohm" onWhy={onWhy} digits={6} />
           </td>
           <td />
         </tr>
         <tr>
           <th scope="row">scale factor, predicted</th>
           <td className="number">
-            <SheetFigure sheet={sheet} path="scaleFactor.predicted" unit="" onWhy={onWhy} digits={6} />
+            <SheetFigure sheet={sheet} path="scaleFactor.predicted" unit="1" onWhy={onWhy} digits={6} />
           </td>
           <td className="quiet">
             <SheetFigure sheet={sheet} path="scaleFactor.deviation" unit="%" onWhy={onWhy} digits={3} /> off the wanted

@@ -5,7 +5,7 @@ import { signed, withUnit } from "../charts/axisText.ts";
 export function InstrumentTable({ rows }: { readonly rows: readonly InstrumentRow[] }) {
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled region must be reachable by keyboard
-    <section className="sheet-scroll" tabIndex={0} aria-label="instruments">
+    <section className="sheet-scroll" tabIndex={0} aria-label="table of instruments">
       <table className="sheet-table">
         <thead>
           <tr>
@@ -34,7 +34,7 @@ export function InstrumentTable({ rows }: { readonly rows: readonly InstrumentRo
                 {row.name}
                 {row.principal ? <span className="quiet"> · principal</span> : null}
               </th>
-              <td className="number">{withUnit(row.scaleFactor, "", 6).trim()}</td>
+              <td className="number">{withUnit(row.scaleFactor, "1", 6)}</td>
               <td className="number">{withUnit(row.readingAtWorking_V, "V")}</td>
               <td className="number">{withUnit(row.readingAtGreatest_Vpeak, "V")}</td>
               <td className="number">{withUnit(row.greatestInput_Vpeak, "V", 3)}</td>

@@ -1,4 +1,4 @@
-import type { LostFamily } from "../../solver/index.ts";
+import type { LostFamily, UnitName } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 
 /** Families that gave no candidate, each with the number that ruled it out. */
@@ -26,8 +26,8 @@ export function LostFamilies({ lost }: { readonly lost: readonly LostFamily[] })
           {lost.map((each) => (
             <tr key={`${each.family} ${each.reason}`}>
               <th scope="row">{each.familyName}</th>
-              <td className="number">{each.actual === null ? "–" : withUnit(each.actual, unitSign(each.unit), 3)}</td>
-              <td className="number">{each.limit === null ? "–" : withUnit(each.limit, unitSign(each.unit), 3)}</td>
+              <td className="number">{each.actual === null ? "–" : withUnit(each.actual, each.unit as UnitName, 3)}</td>
+              <td className="number">{each.limit === null ? "–" : withUnit(each.limit, each.unit as UnitName, 3)}</td>
               <td className="reason">{each.reason}</td>
             </tr>
           ))}
@@ -36,5 +36,3 @@ export function LostFamilies({ lost }: { readonly lost: readonly LostFamily[] })
     </details>
   );
 }
-
-const unitSign = (unit: string): string => (unit === "ohm" ? "Ω" : unit === "1" ? "" : unit);

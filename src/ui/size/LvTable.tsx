@@ -53,10 +53,10 @@ function rowsOf(branch: LvBranch): readonly Row[] {
     return branch.series.map((item, i): Row => {
       const note = branch.series.length > 1 ? "in series within the branch" : "";
       const common = { key: `${key} ${i}`, branch: key, part: item.part };
-      if ("resistance_ohm" in item) return { ...common, value: withUnit(item.resistance_ohm, "Ω", 4), note };
+      if ("resistance_ohm" in item) return { ...common, value: withUnit(item.resistance_ohm, "ohm", 4), note };
       const { least_ohm, greatest_ohm, setting } = item.rheostat;
-      const set = withUnit(least_ohm + setting * (greatest_ohm - least_ohm), "Ω", 3);
-      return { ...common, value: `to ${withUnit(greatest_ohm, "Ω", 3)}`, note: `rheostat, drawn at ${set}` };
+      const set = withUnit(least_ohm + setting * (greatest_ohm - least_ohm), "ohm", 3);
+      return { ...common, value: `to ${withUnit(greatest_ohm, "ohm", 3)}`, note: `rheostat, drawn at ${set}` };
     });
   }
   const common = { key, branch: branch.name, part: branch.part };

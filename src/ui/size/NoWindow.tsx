@@ -1,4 +1,5 @@
 import type { Cure, ResistanceWindow } from "../../solver/index.ts";
+import { windowSentence } from "./windowSentence.ts";
 
 /** What to say when the bounds leave nothing open: the two that collide and the cheapest ways to part them. */
 export function NoWindow({
@@ -8,11 +9,10 @@ export function NoWindow({
   readonly window: ResistanceWindow;
   readonly onCure: (cure: Cure) => void;
 }) {
-  if (window.open) return null;
   return (
     <div className="no-window" role="status">
       <strong>No resistance window.</strong>
-      <p>{window.collision ?? "The bounds leave no R1 open."}</p>
+      <p>{windowSentence(window, null)}</p>
       {window.cures.length === 0 ? null : (
         <p className="cures">
           {window.cures.map((cure) => (

@@ -9,7 +9,6 @@ import { InstrumentTable } from "./InstrumentTable.tsx";
 import { LostFamilies } from "./LostFamilies.tsx";
 import { LvDrawing } from "./LvDrawing.tsx";
 import { LvTable } from "./LvTable.tsx";
-import { NoWindow } from "./NoWindow.tsx";
 import { sheetNumber } from "./sheetNumber.ts";
 import { WindowBar } from "./WindowBar.tsx";
 import "./size.css";
@@ -52,10 +51,7 @@ function WindowSection({ sizing, document, proof, actions }: Props) {
   const onWhy = useCallback((path: string) => actions.onWhy(path, "sizing"), [actions]);
   if (sizing === null) return <p className="quiet">No search has run yet: the window follows from the brief.</p>;
   return (
-    <>
-      <WindowBar window={sizing.window} current_ohm={current} stock_ohm={stock} onWhy={onWhy} />
-      <NoWindow window={sizing.window} onCure={actions.onCure} />
-    </>
+    <WindowBar window={sizing.window} current_ohm={current} stock_ohm={stock} onWhy={onWhy} onCure={actions.onCure} />
   );
 }
 

@@ -1,8 +1,9 @@
 import { useMemo } from "react";
-import type { ResistanceWindow } from "../../solver/index.ts";
+import type { Cure, ResistanceWindow } from "../../solver/index.ts";
 import { axisText, withUnit } from "../charts/axisText.ts";
 import { shareOf } from "../charts/logAxis.ts";
 import { BoundTable } from "./BoundTable.tsx";
+import { NoWindow } from "./NoWindow.tsx";
 import { type DrawnBound, type WindowDrawing, windowDrawing } from "./windowScale.ts";
 import { windowSentence } from "./windowSentence.ts";
 
@@ -12,17 +13,22 @@ interface Props {
   /** R1 that stock values reach. */
   readonly stock_ohm: readonly number[];
   readonly onWhy: (path: string) => void;
+  readonly onCure: (cure: Cure) => void;
 }
 
 const rowHeight = 24;
 
 /** Every rule on R1 in one glance: what each forbids, what is left open, and where the design stands. */
-export function WindowBar({ window, current_ohm, stock_ohm, onWhy }: Props) {
+export function WindowBar({ window, current_ohm, stock_ohm, onWhy, onCure }: Props) {
   const drawing = useMemo(() => windowDrawing(window, current_ohm, stock_ohm), [window, current_ohm, stock_ohm]);
   return (
     <section className="sheet-section" aria-labelledby="window-heading">
       <h2 id="window-heading">resistance window</h2>
-      <p className="finding-sentence">{windowSentence(window, current_ohm)}</p>
+      {window.open ? (
+        <p className="finding-sentence">{windowSentence(window, current_ohm)}</p>
+      ) : (
+        <NoWindow window={window} onCure={onCure} />
+      )}
       {drawing === null ? null : (
         <div className="window-grid">
           {drawing.bounds.map((each) => (
@@ -50,7 +56,7 @@ function BoundRow({ each, drawing, onWhy }: RowProps) {
       <span className={binding ? "window-name binding" : "window-name"}>{bound.name}</span>
       <span className="window-side">{side}</span>
       <button type="button" className="number-button" title={bound.reason} onClick={() => onWhy(bound.path)}>
-        {withUnit(bound.resistance_ohm!, "Ω", 3)}
+        {withUnit(bound.resistance_ohm!, "ohm", 3)}
       </button>
       <svg className="window-row" height={rowHeight} width="100%" aria-hidden="true">
         <Backdrop drawing={drawing} height={rowHeight} />
@@ -125,7 +131,7 @@ function AxisRow({ drawing, current_ohm }: { readonly drawing: WindowDrawing; re
         ))}
         {current === null || current_ohm === null ? null : (
           <text className="current-name" x={percent(current)} y={47} textAnchor={current > 0.8 ? "end" : "middle"}>
-            R1 {withUnit(current_ohm, "Ω", 3)}
+            R1 {withUnit(current_ohm, "ohm", 3)}
           </text>
         )}
       </svg>

@@ -44,7 +44,7 @@ export const candidateColumns: readonly CandidateColumn[] = [
     "R1",
     "HV arm resistance",
     (c) => c.hvArmResistance_ohm,
-    (c) => withUnit(c.hvArmResistance_ohm, "Ω", 3),
+    (c) => withUnit(c.hvArmResistance_ohm, "ohm", 3),
   ),
   column(
     "count",

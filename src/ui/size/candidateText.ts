@@ -3,7 +3,7 @@ import { withUnit } from "../charts/axisText.ts";
 
 /** One string: "12 × 10 MΩ". */
 export const stringName = ({ elements, resistance_ohm }: Candidate): string =>
-  `${elements}\u2009×\u2009${withUnit(resistance_ohm, "Ω", 3)}`;
+  `${elements}\u2009×\u2009${withUnit(resistance_ohm, "ohm", 3)}`;
 
 /** The whole: "12 × 10 MΩ", "2 strings, 40 × 3 MΩ". */
 export const candidateName = (candidate: Candidate): string =>

@@ -46,8 +46,8 @@ function partsOf(branch: LvBranch): readonly CircuitPart[] {
   if ("series" in branch) {
     return branch.series.map((item): CircuitPart => {
       if ("rheostat" in item)
-        return { symbol: "rheostat", value: `to ${withUnit(item.rheostat.greatest_ohm, "Ω", 3)}` };
-      return { symbol: "resistor", value: withUnit(item.resistance_ohm, "Ω", 4) };
+        return { symbol: "rheostat", value: `to ${withUnit(item.rheostat.greatest_ohm, "ohm", 3)}` };
+      return { symbol: "resistor", value: withUnit(item.resistance_ohm, "ohm", 4) };
     });
   }
   if ("trimmer" in branch) {
@@ -67,7 +67,7 @@ function readerOf({ cable, resistance_ohm, capacitance_F }: Instrument): readonl
   });
   return [
     one("cable", "capacitor", withUnit(cable_F, "F", 3), "cable"),
-    one("Rm", "resistor", withUnit(resistance_ohm, "Ω", 3), "instrument"),
+    one("Rm", "resistor", withUnit(resistance_ohm, "ohm", 3), "instrument"),
     one("Cm", "capacitor", withUnit(capacitance_F, "F", 3), "instrument"),
   ];
 }

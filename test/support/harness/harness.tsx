@@ -1,6 +1,8 @@
 import { StrictMode, useState } from "react";
 import { createRoot } from "react-dom/client";
 import "./harness.css";
+import { BuildSheet } from "../../../src/ui/build/BuildSheet.tsx";
+import { ProveSheet } from "../../../src/ui/prove/ProveSheet.tsx";
 import { SizeSheet } from "../../../src/ui/size/SizeSheet.tsx";
 import { inventedDocument } from "../inventedDocument.ts";
 import { inventedProof } from "../inventedProof.ts";
@@ -18,9 +20,12 @@ function Size({ shut }: { readonly shut: boolean }) {
   return <SizeSheet document={document} sizing={sizing} proof={inventedProof} actions={actions} />;
 }
 
+const actions = { onWhy: console.log, onCure: console.log };
 const screens: Record<string, () => React.ReactNode> = {
   "#size": () => <Size shut={false} />,
   "#shut": () => <Size shut />,
+  "#prove": () => <ProveSheet document={inventedDocument} proof={inventedProof} actions={actions} />,
+  "#build": () => <BuildSheet document={inventedDocument} proof={inventedProof} />,
 };
 
 createRoot(document.getElementById("root")!).render(
