@@ -1,4 +1,6 @@
 const namespace = "http://www.w3.org/2000/svg";
+const head = 52;
+const edge = 8;
 const kept = [
   "fill",
   "fill-opacity",
@@ -6,6 +8,8 @@ const kept = [
   "stroke-opacity",
   "stroke-width",
   "stroke-dasharray",
+  "stroke-linejoin",
+  "paint-order",
   "opacity",
   "font-size",
   "font-family",
@@ -22,10 +26,11 @@ export function drawnSvg(figure: HTMLElement, title: string, sentence: string): 
   const plots = [...figure.querySelectorAll<SVGSVGElement>("svg[data-drawn], .plot svg")];
   const boxes = plots.map((plot) => plot.getBoundingClientRect());
   const top = Math.min(...boxes.map((box) => box.top));
-  const height = Math.max(...boxes.map((box) => box.bottom)) - top + 52;
+  const height = Math.max(...boxes.map((box) => box.bottom)) - top + head + edge;
+  const width = frame.width + 2 * edge;
   const root = document.createElementNS(namespace, "svg");
   const style = getComputedStyle(figure);
-  setAll(root, { xmlns: namespace, width: frame.width, height, viewBox: `0 0 ${frame.width} ${height}` });
+  setAll(root, { xmlns: namespace, width, height, viewBox: `0 0 ${width} ${height}` });
   const paper = getComputedStyle(document.documentElement).getPropertyValue("--paper").trim() || "#ffffff";
   root.append(made("rect", { width: "100%", height: "100%", fill: paper }));
   const family = style.fontFamily;
@@ -34,7 +39,8 @@ export function drawnSvg(figure: HTMLElement, title: string, sentence: string): 
   for (const [i, plot] of plots.entries()) {
     const box = boxes[i]!;
     const copy = settled(plot);
-    setAll(copy, { x: box.left - frame.left, y: box.top - top + 52, width: box.width, height: box.height });
+    const [x, y] = [box.left - frame.left + edge, box.top - top + head];
+    setAll(copy, { x, y, width: box.width, height: box.height, overflow: "visible" });
     root.append(copy);
   }
   return new XMLSerializer().serializeToString(root);
