@@ -39,4 +39,5 @@ export interface Solution {
 }
 
 /** Only an identity that lets TypeScript infer the names of the inputs. */
-export const formula = <N extends string, A extends string = never>(record: Formula<N, A>): Formula<N, A> => record;
+export const formula = <N extends string, A extends string = never>(record: Formula<N, NoInfer<A>>): Formula<N, A> =>
+  record;
