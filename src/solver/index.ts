@@ -12,6 +12,7 @@ export type * from "./job/part.ts";
 export * from "./proof/cautions.ts";
 export * from "./proof/proof.ts";
 export * from "./quantities/format.ts";
+export * from "./quantities/parse.ts";
 export * from "./quantities/quantity.ts";
 export * from "./quantities/result.ts";
 export type { UnitName } from "./quantities/unit.ts";
