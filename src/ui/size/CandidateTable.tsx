@@ -75,10 +75,14 @@ function Row({ candidate, chosen, onTake }: RowProps) {
         ) : null}
       </td>
       {candidateColumns.map((column) => (
-        <td key={column.id} className={column.number ? "number" : ""}>
+        <td key={column.id} className={column.number ? "number" : column.id} title={titleOf(column, candidate)}>
           {column.show(candidate)}
         </td>
       ))}
     </tr>
   );
 }
+
+/** The whole text of a cell that may be cut. */
+const titleOf = (column: CandidateColumn, candidate: Candidate): string | undefined =>
+  column.number ? undefined : column.show(candidate);

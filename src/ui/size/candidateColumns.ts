@@ -38,7 +38,14 @@ export const candidateColumns: readonly CandidateColumn[] = [
     (c) => c.familyName,
     (c) => c.familyName,
   ),
-  column("build", "elements × value", "elements in series and their value", (c) => c.elements, stringName),
+  column("build", "string", "elements in series × value of each", (c) => c.elements, stringName),
+  column(
+    "strings",
+    "strings",
+    "equal strings in parallel",
+    (c) => c.strings,
+    (c) => String(c.strings),
+  ),
   column(
     "r1",
     "R1",
