@@ -1,4 +1,5 @@
 import type { Candidate, Cure, DividerDocument, Origin, Result } from "../solver/index.ts";
+import type { BrowserKey } from "./keeping.ts";
 
 /** Why nothing can be changed: the file is of a newer version, or another tab is writing this design. */
 export type ReadOnly = "newer version" | "open elsewhere" | null;
@@ -50,6 +51,9 @@ export interface State {
   readonly browserCopy: BrowserCopy;
 }
 
+/** What this browser keeps of the state; see keeping.ts. */
+export type Kept = Pick<State, BrowserKey>;
+
 export interface EditOptions {
   /** Name of the step, as undo shows it. */
   readonly step: string;
@@ -90,6 +94,8 @@ export interface Actions {
   readonly openDocument: (document: DividerDocument, file?: Partial<FileState>) => void;
   /** A new document, in no file. */
   readonly newDocument: (document: DividerDocument) => void;
+  /** Goes on with what this browser kept, history and all. */
+  readonly resume: (kept: Kept) => void;
   /** The document as it stood when saving began is in the file now. */
   readonly fileSaved: (document: DividerDocument, name: string) => void;
   /** Makes a copy that can be edited, in no file. */
