@@ -150,10 +150,10 @@ export const policyShape = object<Policy>("How cautiously the divider is designe
 
 export const briefShape = object<Brief>("What the engineer asks.", {
   waveform: waveformShape,
-  scaleFactor: quantity("1", "Wanted scale factor, input over output.", {
+  scaleFactor: quantity("1", "Wanted scale factor, input over output; missing: chosen for the principal instrument.", {
     aboveLeast: true,
     greatest: 1e12,
-    fallback: 1000,
+    fallback: () => 1000,
   }),
   wantedUncertainty: quantity("1", "Wanted relative uncertainty, k = 2; 0: not stated.", {
     fallback: 0.03,
