@@ -1,23 +1,43 @@
 /** The solver's only door: the rest of the program imports from here and from nowhere deeper. */
-
 export * from "./build/partsList.ts";
 export * from "./build/partsListCsv.ts";
 export type { FaultRow } from "./checks/faults.ts";
 export type { InstrumentRow } from "./checks/instruments.ts";
+export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";
 export type * from "./job/brief.ts";
 export type * from "./job/design.ts";
 export type * from "./job/document.ts";
 export type * from "./job/instrument.ts";
 export type * from "./job/part.ts";
+export type * from "./network/networkForm.ts";
+export { solveNetwork } from "./network/solveNetwork.ts";
+export { availableValues } from "./parts/availableValues.ts";
+export { dielectricFits } from "./parts/capacitorFamilies.ts";
+export { catalogue } from "./parts/catalogue.ts";
+export { pointerResistance } from "./parts/instruments.ts";
 export * from "./proof/cautions.ts";
+export { formulas, solutions } from "./proof/formulas.ts";
+export { jobSentence } from "./proof/jobSentence.ts";
 export * from "./proof/proof.ts";
+export { prove } from "./proof/prove.ts";
+export * from "./proof/why.ts";
+export { evaluateArithmetic } from "./quantities/arithmetic.ts";
 export * from "./quantities/format.ts";
 export * from "./quantities/parse.ts";
 export * from "./quantities/quantity.ts";
 export * from "./quantities/result.ts";
-export type { UnitName } from "./quantities/unit.ts";
+export { type UnitName, units } from "./quantities/unit.ts";
 export type * from "./sizing/outcome.ts";
+export { size } from "./sizing/size.ts";
+export { takeCandidate } from "./sizing/takeCandidate.ts";
 export * from "./standards/finding.ts";
 export * from "./standards/formula.ts";
+export {
+  preferredAbove,
+  preferredBelow,
+  preferredBetween,
+  preferredNearest,
+  preferredSeries,
+} from "./standards/preferred.ts";
 export * from "./standards/sheet.ts";
 export * from "./standards/source.ts";

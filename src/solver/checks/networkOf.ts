@@ -30,7 +30,6 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
     lv: {
       resistance_ohm: conductance === 0 ? Number.POSITIVE_INFINITY : 1 / conductance,
       capacitance_F: branches.reduce((sum, branch) => sum + capacitanceOf(branch), 0),
-      inductance_H: 0,
     },
     protector: {
       resistance_ohm: leakage === 0 ? Number.POSITIVE_INFINITY : 1 / leakage,
@@ -46,6 +45,5 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
       },
     },
     seriesProtector: { resistance_ohm: seriesResistance(j), at: "instrument" },
-    source: { voltage_V: 1, resistance_ohm: 0, capacitance_F: 0, inductance_H: 0, damping_ohm: 0 },
-  } as LadderNetwork;
+  };
 }

@@ -4,8 +4,6 @@ import type { MaterialGroup, PollutionDegree } from "../standards/surroundings.t
 /** What the engineer asks. Shapes only; every physical key carries its unit. */
 export type WaveformKind = "dc" | "sine" | "pulse" | "square" | "recorded";
 export type StatedAs = "dc" | "rms" | "peak";
-export type { SeriesName } from "../standards/preferred.ts";
-export type { MaterialGroup, PollutionDegree } from "../standards/surroundings.ts";
 export type { MaterialGroup, PollutionDegree, SeriesName };
 
 export interface Waveform {

@@ -11,7 +11,7 @@ import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { sizingFormulas } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
-import { responseFormulas, responseRecords } from "./response.ts";
+import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
 /** Every formula that may stand behind a figure, by id. */
 export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(

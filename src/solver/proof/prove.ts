@@ -42,7 +42,7 @@ export function prove(document: DividerDocument): Result<Proof> {
   misuse(j, show);
   const rows = faults(j, string, show);
   charge(j, show);
-  const { frequency, step } = response(j, networkOf(j, string), string, show);
+  const { frequency, step } = response(j, networkOf(j, string), show);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),

@@ -1,87 +1,185 @@
-import type { Judging } from "../checks/judging.ts";
-import { plainFinding } from "../checks/judging.ts";
+import { type Judging, plainFinding } from "../checks/judging.ts";
+import { capacitanceOf, protectorCapacitance } from "../checks/lvArm.ts";
 import type { Show } from "../checks/show.ts";
-import type { StringCapacitance } from "../checks/stringCapacitance.ts";
-import {
-  dcSolution,
-  inputImpedance,
-  type LadderNetwork,
-  lvCapacitance,
-  stepFigures,
-  stepResponse,
-  sweep,
-} from "../network/ladderNetwork.ts";
-import { formula, type Solution } from "../standards/formula.ts";
-import { computedHere, type Source } from "../standards/source.ts";
-import type { FrequencyResponse, StepResponse } from "./proof.ts";
+import { dcSolution } from "../network/dcSolution.ts";
+import type { LadderNetwork } from "../network/ladderNetwork.ts";
+import { lvCapacitance } from "../network/lvCapacitance.ts";
+import { stepFigures } from "../network/stepFigures.ts";
+import { StepResponse } from "../network/stepResponse.ts";
+import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
+import { formatQuantity, formatShare } from "../quantities/format.ts";
+import type { FrequencyResponse, StepResponse as StepResponseShape } from "./proof.ts";
+import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
-const iec60060: Source = {
-  title: "IEC 60060-2",
-  edition: "ed. 3 (2010)",
-  clause: "annex C, step response and its figures",
-  status: "from memory",
-};
-const ladder = "Ladder of n elements with strays, LV arm, cable and instrument: current balance at every node";
+const points = 241;
+const logarithmic = (from: number, to: number, count: number) =>
+  Array.from({ length: count }, (_, i) => from * (to / from) ** (i / (count - 1)));
 
-export const responseRecords: Record<"frequency" | "step" | "lvCapacitance", Solution> = {
-  frequency: {
-    id: "response.frequency",
-    title: "Frequency response",
-    statement: "Y(jω) v = i at every node of the ladder; |F · v_out / V| = 1/√2 at the bandwidth",
-    method: `${ladder}; exact complex elimination from the tap to the electrode at each frequency.`,
-    holds: "Linear parts; lumped cable, ideal source.",
-    source: computedHere("ladder elimination"),
-    residualBound: 1e-9,
-  },
-  step: {
-    id: "response.step",
-    title: "Step response",
-    statement: "g(t) = F · v_out(t) / V for an ideal step; T = ∫(1 − g) dt",
-    method: `${ladder}; inverse Laplace transform on one contour per decade of time.`,
-    holds: "Linear parts; lumped cable, ideal source.",
-    source: iec60060,
-    residualBound: 1e-6,
-  },
-  lvCapacitance: {
-    id: "response.lvCapacitance",
-    title: "LV capacitance that matches the two arms",
-    statement: "T(C) = 0; F(∞, C) = F(0); min over C of the greatest |deviation| over the band",
-    method: `${ladder}; the LV capacitance solved for, all else held.`,
-    holds: "Strays as computed or typed; cable and instrument counted, so it is what must be fitted.",
-    source: computedHere("three matches of the same ladder"),
-    residualBound: 1e-6,
-  },
-};
+/** Frequency and step response of the design's network, their figures on the sheet, and the findings. */
+export function response(
+  j: Judging,
+  network: LadderNetwork,
+  show: Show,
+): { frequency: FrequencyResponse; step: StepResponseShape } {
+  const dc = dcSolution(network, 1);
+  if (dc === null) throw new Error("a design's string passes dc");
+  const predicted = j.sheet.number("scaleFactor.predicted") as number;
+  const residual = Math.abs(dc.scaleFactor / predicted - 1);
+  lvCapacitances(j, network, residual);
+  const figures = stepFigures(network);
+  const f3 = bandwidth(network);
+  const inputs = {
+    R: "/design/hvArm/elements/*/resistance_ohm",
+    C: "element.capacitance_F",
+    R2p: "lvArm.withInstrument_ohm",
+  };
+  const { step: stepRecord, frequency: frequencyRecord } = responseRecords;
+  j.sheet.solved("response.bandwidth_Hz", frequencyRecord, f3, inputs, residual);
+  j.sheet.solved("response.responseTime_s", stepRecord, figures?.responseTime_s ?? null, inputs, residual);
+  j.sheet.solved("response.riseTime_s", stepRecord, figures?.riseTime_s ?? null, inputs, residual);
+  j.sheet.solved("response.overshoot", stepRecord, figures?.overshoot ?? null, inputs, residual);
+  j.sheet.solved("response.settlingTime_s", stepRecord, figures?.settlingTime_s["1%"] ?? null, inputs, residual);
+  const frequency = frequencyResponse(j, network, f3, residual, show);
+  return { frequency, step: stepTraces(network, figures?.settlingTime_s["1%"] ?? 0, figures?.overshoot ?? 0) };
+}
 
-export const responseFormulas = {
-  lvPole: formula({
-    id: "response.lvPole",
-    title: "Pole of the LV arm",
-    statement: "{=} = ({R1} + {R2p}) / (2π {R1} {R2p} ({C1} + {C2p}))",
-    result: { symbol: "f_p", unit: "Hz", meaning: "pole where the resistors hand over to the capacitors" },
-    inputs: {
-      R1: { symbol: "R_1", unit: "ohm", meaning: "HV arm resistance" },
-      R2p: { symbol: "R_2p", unit: "ohm", meaning: "LV arm with instrument" },
-      C1: { symbol: "C_1eff", unit: "F", meaning: "HV arm capacitance with strays" },
-      C2p: { symbol: "C_2p", unit: "F", meaning: "LV capacitance, cable and instrument counted" },
-    },
-    holds: "Two lumps; the ladder decides.",
-    source: computedHere("time constant (R1‖R2p)(C1 + C2p)"),
-    compute: ({ R1, R2p, C1, C2p }) => (R1 + R2p) / (2 * Math.PI * R1 * R2p * (C1 + C2p)),
-  }),
-  sum: formula({
-    id: "response.lvCapacitanceSum",
-    title: "LV capacitance, cable and instrument counted",
-    statement: "{=} = {fitted} + {cable} + {instrument} + {protectors}",
-    result: { symbol: "C_2p", unit: "F", meaning: "all that stands from tap to earth" },
-    inputs: {
-      fitted: { symbol: "C_2", unit: "F", meaning: "fitted" },
-      cable: { symbol: "C_k", unit: "F", meaning: "cable" },
-      instrument: { symbol: "C_m", unit: "F", meaning: "instrument" },
-      protectors: { symbol: "C_p", unit: "F", meaning: "protectors" },
-    },
-    holds: "Lumped cable.",
-    source: computedHere("parallel sum"),
-    compute: ({ fitted, cable, instrument, protectors }) => fitted + cable + instrument + protectors,
-  }),
-};
+/** LV capacitances by the three matches, what is fitted, their sum and the pole. Writes `lvArm.capacitance…_F`. */
+function lvCapacitances(j: Judging, network: LadderNetwork, residual: number): void {
+  const { sheet, design, instrument, document } = j;
+  const band = bandOf(document.brief.band_Hz, document.brief.waveform.frequency_Hz);
+  const matches = lvCapacitance(network, band);
+  const inputs = { C: "element.capacitance_F", C1: "hvArm.effectiveCapacitance_F", R1: "hvArm.resistance_ohm" };
+  const record = responseRecords.lvCapacitance;
+  sheet.solved("lvArm.capacitanceResponseTime_F", record, matches.responseTime_F, inputs, residual);
+  sheet.solved("lvArm.capacitanceHighFrequency_F", record, matches.highFrequency_F, inputs, residual);
+  sheet.solved("lvArm.capacitanceFlattest_F", record, matches.flattest_F, inputs, residual);
+  sheet.given("/design/lvArm/branches/*/capacitance_F", design.lvArm.branches.map(capacitanceOf));
+  sheet.derive("lvArm.capacitanceFitted_F", responseFormulas.fitted, { C: "/design/lvArm/branches/*/capacitance_F" });
+  const at = document.instruments.indexOf(instrument);
+  sheet.given(`/instruments/${at}/capacitance_F`, instrument.capacitance_F);
+  sheet.given(`/instruments/${at}/cable/length_m`, instrument.cable.length_m);
+  sheet.given(`/instruments/${at}/cable/capacitance_F_per_m`, instrument.cable.capacitance_F_per_m);
+  sheet.given(
+    "/design/protectors:capacitance_F",
+    protectorCapacitance(j, "divider") + protectorCapacitance(j, "instrument"),
+  );
+  sheet.derive("lvArm.capacitanceTotal_F", responseFormulas.sum, {
+    fitted: "lvArm.capacitanceFitted_F",
+    length: `/instruments/${at}/cable/length_m`,
+    perMetre: `/instruments/${at}/cable/capacitance_F_per_m`,
+    instrument: `/instruments/${at}/capacitance_F`,
+    protectors: "/design/protectors:capacitance_F",
+  });
+  sheet.derive("response.lvPole_Hz", responseFormulas.lvPole, {
+    R1: "hvArm.resistance_ohm",
+    R2p: "lvArm.withInstrument_ohm",
+    C1: "hvArm.effectiveCapacitance_F",
+    C2p: "lvArm.capacitanceTotal_F",
+  });
+}
+
+/** The band that must be right; a lower end of 0 counts as a millionth of the upper. dc: nothing. */
+export function bandOf(band: readonly [number, number], frequency: number | null): readonly [number, number] {
+  const high = band[1] > 0 ? band[1] : (frequency ?? 0);
+  return [band[0] > 0 ? band[0] : high * 1e-6, high];
+}
+
+function frequencyResponse(
+  j: Judging,
+  network: LadderNetwork,
+  f3: number | null,
+  residual: number,
+  show: Show,
+): FrequencyResponse {
+  const { brief } = j.document;
+  const band = bandOf(brief.band_Hz, brief.waveform.frequency_Hz);
+  const pole = j.sheet.number("response.lvPole_Hz") ?? 1;
+  const decade = (f: number) => 10 ** Math.floor(Math.log10(f));
+  const from = decade(Math.min(pole, f3 ?? pole, band[1] > 0 ? Math.max(band[0], 1e-3) : pole) / 10);
+  const to = decade(Math.max(pole, f3 ?? pole, band[1]) * 10) * 10;
+  const frequency_Hz = logarithmic(from, to, points);
+  const solved = sweep(network, frequency_Hz)!;
+  const magnitude_dB = frequency_Hz.map((_, i) => decibel(solved.real[i]!, solved.imaginary[i]!));
+  const deviation = bandDeviation(j, network, band, residual, show);
+  const flat = deviation === null ? "" : `Within ${deviation.toFixed(3)} dB over the wanted band; `;
+  const edge = f3 === null ? "no −3 dB point up to 1 THz in this model." : `−3 dB at ${formatQuantity(f3, "Hz")}.`;
+  return {
+    frequency_Hz,
+    magnitude_dB,
+    phase_deg: frequency_Hz.map((_, i) => degrees(solved.real[i]!, solved.imaginary[i]!)),
+    inputImpedance_ohm: frequency_Hz.map((_, i) =>
+      Math.hypot(solved.impedanceReal_ohm[i]!, solved.impedanceImaginary_ohm[i]!),
+    ),
+    sentence: `${flat}${edge}`,
+  };
+}
+
+/** Greatest deviation over the wanted band, dB, and its finding against the wanted uncertainty. null for dc. */
+function bandDeviation(
+  j: Judging,
+  network: LadderNetwork,
+  band: readonly [number, number],
+  residual: number,
+  show: Show,
+) {
+  const inputs = {
+    R: "/design/hvArm/elements/*/resistance_ohm",
+    C: "element.capacitance_F",
+    C2: "lvArm.capacitanceTotal_F",
+  };
+  if (!(band[1] > 0)) {
+    j.sheet.solved("response.bandDeviation_dB", responseRecords.frequency, null, inputs, residual);
+    return null;
+  }
+  const solved = sweep(network, logarithmic(band[0], band[1], points))!;
+  let worst = 0;
+  for (let k = 0; k < points; k++) {
+    const dB = decibel(solved.real[k]!, solved.imaginary[k]!);
+    if (Math.abs(dB) > Math.abs(worst)) worst = dB;
+  }
+  j.sheet.solved("response.bandDeviation_dB", responseRecords.frequency, worst, inputs, residual);
+  const error = Math.abs(10 ** (worst / 20) - 1);
+  const wanted = j.document.brief.wantedUncertainty;
+  plainFinding(j, {
+    id: "response.band",
+    level: error > wanted ? "stop" : error > wanted / 2 ? "caution" : "clear",
+    what: "deviation over the wanted band",
+    actual: error,
+    limit: wanted,
+    unit: "1",
+    sense: "atMost",
+    margin: 1 - error / wanted,
+    reason:
+      `Up to ${show(band[1], "Hz")} the scale factor is off by ${formatShare(error)} at the worst; ${formatShare(wanted)} is wanted. ` +
+      "Strays of the column and the match of the two arms decide it.",
+    source: responseRecords.frequency.source,
+    path: "response.bandDeviation_dB",
+    cure:
+      error > wanted
+        ? {
+            label: "compensate every element",
+            edits: [{ pointer: "/brief/policy/compensation", value: "always" }],
+            sizeAgain: true,
+          }
+        : null,
+  });
+  return Math.abs(worst);
+}
+
+function stepTraces(network: LadderNetwork, settling_s: number, overshoot: number): StepResponseShape {
+  const g = StepResponse.of(network)!;
+  const trace = (from: number, to: number) => {
+    const time_s = logarithmic(from, to, 151);
+    return { time_s, value: time_s.map((t) => g.at(t)) };
+  };
+  const end = Math.min(Math.max(10 ** Math.ceil(Math.log10(Math.max(settling_s, 1e-5)) + 1), 1e-3), 1e5);
+  const over = overshoot > 0 ? `overshoot ${formatShare(overshoot)}` : "no overshoot";
+  const settled =
+    settling_s === 0 ? "within 1 % from the start" : `within 1 % after ${formatQuantity(settling_s, "s")}`;
+  const start = formatShare(g.initial);
+  return {
+    fast: trace(1e-9, 1e-5),
+    slow: trace(1e-6, end),
+    sentence: `Starts at ${start} of the final value, ${over}, ${settled}.`,
+  };
+}

@@ -1,0 +1,65 @@
+/** The raw network as strict JSON, SI, the unit in the key (README, "The raw network"). A value that does not exist is null. */
+export interface NetworkAnswer {
+  readonly format: "stringwright-network-answer";
+  readonly version: 1;
+  readonly dc: DcAnswer;
+  readonly frequency?: {
+    readonly real: Numbers;
+    readonly imaginary: Numbers;
+    readonly magnitude_dB: Numbers;
+    readonly phase_deg: Numbers;
+  };
+  readonly inputImpedance_ohm?: { readonly real: Numbers; readonly imaginary: Numbers };
+  readonly bandwidth_Hz?: number | null;
+  readonly elementVoltageAt?: { readonly elementVoltage_V: readonly Numbers[]; readonly tapVoltage_V: Numbers };
+  readonly step?: StepAnswer;
+  readonly ramp?: { readonly value: Numbers };
+  readonly compensation?: {
+    readonly lvCapacitance_F: {
+      readonly responseTime: number | null;
+      readonly highFrequency: number | null;
+      readonly flattest: number | null;
+    };
+    readonly flattest_dB: number | null;
+  };
+  readonly grading?: { readonly capacitance_F: Numbers };
+}
+
+export type Numbers = readonly (number | null)[];
+
+export interface DcAnswer {
+  readonly scaleFactor: number | null;
+  readonly scaleFactorFromSource: number | null;
+  readonly inputResistance_ohm: number | null;
+  readonly electrodeVoltage_V: number | null;
+  readonly tapVoltage_V: number | null;
+  readonly outputVoltage_V: number | null;
+  readonly current_A: number | null;
+  readonly elementVoltage_V: Numbers;
+  readonly elementPower_W: Numbers;
+  readonly lvPower_W: number | null;
+}
+
+export interface StepAnswer {
+  readonly value: Numbers;
+  readonly initial: number | null;
+  readonly responseTime_s: number | null;
+  readonly partialResponseTime_s: number | null;
+  readonly riseTime_s: number | null;
+  readonly t10_s: number | null;
+  readonly t90_s: number | null;
+  readonly overshoot: number | null;
+  readonly peakTime_s: number | null;
+  readonly settlingTime_s: { readonly "1%": number | null; readonly "0.1%": number | null };
+  readonly residualSettlingTime_s: number | null;
+}
+
+/** What was asked of a network, read and checked. */
+export interface NetworkAsk {
+  readonly frequencies_Hz: readonly number[] | null;
+  readonly elementVoltageAt: { readonly frequencies_Hz: readonly number[]; readonly peak_V: number } | null;
+  readonly times_s: readonly number[] | null;
+  readonly ramp: { readonly riseTime_s: number; readonly times_s: readonly number[] } | null;
+  readonly band_Hz: readonly [number, number] | null;
+  readonly grading_first_F: number | null;
+}
