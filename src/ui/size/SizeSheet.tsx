@@ -1,6 +1,7 @@
 import { useCallback, useMemo } from "react";
 import type { Candidate, Cure, DividerDocument, Proof, Sizing } from "../../solver/index.ts";
 import { CandidateTable } from "./CandidateTable.tsx";
+import { CapacitanceReach } from "./CapacitanceReach.tsx";
 import { ColumnDrawings } from "./ColumnDrawings.tsx";
 import { chosenCandidate } from "./candidateText.ts";
 import { CapacitanceChoice, Exactness } from "./Exactness.tsx";
@@ -99,6 +100,7 @@ function LvSection({ document, proof, actions }: Omit<Props, "sizing">) {
           <h3>exact and fitted</h3>
           <Exactness sheet={proof.sheet} onWhy={onWhy} />
           <h3>LV capacitance, three matches</h3>
+          <CapacitanceReach sheet={proof.sheet} lvArm={design.lvArm} />
           <CapacitanceChoice sheet={proof.sheet} lvArm={design.lvArm} onWhy={onWhy} />
         </>
       )}
