@@ -4,7 +4,7 @@ import type { Raw } from "./shape.ts";
 const highest_Hz = 1e12;
 
 const positive = (value: unknown): number | null =>
-  typeof value === "number" && Number.isFinite(value) && value > 0 ? value : null;
+  typeof value === "number" && Number.isFinite(value) && value > 0 && value <= 1e13 ? value : null;
 
 /**
  * Default band that must be right, from the waveform: highest frequency 0.35 / rise time, lowest 1/(2π·10·width), so that the

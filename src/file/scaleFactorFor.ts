@@ -1,13 +1,11 @@
-import type { Instrument, Waveform } from "../solver/index.ts";
+import { crestFactors, greatestOverPeak, type Instrument, type Waveform } from "../solver/index.ts";
 
 const mantissas = [1, 2, 5] as const;
 
-/** Greatest peak by the rule of the waveform: 1.2 × dc, 1.1·√2 × rms, 1.1 × stated peak of an alternating, 1.5 × of a pulse. */
+/** As stated, or by the rule of the waveform. */
 function greatest_Vpeak(waveform: Waveform): number {
-  if (waveform.greatest_Vpeak !== null) return waveform.greatest_Vpeak;
-  const nominal = Math.abs(waveform.nominal_V);
-  const peak = waveform.statedAs === "rms" && waveform.kind !== "dc" ? nominal * Math.SQRT2 : nominal;
-  return peak * ({ dc: 1.2, sine: 1.1, pulse: 1.5, square: 1.5, recorded: 1.5 } as const)[waveform.kind];
+  const peak = Math.abs(waveform.nominal_V) * crestFactors(waveform).peakOverStated;
+  return waveform.greatest_Vpeak ?? peak * greatestOverPeak[waveform.kind];
 }
 
 /**

@@ -1,4 +1,5 @@
 /** A design put in place of another as a whole: by taking a candidate, or by following the brief. */
+import { isAtOrBelow } from "../file/pointer.ts";
 import type { DividerDocument } from "../solver/index.ts";
 import { without } from "./edit.ts";
 
@@ -10,19 +11,22 @@ function keepingNotes<T extends object>(old: T | null, next: T): T {
 }
 
 /**
- * `document` with the design and parts of `chosen`. Origins and typed texts of the old design go with it; those of a part
- * follow it to its new place.
+ * `document` with the design and parts of `chosen`. Origins and typed texts of the design are those of `chosen`; those of a
+ * part follow it to its new place.
  */
 export function withDesignOf(document: DividerDocument, chosen: DividerDocument, follows: boolean): DividerDocument {
   if (chosen.design === null) return document;
   const design = keepingNotes(document.design, { ...chosen.design, follows });
-  const entries = <T>(map: Readonly<Record<string, T>>) => movedParts(without(map, "/design"), document, chosen);
+  const entries = <T>(old: Readonly<Record<string, T>>, next: Readonly<Record<string, T>>) => ({
+    ...movedParts(without(old, "/design"), document, chosen),
+    ...Object.fromEntries(Object.entries(next).filter(([pointer]) => isAtOrBelow(pointer, "/design"))),
+  });
   return {
     ...document,
     design,
     parts: chosen.parts,
-    origins: { ...originsOfNewParts(document, chosen), ...entries(document.origins) },
-    typed: entries(document.typed),
+    origins: entries(document.origins, chosen.origins),
+    typed: entries(document.typed, chosen.typed),
   };
 }
 
@@ -36,16 +40,4 @@ function movedParts<T>(map: Readonly<Record<string, T>>, from: DividerDocument, 
     else if (index >= 0) found[`/parts/${index}${at[2] ?? ""}`] = value;
   }
   return found;
-}
-
-/** Origins that the choice brought along with parts this document did not have. */
-function originsOfNewParts(document: DividerDocument, chosen: DividerDocument): DividerDocument["origins"] {
-  const known = new Set(document.parts.map((part) => part.id));
-  return Object.fromEntries(
-    Object.entries(chosen.origins).filter(([pointer]) => {
-      const at = /^\/parts\/(\d+)\//.exec(pointer);
-      const part = at === null ? undefined : chosen.parts[Number(at[1])];
-      return part !== undefined && !known.has(part.id);
-    }),
-  );
 }

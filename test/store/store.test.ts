@@ -9,6 +9,7 @@ import { inventedDesign, inventedPart, inventedStart } from "../file/invented.ts
 let time = 0;
 const takeCandidate = (document: DividerDocument, candidate: Candidate): DividerDocument => ({
   ...document,
+  typed: {},
   parts: candidate.parts,
   design: candidate.design,
 });
@@ -144,6 +145,24 @@ describe("whether the design follows the brief", () => {
     const newer = now().document;
     now().adopt(judged, { ...chosen, design: { ...chosen.design!, protectors: [{ part: "g", at: "divider" }] } });
     expect(now().document).toBe(newer);
+  });
+
+  it("takes the origins of the chosen design over, and those of parts along with the parts", () => {
+    now().editAt("/parts/0/tolerance", 0.02, { step: "t", typed: "2 %" });
+    const first = { ...inventedDesign().parts[0]!, id: "new" };
+    const around2 = {
+      ...around,
+      takeCandidate: (document: DividerDocument): DividerDocument => ({
+        ...document,
+        parts: [first, ...document.parts],
+        origins: { ...document.origins, "/design": "catalogue" },
+      }),
+    };
+    store = createDividerStore(now().document, around2);
+    now().takeCandidate(candidate);
+    expect(now().document.origins).toMatchObject({ "/design": "catalogue", "/parts/1/tolerance": "typed" });
+    expect(now().document.origins["/parts/0/tolerance"]).toBeUndefined();
+    expect(now().document.typed).toEqual({ "/parts/1/tolerance": "2 %" });
   });
 
   it("keeps what a person noted in the design beside ours, and drops origins that spoke of the old one", () => {
