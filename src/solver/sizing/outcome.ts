@@ -1,7 +1,7 @@
 /** What a search answers: the resistance window, the ranked candidates and why every other family lost. Plain data. */
 import type { Design } from "../job/design.ts";
 import type { Part } from "../job/part.ts";
-import type { Cure } from "../standards/finding.ts";
+import type { Cure, Finding } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
 
 /** One named bound of R1. Its number stands in the sheet at `path`. */
@@ -14,6 +14,7 @@ export interface Bound {
     | "leastCurrent"
     | "existence"
     | "instrumentShare"
+    | "lvArmValue"
     | "band";
   /** Plain name: "source sag". */
   readonly name: string;
@@ -62,6 +63,8 @@ export interface Candidate {
   readonly governing: string;
   /** Ids of the stops that would stand. */
   readonly stops: readonly string[];
+  /** What the search found on the way: stops and cautions of LV arm, compensation, insulation tables; none that is clear. */
+  readonly findings: readonly Finding[];
   readonly design: Design;
   /** Every part that the design names, ratings copied in. */
   readonly parts: readonly Part[];

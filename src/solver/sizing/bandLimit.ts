@@ -1,0 +1,60 @@
+import { show } from "../checks/show.ts";
+import { metre } from "../quantities/quantity.ts";
+import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
+import type { Asking } from "./asking.ts";
+import { bound, none, pathOf, percent, shareOfUncertainty, type WindowGiven } from "./bound.ts";
+import type { Bound } from "./outcome.ts";
+import { firstOrderLimit, systematicShare, windowFormulas } from "./windowFormulas.ts";
+
+/** Diameter over length assumed for the first look at a bare string's stray; the search uses each candidate's own. */
+const slenderness = 15;
+
+/** Greatest R1 of a string without capacitors; does not apply to dc or where capacitors are fitted. */
+export function bandLimit(given: WindowGiven): Bound {
+  const { ask, bare, column_m } = given;
+  const { sheet } = ask.j;
+  const top = bandTop(ask);
+  if (top === 0) return none(given, "band", "The band is dc only.");
+  if (!bare) return none(given, "band", "Capacitors across the elements carry the band.");
+  const footHeight_m = 0.12;
+  bandShare(ask);
+  sheet.given("/brief/band_Hz:top", top);
+  sheet.given(
+    "window.bandStray_F",
+    verticalCylinderCapacitance(metre(column_m), metre(column_m / slenderness), metre(footHeight_m)),
+  );
+  sheet.derive(pathOf("band"), windowFormulas.band, {
+    e: "window.bandShare",
+    f: "/brief/band_Hz:top",
+    Ce: "window.bandStray_F",
+  });
+  return bound(
+    given,
+    "band",
+    (R) =>
+      `A string without capacitors, as short as insulation allows, falls by ${percent(bandShare(ask))} at ${show(top, "Hz")}: at most ${R}.`,
+  );
+}
+
+/** Highest frequency that must be right: the band's top, the sine's own, 0.35 over the rise time of a pulse or square. */
+export function bandTop({ j }: Asking): number {
+  const { waveform, band_Hz } = j.document.brief;
+  if (waveform.kind === "dc") return band_Hz[1];
+  const edge = waveform.kind !== "sine" && waveform.riseTime_s ? 0.35 / waveform.riseTime_s : 0;
+  return band_Hz[1] > 0 ? band_Hz[1] : Math.max(waveform.frequency_Hz ?? 0, edge);
+}
+
+/** Deviation accepted of a bare string at the band's top: a fifth of the wanted uncertainty, within the first-order rule. */
+export const acceptedBandShare = ({ j }: Asking): number =>
+  Math.min(systematicShare * j.document.brief.wantedUncertainty, firstOrderLimit);
+
+/** Deviation accepted of a bare string at the band's top, on the sheet at `window.bandShare`. */
+export function bandShare(ask: Asking): number {
+  shareOfUncertainty(ask);
+  ask.j.sheet.given("window.firstOrderLimit", firstOrderLimit);
+  return ask.j.sheet.derive("window.bandShare", windowFormulas.share, {
+    k: "/brief/wantedUncertainty:share",
+    U: "/brief/wantedUncertainty",
+    m: "window.firstOrderLimit",
+  }) as number;
+}

@@ -1,0 +1,13 @@
+import type { Formula } from "../standards/formula.ts";
+import { candidateFormulas } from "./candidateFormulas.ts";
+import { geometryFormulas } from "./geometry.ts";
+import { lvSolutionFormulas } from "./lvSolution.ts";
+import { windowFormulas } from "./windowFormulas.ts";
+
+/** Every formula that may stand behind a figure of a search. */
+export const sizingFormulas: readonly Formula<string, string>[] = [
+  windowFormulas,
+  candidateFormulas,
+  geometryFormulas,
+  lvSolutionFormulas,
+].flatMap((group) => Object.values(group) as unknown as Formula<string, string>[]);

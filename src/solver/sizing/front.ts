@@ -1,0 +1,82 @@
+import type { Build, Line } from "./line.ts";
+
+/** Whether `a` is no worse than `b` in all six figures and better in one. Every string is of one value, so the number of different parts is equal. */
+export function dominates(a: Build, b: Build): boolean {
+  const noWorse =
+    a.elementCount <= b.elementCount &&
+    a.length_m <= b.length_m &&
+    a.uncertainty <= b.uncertainty &&
+    a.loading <= b.loading &&
+    a.margin >= b.margin;
+  return (
+    noWorse &&
+    (a.elementCount < b.elementCount ||
+      a.length_m < b.length_m ||
+      a.uncertainty < b.uncertainty ||
+      a.loading < b.loading ||
+      a.margin > b.margin)
+  );
+}
+
+/** The order of the list: fewest elements, shortest, least uncertainty; then a fixed tie-break. */
+export function inOrder(a: Build, b: Build): number {
+  return (
+    a.elementCount - b.elementCount ||
+    a.length_m - b.length_m ||
+    a.uncertainty - b.uncertainty ||
+    a.loading - b.loading ||
+    b.margin - a.margin ||
+    a.strings - b.strings ||
+    (a.kind.family.id < b.kind.family.id ? -1 : a.kind.family.id > b.kind.family.id ? 1 : 0)
+  );
+}
+
+/**
+ * Finds what dominates a build among all lines, without listing them. In a line, count and length rise with n and uncertainty
+ * falls, so only a span of n can hold a dominator; in that span loading and margin are looked up. Exact.
+ */
+export class Dominance {
+  private readonly lines: Line[];
+  private readonly sags: boolean;
+  /** Per line the line that dominated its build before: neighbours are likely to share it. */
+  private readonly before = new Map<Line, Line>();
+
+  constructor(lines: readonly Line[], sags: boolean) {
+    this.lines = [...lines];
+    this.sags = sags;
+  }
+
+  /** A quick look that only ever says yes rightly: the former dominator's line at the most elements that are no more. */
+  surely(line: Line, n: number): boolean {
+    const other = this.before.get(line);
+    if (other === undefined) return false;
+    const high = other.lastWithin(line.length(n), Math.floor((n * line.strings) / other.strings));
+    return other.beats(high, line, n) || other.beats(high - 1, line, n);
+  }
+
+  dominatorOf(line: Line, build: Build): Build | null {
+    const first = this.before.get(line);
+    const found = first === undefined ? null : this.inLine(first, build);
+    if (found !== null) return found;
+    for (const other of this.lines) {
+      if (other === first) continue;
+      const dominator = this.inLine(other, build);
+      if (dominator === null) continue;
+      this.before.set(line, other);
+      return dominator;
+    }
+    return null;
+  }
+
+  private inLine(line: Line, build: Build): Build | null {
+    const most = Math.floor(build.elementCount / line.strings);
+    const high = line.lastWithin(build.length_m, most);
+    if (high < line.first) return null;
+    const low = line.firstWithin(build.uncertainty, high);
+    if (low > high) return null;
+    // A share below, so that rounding cannot hide a build; `dominates` decides on the figures themselves.
+    const hvArm = this.sags ? build.hvArm_ohm * (1 - 1e-9) : 0;
+    const at = line.search(low, high, hvArm, build.margin, (n) => dominates(line.build(n) as Build, build));
+    return at === null ? null : line.build(at);
+  }
+}
