@@ -20,6 +20,7 @@ export { formulas, solutions } from "./proof/formulas.ts";
 export { jobSentence } from "./proof/jobSentence.ts";
 export * from "./proof/proof.ts";
 export { prove } from "./proof/prove.ts";
+export { proveAt } from "./proof/proveAt.ts";
 export * from "./proof/why.ts";
 export { evaluateArithmetic } from "./quantities/arithmetic.ts";
 export * from "./quantities/format.ts";

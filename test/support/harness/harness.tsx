@@ -1,6 +1,7 @@
 import { StrictMode, useState } from "react";
 import { createRoot } from "react-dom/client";
 import "./harness.css";
+import { prove } from "../../../src/solver/index.ts";
 import { BuildSheet } from "../../../src/ui/build/BuildSheet.tsx";
 import { ProveSheet } from "../../../src/ui/prove/ProveSheet.tsx";
 import { SizeSheet } from "../../../src/ui/size/SizeSheet.tsx";
@@ -21,10 +22,27 @@ function Size({ shut }: { readonly shut: boolean }) {
 }
 
 const actions = { onWhy: console.log, onCure: console.log };
+function Real() {
+  const proof = prove(inventedDocument);
+  if (!proof.ok) return <pre>{JSON.stringify(proof.error, null, 2)}</pre>;
+  return (
+    <>
+      <SizeSheet
+        document={inventedDocument}
+        sizing={inventedSizing}
+        proof={proof.value}
+        actions={{ onTake: console.log, onSizeAgain: console.log, onCure: console.log, onWhy: console.log }}
+      />
+      <ProveSheet document={inventedDocument} proof={proof.value} actions={actions} />
+    </>
+  );
+}
+
 const screens: Record<string, () => React.ReactNode> = {
   "#size": () => <Size shut={false} />,
   "#shut": () => <Size shut />,
   "#prove": () => <ProveSheet document={inventedDocument} proof={inventedProof} actions={actions} />,
+  "#real": () => <Real />,
   "#build": () => <BuildSheet document={inventedDocument} proof={inventedProof} />,
 };
 

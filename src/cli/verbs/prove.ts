@@ -1,0 +1,52 @@
+import { parseQuantity, proveAt, type UnitName } from "../../solver/index.ts";
+import { runJob } from "../../work/runJob.ts";
+import { readArguments } from "../arguments.ts";
+import { nested } from "../nested.ts";
+import { needsDesign, openDocument, refusalText } from "../openDocument.ts";
+import { Unusable, type Verb } from "../verb.ts";
+
+export const prove: Verb = {
+  name: "prove",
+  does: "every computed figure, the findings and the cautions of the design",
+  help: `prove FILE [--frequencies f,…] [--times t,…]
+
+Judges the design in FILE. Keys are listed in the README.
+  --frequencies f,…   adds frequency.asked at these frequencies, e.g. 50,1k,1MHz
+  --times t,…         adds step.asked at these times after an ideal step, e.g. 1n,10us,1m
+Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
+`,
+  run(words, outside) {
+    const { file, options } = readArguments(words, ["frequencies", "times"]);
+    const frequencies = listOf(options.frequencies, "frequencies", "Hz");
+    const times = listOf(options.times, "times", "s");
+    const document = openDocument(file, outside);
+    needsDesign(document);
+    const outcome = runJob({ kind: "prove", document });
+    if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
+    const proof = outcome.value.proof!;
+    const asked = proveAt(document, frequencies ?? [], times ?? []);
+    const { sheet, frequency, step, ...rest } = proof;
+    outside.print(
+      `${JSON.stringify(
+        {
+          ...rest,
+          ...nested(sheet),
+          frequency: { ...frequency, ...(frequencies === null ? {} : { asked: asked.frequency }) },
+          step: { ...step, ...(times === null ? {} : { asked: asked.step }) },
+        },
+        null,
+        2,
+      )}\n`,
+    );
+    return proof.level === "stop" ? 1 : 0;
+  },
+};
+
+function listOf(text: string | undefined, name: string, unit: UnitName): number[] | null {
+  if (text === undefined) return null;
+  return text.split(",").map((each) => {
+    const parsed = parseQuantity(each, unit);
+    if (parsed.kind === "value") return parsed.value;
+    throw new Unusable(`--${name}: "${each}" is not understood${parsed.kind === "refused" ? `: ${parsed.why}` : ""}`);
+  });
+}

@@ -1,0 +1,23 @@
+import { judging } from "../checks/judging.ts";
+import { networkOf } from "../checks/networkOf.ts";
+import { stringCapacitance } from "../checks/stringCapacitance.ts";
+import type { DividerDocument } from "../job/document.ts";
+import { StepResponse } from "../network/stepResponse.ts";
+import { decibel, degrees, sweep } from "../network/sweep.ts";
+
+/** The design's response at chosen frequencies (Hz) and times (s); the document must have passed `prove`. */
+export function proveAt(document: DividerDocument, frequencies_Hz: readonly number[], times_s: readonly number[]) {
+  const j = judging(document);
+  j.sheet.given("/design/hvArm/strings", document.design!.hvArm.strings);
+  const network = networkOf(j, stringCapacitance(j));
+  const solved = sweep(network, frequencies_Hz)!;
+  const g = StepResponse.of(network)!;
+  return {
+    frequency: {
+      frequency_Hz: frequencies_Hz,
+      magnitude_dB: frequencies_Hz.map((_, k) => decibel(solved.real[k]!, solved.imaginary[k]!)),
+      phase_deg: frequencies_Hz.map((_, k) => degrees(solved.real[k]!, solved.imaginary[k]!)),
+    },
+    step: { time_s: times_s, value: times_s.map((t) => g.at(t)) },
+  };
+}
