@@ -43,10 +43,14 @@ export const faultRecord: Solution = {
   residualBound: 0,
 };
 
-/** Accessible limit in normal condition, dc or slowly varying (the stricter of the editions). */
-const accessible: { dc_V: number; peak_V: number; source: Source } = {
+/**
+ * Accessible limits in normal condition (the stricter of the editions): above the voltage a part is hazardous live when the
+ * current through the string or the charge behind it exceeds its own limit too.
+ */
+const accessible: { dc_V: number; current_A: number; charge_C: number; source: Source } = {
   dc_V: 60,
-  peak_V: 42.4,
+  current_A: 2e-3,
+  charge_C: 45e-6,
   source: {
     title: "IEC 61010-1",
     edition: "ed. 3.1 (2010 + AMD1:2016)",
@@ -75,7 +79,7 @@ export function faults(j: Judging, string: StringCapacitance, show: Show): Fault
     ...lvResistorFaults(j, bench),
     ...lvCapacitorFaults(j, bench),
     ...plugFaults(j, bench),
-  ].map((row) => judged(j, row, normal, show));
+  ].map((row) => judged(j, row, normal, bench, show));
   const worst = worstFault(rows);
   j.sheet.solved(
     "fault.worstOutput_V",
@@ -271,24 +275,38 @@ function plugFaults(j: Judging, bench: Bench): Raw[] {
   ];
 }
 
-function judged(j: Judging, raw: Raw, normal: number, show: Show): FaultRow {
+function judged(j: Judging, raw: Raw, normal: number, bench: Bench, show: Show): FaultRow {
+  const plug = raw.id === "unplugged";
   const output = Math.max(Math.abs(raw.output_V), Math.abs(raw.fastOutput_V));
-  const limit = raw.id === "unplugged" ? accessible.dc_V : j.instrument.greatestInput_Vpeak;
+  const limit = plug ? accessible.dc_V : j.instrument.greatestInput_Vpeak;
   const over = output > limit;
-  const readsZero = raw.output_V === 0 || raw.output_V < 1e-3 * normal;
-  const what = raw.id === "unplugged" ? "at the plug" : `at ${j.instrument.name}`;
-  const verdict = over
-    ? `above the ${show(limit, "V")} ${raw.id === "unplugged" ? "that a person may meet" : "it may see"}`
-    : readsZero
-      ? "reads zero while live"
-      : `within ${show(limit, "V")}`;
+  const hazardous = plug ? over && hazardousAtPlug(bench, output) : over;
+  const readsZero = !plug && raw.output_V < 1e-3 * normal;
+  const level: Level = hazardous && raw.single ? "stop" : over || readsZero ? "caution" : "clear";
+  const outside = plug
+    ? `above ${show(limit, "V")}, but the current through the string and the charge behind it are within the limits for a person`
+    : `above the ${show(limit, "V")} it may see`;
+  const verdict =
+    hazardous && plug
+      ? `above the ${show(limit, "V")} that a person may meet`
+      : over
+        ? outside
+        : readsZero
+          ? "reads zero while live"
+          : `within ${show(limit, "V")}`;
+  const where = plug ? "at the plug" : `at ${j.instrument.name}`;
   return {
     ...raw,
     outputShare: normal === 0 ? 0 : raw.output_V / normal,
-    readsZeroWhileLive: readsZero && raw.id !== "unplugged",
-    level: over && raw.single ? "stop" : over || readsZero ? "caution" : "clear",
-    sentence: `${raw.name}: ${show(raw.output_V, "V")} at dc, ${show(raw.fastOutput_V, "V")} on an edge ${what}; ${verdict}.`,
+    readsZeroWhileLive: readsZero,
+    level,
+    sentence: `${raw.name}: ${show(raw.output_V, "V")} at dc, ${show(raw.fastOutput_V, "V")} on an edge ${where}; ${verdict}.`,
   };
+}
+
+function hazardousAtPlug(bench: Bench, voltage: number): boolean {
+  const charge = voltage * bench.capacitors_F.reduce((sum, C) => sum + C, bench.string.twoPort.tap_F);
+  return bench.V / bench.R1 > accessible.current_A || charge > accessible.charge_C;
 }
 
 /** A finding for each single fault that stops; else one clear line with the worst. Also the single LV resistor. */
