@@ -81,8 +81,12 @@ function withScaleFactor(document: DividerDocument, reading: Reading): DividerDo
 function withOrigins(document: DividerDocument, reading: Reading): DividerDocument {
   const origins: Record<string, Origin> = moved(document.origins, reading);
   for (const pointer of reading.assumed) origins[pointer] = "assumed";
-  return { ...document, origins, typed: moved(document.typed, reading) };
+  return { ...document, origins: sorted(origins), typed: sorted(moved(document.typed, reading)) };
 }
+
+/** In the order in which they are saved. */
+const sorted = <T>(entries: Readonly<Record<string, T>>): Record<string, T> =>
+  Object.fromEntries(Object.entries(entries).sort(([a], [b]) => (a < b ? -1 : 1)));
 
 /** Entries under a dropped item go with it; those under an item that moved up follow it. */
 function moved<T>(entries: Readonly<Record<string, T>>, reading: Reading): Record<string, T> {

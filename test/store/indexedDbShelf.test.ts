@@ -2,7 +2,7 @@ import "fake-indexeddb/auto";
 import { IDBFactory } from "fake-indexeddb";
 import { beforeEach, expect, it } from "vitest";
 import { type Generation, generationOf } from "../../src/store/generation.ts";
-import { indexedDbShelf } from "../../src/store/indexedDbShelf.ts";
+import { IndexedDbShelf } from "../../src/store/indexedDbShelf.ts";
 import { createDividerStore } from "../../src/store/store.ts";
 import { inventedDesign } from "../file/invented.ts";
 
@@ -16,11 +16,11 @@ beforeEach(() => {
 });
 
 it("keeps generations over a new connection, newest first and by slot", async () => {
-  const shelf = indexedDbShelf();
+  const shelf = new IndexedDbShelf();
   expect(await shelf.write(generation("a", 1), 0, none)).toBe("written");
   expect(await shelf.write(generation("a", 2, 9), 1, none)).toBe("written");
   expect(await shelf.write(generation("ab", 1), 0, none)).toBe("written");
-  const again = indexedDbShelf();
+  const again = new IndexedDbShelf();
   expect((await again.read("a")).map((one) => one.revision)).toEqual([2, 1]);
   expect((await again.slots()).map((one) => [one.slot, one.revision])).toEqual([
     ["a", 2],
@@ -32,7 +32,7 @@ it("keeps generations over a new connection, newest first and by slot", async ()
 });
 
 it("refuses a stale writer in the same transaction, however the two interleave", async () => {
-  const [one, two] = [indexedDbShelf(), indexedDbShelf()];
+  const [one, two] = [new IndexedDbShelf(), new IndexedDbShelf()];
   await one.write(generation("a", 1), 0, none);
   const outcomes = await Promise.all([one.write(generation("a", 2), 1, none), two.write(generation("a", 2), 1, none)]);
   expect(outcomes.toSorted()).toEqual(["stale", "written"]);
@@ -42,7 +42,7 @@ it("refuses a stale writer in the same transaction, however the two interleave",
 });
 
 it("takes away what is superfluous together with the write, never what was just written", async () => {
-  const shelf = indexedDbShelf();
+  const shelf = new IndexedDbShelf();
   for (let revision = 1; revision <= 4; revision += 1) {
     await shelf.write(generation("a", revision), revision - 1, (held) => held.slice(0, -2).map((one) => one.revision));
   }
@@ -50,7 +50,7 @@ it("takes away what is superfluous together with the write, never what was just 
 });
 
 it("throws, and leaves all as it was, when the transaction is undone after its requests went well", async () => {
-  const shelf = indexedDbShelf();
+  const shelf = new IndexedDbShelf();
   await shelf.write(generation("a", 1), 0, none);
   const put = IDBObjectStore.prototype.put;
   IDBObjectStore.prototype.put = function (value: unknown) {

@@ -1,6 +1,6 @@
 import { afterEach, beforeEach, expect, it, vi } from "vitest";
 import { Autosave } from "../../src/store/autosave.ts";
-import { keepInBrowser } from "../../src/store/keepInBrowser.ts";
+import { Keeper } from "../../src/store/keeper.ts";
 import { keeping } from "../../src/store/keeping.ts";
 import { createDividerStore } from "../../src/store/store.ts";
 import { inventedDesign } from "../file/invented.ts";
@@ -11,7 +11,7 @@ let shelf: MemoryShelf;
 let locks: MemoryLocks;
 function tab() {
   const store = createDividerStore(inventedDesign(), { now: Date.now, takeCandidate: (document) => document });
-  const keeper = keepInBrowser(store, new Autosave({ shelf, locks, now: Date.now }));
+  const keeper = new Keeper(store, new Autosave({ shelf, locks, now: Date.now }));
   const type = (value: number) => store.getState().editAt(nominal, value, { step: "nominal voltage" });
   return { store, keeper, type, volts: () => store.getState().document.brief.waveform.nominal_V };
 }
