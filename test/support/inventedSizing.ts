@@ -67,7 +67,6 @@ const candidate = (rank: number, elements: number, value: number, over: Partial<
   governing: "element voltage, peak",
   stops: [],
   findings: [],
-  findings: [],
   design: {
     ...design,
     follows: false,

@@ -20,7 +20,8 @@ interface Props {
 export function BarPanel({ width, height, bars, cursor, yName, unit }: Props) {
   const box = useMemo(() => plotBox(width, height, 104), [width, height]);
   const y = useMemo(
-    () => linearAxis([0, ...bars.rows.flatMap((r) => [r.within ?? 0, r.past ?? 0, 1.05 * (r.limit ?? 0)])], 5),
+    () =>
+      linearAxis([0, ...bars.rows.flatMap((r) => [r.within ?? 0, r.past ?? 0, r.over ?? 0, 1.05 * (r.limit ?? 0)])], 5),
     [bars],
   );
   const { moveTo } = cursor;
@@ -36,7 +37,7 @@ export function BarPanel({ width, height, bars, cursor, yName, unit }: Props) {
   if (y === null || count === 0) return <p className="chart-note">Nothing to draw: no element.</p>;
   const width1 = (box.right - box.left) / count;
   const last = bars.rows[count - 1]?.limit ?? null;
-  const limitName = last === null ? "" : `limit ${withUnit(bars.limit ?? last, unit, 3)}`;
+  const limitName = last === null ? "" : `derated ${withUnit(bars.limit ?? last, unit, 3)}`;
   return (
     <div className="plot-panel" onPointerMove={onPointerMove} onPointerDown={onPointerMove}>
       <BarPlot

@@ -8,7 +8,10 @@ import { axisHeight, axisWidth, type PlotBox, topMargin } from "./plotBox.ts";
 export interface BarRow {
   readonly name: string;
   readonly within: number | null;
+  /** Past the derated limit, within the rating. */
   readonly past: number | null;
+  /** Past the rating itself. */
+  readonly over: number | null;
   readonly limit: number | null;
 }
 
@@ -26,7 +29,7 @@ export interface BarPlotProps {
 
 const tick = { fontSize: 12, fill: "var(--quiet)" };
 
-/** Bars within the limit are plain, bars past it hatched and in the colour of a stop. */
+/** Bars within the derated limit are plain, past it hatched as a caution, past the rating cross-hatched as a stop. */
 export const BarPlot = memo(function BarPlot(p: BarPlotProps) {
   const { box, y } = p;
   const margin = useMemo(() => ({ top: topMargin, right: box.width - box.right, bottom: 0, left: 0 }), [box]);
@@ -61,8 +64,12 @@ function limitY({ box, y, rows, limit }: BarPlotProps): number {
 const bars = [
   <defs key="defs">
     <pattern id="plot-past" width={6} height={6} patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
-      <rect width={6} height={6} fill="var(--stop)" fillOpacity={0.25} />
-      <rect width={2.5} height={6} fill="var(--stop)" />
+      <rect width={6} height={6} fill="var(--caution)" fillOpacity={0.25} />
+      <rect width={2.5} height={6} fill="var(--caution)" />
+    </pattern>
+    <pattern id="plot-over" width={6} height={6} patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
+      <rect width={6} height={6} fill="var(--stop)" fillOpacity={0.3} />
+      <path d="M0 1.25h6M1.25 0v6" stroke="var(--stop)" strokeWidth={2.5} />
     </pattern>
   </defs>,
   <Bar
@@ -79,6 +86,15 @@ const bars = [
     dataKey="past"
     stackId="a"
     fill="url(#plot-past)"
+    stroke="var(--caution)"
+    isAnimationActive={false}
+    maxBarSize={40}
+  />,
+  <Bar
+    key="over"
+    dataKey="over"
+    stackId="a"
+    fill="url(#plot-over)"
     stroke="var(--stop)"
     isAnimationActive={false}
     maxBarSize={40}

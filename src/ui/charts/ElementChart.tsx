@@ -15,6 +15,8 @@ export interface ElementBasis {
   /** One number per element, tap first. */
   readonly values: readonly (number | null)[];
   readonly limits: readonly (number | null)[];
+  /** The ratings that the limits are derated from; empty: not stated. */
+  readonly rated: readonly (number | null)[];
 }
 
 interface Props {
@@ -33,7 +35,7 @@ export function ElementChart(p: Props) {
   const bases = useDeferredValue(p.bases);
   const [wanted, setBasis] = useState(bases[0]?.id ?? "");
   const basis = bases.find((b) => b.id === wanted) ?? bases[0];
-  const bars = useMemo(() => elementBars(basis?.values ?? [], basis?.limits ?? []), [basis]);
+  const bars = useMemo(() => elementBars(basis?.values ?? [], basis?.limits ?? [], basis?.rated), [basis]);
   const cursor = useCursor(bars.rows.length);
   const columns = useMemo(() => columnsOf(bases, p.quantity, p.unit), [bases, p.quantity, p.unit]);
   const chosen = cursor.index === null ? null : (bars.element[cursor.index] ?? null);
@@ -43,7 +45,7 @@ export function ElementChart(p: Props) {
   return (
     <ChartFrame
       title={p.title}
-      sentence={elementSentence(`${p.quantity}, ${basis.name}`, p.unit, basis.values, basis.limits)}
+      sentence={elementSentence(`${p.quantity}, ${basis.name}`, p.unit, basis.values, basis.limits, basis.rated)}
       file={p.file}
       note={noteOf(bars.run, bars.left)}
       controls={
@@ -79,7 +81,7 @@ function readoutAt(basis: ElementBasis, element: number, unit: UnitName): string
   const value = basis.values[element - 1] ?? null;
   const limit = basis.limits[element - 1] ?? null;
   const text = value === null ? "no value" : withUnit(value, unit);
-  return `element ${element}, ${basis.name}: ${text}${limit === null ? "" : ` of ${withUnit(limit, unit)} allowed`}`;
+  return `element ${element}, ${basis.name}: ${text}${limit === null ? "" : ` of ${withUnit(limit, unit)} derated`}`;
 }
 
 function columnsOf(bases: readonly ElementBasis[], quantity: string, unit: string): readonly Column[] {

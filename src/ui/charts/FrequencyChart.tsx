@@ -45,7 +45,11 @@ export function FrequencyChart(p: Props) {
   );
   const phase = useMemo(() => phaseAxis(response.phase_deg), [response]);
   const bands = useMemo(() => toleranceBand(view, p.tolerance, [low, high]), [view, p.tolerance, low, high]);
-  const marks = useMemo(() => marksOf(view, [low, high], p.bandwidth_Hz), [view, low, high, p.bandwidth_Hz]);
+  const marks = useMemo(
+    () =>
+      marksOf(view, [low, high], p.bandwidth_Hz).filter((m) => m.along === "x" || (y !== null && m.at > y.domain[0])),
+    [view, low, high, p.bandwidth_Hz, y],
+  );
   const phaseMarks = useMemo(() => marks.filter((m) => m.along === "x").map((m) => ({ ...m, name: "" })), [marks]);
   const columns = useMemo(() => columnsOf(response), [response]);
   const readout = cursor.index === null ? null : readoutAt(response, cursor.index);

@@ -34,6 +34,10 @@ const minus = (text: string): string => text.replace("-", "\u2212");
 export const withUnit = (value: number, unit: UnitName, digits = 4): string =>
   formatQuantity(value, unit, { digits, trailing: false });
 
+/** A computed figure with all its digits, so that a column lines up: "2.00 kV". */
+export const figureText = (value: number, unit: UnitName, digits = 3): string =>
+  formatQuantity(value, unit, { digits });
+
 /** A signed number: "+0.03", "−1.2", "0". */
 export function signed(value: number, digits = 3): string {
   const rounded = Number(value.toPrecision(digits));

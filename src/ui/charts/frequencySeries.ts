@@ -9,7 +9,7 @@ export const percentOf = (magnitude_dB: number): number => 100 * (10 ** (magnitu
 const deepest_dB = -12;
 
 /**
- * The magnitude axis. In dB it holds the −3 dB point and stops at −12 dB; in percent it closes in on the wanted tolerance,
+ * The magnitude axis. In dB it holds the −3 dB point, where there is one, and stops at −12 dB; in percent it closes in on the wanted tolerance,
  * or on the greatest deviation inside the wanted band where that is larger.
  */
 export function magnitudeAxis(
@@ -20,7 +20,13 @@ export function magnitudeAxis(
 ): Axis | null {
   const finite = response.magnitude_dB.filter(Number.isFinite);
   if (finite.length === 0) return null;
-  if (view === "dB") return linearAxis([deepest_dB, Math.max(3, ...finite)], 6);
+  if (view === "dB") {
+    const low = Math.min(...finite);
+    const high = Math.max(...finite);
+    if (low <= -3) return linearAxis([deepest_dB, Math.max(3, high)], 6);
+    const reach = 1.5 * Math.max(-low, high, 20 * Math.log10(1 + tolerance));
+    return linearAxis([-reach, reach], 6);
+  }
   const inBand = response.magnitude_dB.filter((v, i) => Number.isFinite(v) && response.frequency_Hz[i]! <= band_Hz[1]);
   const deviation = inBand.reduce((most, v) => Math.max(most, Math.abs(percentOf(v))), 0);
   const half = Math.min(100, 2 * niceStep(Math.max(100 * tolerance, deviation * 0.6)));

@@ -1,5 +1,5 @@
 import type { FaultRow } from "../../solver/index.ts";
-import { withUnit } from "../charts/axisText.ts";
+import { figureText } from "../charts/axisText.ts";
 import { faultMark } from "./faultMarks.ts";
 import { LevelMark } from "./LevelMark.tsx";
 
@@ -55,7 +55,7 @@ function Row({ row, limit, wanted }: RowProps) {
   const mark = faultMark(row, wanted);
   const volts = (value: number) => (
     <td className={Math.abs(value) > limit && row.id !== "unplugged" ? "number past" : "number"}>
-      {withUnit(value, "V", 3)}
+      {figureText(value, "V")}
     </td>
   );
   return (
@@ -70,11 +70,10 @@ function Row({ row, limit, wanted }: RowProps) {
       {volts(row.output_V)}
       {volts(row.fastOutput_V)}
       <td className="number">{`${Number((100 * row.outputShare).toPrecision(3))}\u2009%`}</td>
-      <td className="number">{withUnit(row.greatestElementVoltage_V, "V", 3)}</td>
+      <td className="number">{figureText(row.greatestElementVoltage_V, "V")}</td>
       <td className="reason">
         {mark === null ? null : <strong className={mark === "silent" ? "mark" : "mark zero"}>{mark}</strong>}
-        {mark === null ? null : " · "}
-        {told(row)}
+        {mark !== null && told(row) === `${mark}.` ? null : `${mark === null ? "" : " · "}${told(row)}`}
       </td>
     </tr>
   );

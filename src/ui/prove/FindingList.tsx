@@ -1,5 +1,5 @@
 import { type Cure, citation, type Finding, type UnitName } from "../../solver/index.ts";
-import { withUnit } from "../charts/axisText.ts";
+import { figureText } from "../charts/axisText.ts";
 import { percentText } from "../size/candidateText.ts";
 import { LevelMark } from "./LevelMark.tsx";
 
@@ -63,7 +63,7 @@ function Numbers({ finding, onWhy }: { readonly finding: Finding; readonly onWhy
 /** A number in its finding's unit; a share reads as percent. */
 export function numberText(value: number, unit: string): string {
   if (unit === "1") return percentText(value);
-  return withUnit(value, unit as UnitName, 3);
+  return figureText(value, unit as UnitName);
 }
 
 const marginText = (margin: number): string =>

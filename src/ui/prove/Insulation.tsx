@@ -1,5 +1,5 @@
 import type { Finding } from "../../solver/index.ts";
-import { axisText, withUnit } from "../charts/axisText.ts";
+import { axisText, figureText } from "../charts/axisText.ts";
 import { linearAxis } from "../charts/logAxis.ts";
 import { LevelMark } from "./LevelMark.tsx";
 
@@ -83,7 +83,7 @@ interface DistanceProps {
 }
 
 function Distance({ value_m, path, element, onWhy }: DistanceProps) {
-  const text = withUnit(value_m, "m", 3);
+  const text = figureText(value_m, "m");
   if (path === null) return <span className="number">{text}</span>;
   return (
     <button type="button" className="number-button" onClick={() => onWhy(path, element)}>
@@ -96,5 +96,5 @@ function sentence(rows: readonly Finding[]): string {
   const short = rows.filter((f) => f.actual! < f.limit!);
   if (short.length === 0) return `All ${rows.length} distances are at least what is required.`;
   const worst = short.reduce((a, b) => (a.actual! / a.limit! < b.actual! / b.limit! ? a : b));
-  return `Short: ${worst.what} offers ${withUnit(worst.actual!, "m", 3)} of ${withUnit(worst.limit!, "m", 3)} required${short.length > 1 ? `, and ${short.length - 1} more` : ""}.`;
+  return `Short: ${worst.what} offers ${figureText(worst.actual!, "m")} of ${figureText(worst.limit!, "m")} required${short.length > 1 ? `, and ${short.length - 1} more` : ""}.`;
 }

@@ -86,11 +86,19 @@ describe("stress per element", () => {
         quantity="voltage"
         unit="V"
         file="voltage"
-        bases={[{ id: "peak", name: "peak", values: [1000, 2500, 900], limits: [2000, 2000, 2000] }]}
+        bases={[
+          {
+            id: "peak",
+            name: "peak",
+            values: [1000, 2500, 900],
+            limits: [2000, 2000, 2000],
+            rated: [3000, 3000, 3000],
+          },
+        ]}
       />,
     );
     await vi.waitFor(() => expect(container.querySelectorAll(".recharts-bar-rectangle path")).toHaveLength(3));
     expect(container.querySelectorAll('.recharts-bar-rectangle path[fill="url(#plot-past)"]')).toHaveLength(1);
-    expect(screen.getByText("limit 2 kV")).toBeInTheDocument();
+    expect(screen.getByText("derated 2 kV")).toBeInTheDocument();
   });
 });

@@ -17,7 +17,7 @@ describe("bars of a long string", () => {
 
   it("judge each element by its own limit: the hardest used is not the one with most volts", () => {
     expect(elementSentence("voltage, peak", "V", [900, 500], [1000, 510])).toBe(
-      "Hardest used: element 2 has 500\u2009V of 510\u2009V allowed (98\u2009%); all are within it.",
+      "Hardest used: element 2 has 500\u2009V of 510\u2009V derated (98\u2009%); all are within it.",
     );
   });
 

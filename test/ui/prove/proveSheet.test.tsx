@@ -16,7 +16,7 @@ describe("fault table", () => {
       .getAllByRole("row")
       .slice(1);
     expect(rows[0]).toHaveTextContent("198 V");
-    expect(rows[0]).toHaveTextContent("5.7 kV");
+    expect(rows[0]).toHaveTextContent("5.70 kV");
     expect(rows.find((row) => row.textContent?.includes("earth bond open"))).toHaveTextContent("silent");
     expect(rows.find((row) => row.textContent?.includes("an element open"))).toHaveTextContent("reads zero while live");
     expect(rows.find((row) => row.textContent?.includes("element 12 shorted"))).not.toHaveTextContent("silent");
