@@ -1,6 +1,5 @@
-import { type Cure, citation, type Finding, type UnitName } from "../../solver/index.ts";
+import { type Cure, citation, type Finding, formatShare, type UnitName } from "../../solver/index.ts";
 import { figureText } from "../charts/axisText.ts";
-import { percentText } from "../size/candidateText.ts";
 import { LevelMark } from "./LevelMark.tsx";
 
 interface Props {
@@ -62,9 +61,9 @@ function Numbers({ finding, onWhy }: { readonly finding: Finding; readonly onWhy
 
 /** A number in its finding's unit; a share reads as percent. */
 export function numberText(value: number, unit: string): string {
-  if (unit === "1") return percentText(value);
+  if (unit === "1") return formatShare(value);
   return figureText(value, unit as UnitName);
 }
 
 const marginText = (margin: number): string =>
-  margin < 0 ? `${percentText(-margin, 2)} past its limit` : `${percentText(margin, 2)} left`;
+  margin < 0 ? `${formatShare(-margin, 2)} past its limit` : `${formatShare(margin, 2)} left`;

@@ -48,7 +48,7 @@ function Column({ sketch, scale }: { readonly sketch: ColumnSketch; readonly sca
   const offsets = Array.from({ length: sketch.strings }, (_, s) => (s - (sketch.strings - 1) / 2) * gap);
   return (
     <svg width={width} height={drawn_px + 4} aria-hidden="true" className="column-drawing">
-      <line className="earth" x1={0} x2={width} y1={drawn_px + 2} y2={drawn_px + 2} />
+      <line className="earth" x1={-60} x2={width + 60} y1={drawn_px + 2} y2={drawn_px + 2} />
       <rect className="foot" x={middle - 12} width={24} y={up(sketch.foot_m)} height={sketch.foot_m * scale} />
       {offsets.map((dx) => (
         <line

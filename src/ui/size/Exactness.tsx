@@ -45,7 +45,13 @@ export function Exactness({ sheet, onWhy }: Props) {
           <td className="number">
             <SheetFigure sheet={sheet} path="lvArm.fitted_ohm" unit="ohm" onWhy={onWhy} digits={6} />
           </td>
-          <td className="quiet">{off === null ? "" : `${signed(100 * off)}\u2009% of the exact value`}</td>
+          <td className="quiet">
+            {off === null
+              ? ""
+              : Math.abs(off) < 1e-9
+                ? "exactly that"
+                : `${signed(100 * off)}\u2009% off the exact value`}
+          </td>
         </tr>
         <tr>
           <th scope="row">with the instrument in parallel</th>

@@ -22,7 +22,13 @@ export function LvDrawing({ design, parts, instrument }: Props) {
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolled drawing must be reachable by keyboard
     <section className="circuit" tabIndex={0} aria-label="drawing of the LV arm; the table below has its parts">
-      <svg width={width} height={floor + 46} viewBox={`0 0 ${width} ${floor + 46}`} aria-hidden="true">
+      <svg
+        width={width}
+        height={floor + 46}
+        viewBox={`0 0 ${width} ${floor + 46}`}
+        aria-hidden="true"
+        style={{ minWidth: Math.min(600, width) }}
+      >
         <line className="lead" x1={14} x2={at(branches.length - 1)} y1={rail} y2={rail} />
         <line className="lead" x1={at(0)} x2={at(branches.length - 1)} y1={floor} y2={floor} />
         <circle className="node" cx={14} cy={rail} r={3} />

@@ -1,6 +1,6 @@
-import type { Candidate } from "../../solver/index.ts";
+import { type Candidate, formatShare } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
-import { percentText, stringName } from "./candidateText.ts";
+import { stringName } from "./candidateText.ts";
 
 /** One column of the table of candidates: what it shows and what it sorts by. */
 export interface CandidateColumn {
@@ -72,21 +72,21 @@ export const candidateColumns: readonly CandidateColumn[] = [
     "± (k = 2)",
     "uncertainty from parts",
     (c) => c.partsUncertainty,
-    (c) => percentText(c.partsUncertainty, 2),
+    (c) => formatShare(c.partsUncertainty, 2),
   ),
   column(
     "sag",
     "sag",
     "sag of the source",
     (c) => c.loading,
-    (c) => percentText(c.loading, 2),
+    (c) => formatShare(c.loading, 2),
   ),
   column(
     "margin",
     "margin",
     "smallest margin to a derated limit",
     (c) => c.smallestMargin,
-    (c) => percentText(c.smallestMargin, 2),
+    (c) => formatShare(c.smallestMargin, 2),
     true,
   ),
   column(

@@ -1,7 +1,7 @@
-import { StrictMode, useState } from "react";
+import { StrictMode, useMemo, useState } from "react";
 import { createRoot } from "react-dom/client";
 import "./harness.css";
-import { prove } from "../../../src/solver/index.ts";
+import { type Candidate, prove, size, takeCandidate } from "../../../src/solver/index.ts";
 import { BuildSheet } from "../../../src/ui/build/BuildSheet.tsx";
 import { ProveSheet } from "../../../src/ui/prove/ProveSheet.tsx";
 import { SizeSheet } from "../../../src/ui/size/SizeSheet.tsx";
@@ -23,17 +23,22 @@ function Size({ shut }: { readonly shut: boolean }) {
 
 const actions = { onWhy: console.log, onCure: console.log };
 function Real() {
-  const proof = prove(inventedDocument);
+  const [document, setDocument] = useState(inventedDocument);
+  const sizing = useMemo(() => size(document, { top: 24 }), [document]);
+  const proof = useMemo(() => prove(document), [document]);
+  if (!sizing.ok) return <pre>{JSON.stringify(sizing.error, null, 2)}</pre>;
   if (!proof.ok) return <pre>{JSON.stringify(proof.error, null, 2)}</pre>;
+  const onTake = (c: Candidate) => setDocument(takeCandidate(document, c));
   return (
     <>
       <SizeSheet
-        document={inventedDocument}
-        sizing={inventedSizing}
+        document={document}
+        sizing={sizing.value}
         proof={proof.value}
-        actions={{ onTake: console.log, onSizeAgain: console.log, onCure: console.log, onWhy: console.log }}
+        actions={{ onTake, onSizeAgain: console.log, onCure: console.log, onWhy: console.log }}
       />
-      <ProveSheet document={inventedDocument} proof={proof.value} actions={actions} />
+      <ProveSheet document={document} proof={proof.value} actions={actions} />
+      <BuildSheet document={document} proof={proof.value} />
     </>
   );
 }

@@ -74,7 +74,7 @@ describe("LV arm", () => {
   it("sets exact beside fitted, and the three matches beside what is fitted", () => {
     render(sheet(actions()));
     const exact = screen.getByRole("row", { name: /^fitted 137/ });
-    expect(exact).toHaveTextContent("+14.3 % of the exact value");
+    expect(exact).toHaveTextContent("+14.3 % off the exact value");
     const chosen = screen.getByRole("row", { name: /flattest over the band/ });
     expect(chosen).toHaveTextContent("chosen");
     expect(chosen).toHaveTextContent("18.6 nF");
