@@ -88,6 +88,7 @@ describe("a file with something wrong in it", () => {
     expect(document.typed).toEqual({ "/design/lvArm/branches/0/series/0/resistance_ohm": "2M7" });
     expect(document.origins["/parts/0/tolerance"]).toBe("measured");
     expect(document.origins["/design/lvArm/branches/0/name"]).toBeUndefined();
+    expect(Object.keys(document.origins).filter((pointer) => !pointer.startsWith("/"))).toEqual([]);
   });
 
   it("leaves out a design that cannot be read, and says where", () => {
