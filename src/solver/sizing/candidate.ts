@@ -1,37 +1,42 @@
 import { show } from "../checks/show.ts";
 import type { Design } from "../job/design.ts";
 import type { Part } from "../job/part.ts";
+import { formatShare } from "../quantities/format.ts";
 import type { Finding } from "../standards/finding.ts";
 import { candidateFormulas } from "./candidateFormulas.ts";
-import { columnGeometry, envelope, geometryFormulas } from "./geometry.ts";
+import { compensated } from "./compensation.ts";
+import { found } from "./found.ts";
+import { envelope } from "./geometry.ts";
 import type { Limits } from "./kind.ts";
 import type { Build } from "./line.ts";
 import { lvResistors } from "./lvArm.ts";
-import { lvNeed } from "./lvSolution.ts";
+import { lvNeedOf } from "./lvReach.ts";
 import type { Candidate } from "./outcome.ts";
 import { tooUncertain } from "./pick.ts";
 import type { Pool } from "./pool.ts";
+import { type Fitted, geometryOf, unique, withCapacitors } from "./withCapacitors.ts";
 
-/** A build with LV arm, geometry and parts: everything but its rank and the sheet's figures. */
+/** A build with LV arm, capacitors, geometry and parts: everything but its rank and the sheet's figures. */
 export type Drafted = Omit<Candidate, "rank">;
 
 export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
   const { ask } = limits;
   const { family } = build.kind;
   const findings: Finding[] = [...insulationFindings(limits), ...uncertaintyFindings(build, limits)];
-  const need = lvNeed({
-    hvArm_ohm: build.hvArm_ohm,
-    scaleFactor: ask.j.document.brief.scaleFactor,
-    instrument_ohm: ask.j.instrument.resistance_ohm,
-    seriesProtector_ohm: ask.seriesProtector_ohm,
-    leakage_S: ask.leakage_S,
-    stringTolerance: family.tolerance,
-    instrumentSpread: ask.j.instrument.resistanceSpread,
-  });
+  const need = lvNeedOf(ask, build.hvArm_ohm, family.tolerance);
   const lv = need.ok ? lvResistors(ask, pool, build.hvArm_ohm, need.value) : null;
-  if (!need.ok) findings.push(noLvArm(`${need.error.why} ${need.error.cure}`));
+  if (!need.ok)
+    findings.push(found("scaleFactor.existence", "stop", "LV arm", { reason: `${need.error.why} ${need.error.cure}` }));
   findings.push(...(lv?.findings ?? []));
-  const parts: Part[] = unique([family, ...(lv?.parts ?? []), ...protectorParts(limits)]);
+  const bare: Fitted = {
+    design: designOf(build, limits, lv?.branches ?? []),
+    parts: unique([family, ...(lv?.parts ?? []), ...protectorParts(limits)]),
+    findings: [],
+  };
+  const fitted = compensated(build, limits) ? withCapacitors(build, limits, pool, bare) : bare;
+  findings.push(...fitted.findings, ...lengthFindings(fitted.design, limits));
+  const { working } = ask;
+  const share = limits.share / build.elements;
   return {
     family: family.id,
     familyName: family.name,
@@ -40,30 +45,25 @@ export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
     strings: build.strings,
     hvArmResistance_ohm: build.hvArm_ohm,
     elementCount: build.elementCount,
-    columnLength_m: build.length_m,
+    columnLength_m: fitted.design.geometry.columnLength_m,
     partsUncertainty: build.uncertainty,
     loading: build.loading,
     smallestMargin: build.margin,
-    differentParts: 1,
-    elementVoltage_Vrms: (ask.working.rms_V * limits.share) / build.elements,
-    elementVoltage_Vpeak: (ask.working.peak_V * limits.share) / build.elements,
-    elementDissipation_W: ((ask.working.greatestRms_V * limits.share) / build.elements) ** 2 / build.resistance_ohm,
+    differentParts: differentParts(fitted.design),
+    elementVoltage_Vrms: working.rms_V * share,
+    elementVoltage_Vpeak: working.peak_V * share,
+    elementDissipation_W: (working.greatestRms_V * share) ** 2 / build.resistance_ohm,
     governing: build.governing,
     stops: findings.filter((each) => each.level === "stop").map((each) => each.id),
     findings,
-    design: designOf(build, limits, lv?.branches ?? []),
-    parts,
+    design: fitted.design,
+    parts: fitted.parts,
   };
 }
 
 function designOf(build: Build, limits: Limits, branches: Design["lvArm"]["branches"]): Design {
   const { document } = limits.ask.j;
   const { family } = build.kind;
-  const greatest = limits.ask.working.greatest_Vpeak;
-  const electrodeRadius_m = geometryFormulas.electrodeRadius.compute({
-    V: greatest,
-    h: document.brief.surroundings.altitude_m,
-  }) as number;
   return {
     follows: false,
     hvArm: {
@@ -77,83 +77,74 @@ function designOf(build: Build, limits: Limits, branches: Design["lvArm"]["branc
     },
     lvArm: { stays: "withDivider", branches, capacitanceBy: "none" },
     protectors: document.design?.protectors ?? [],
-    geometry: columnGeometry(document, {
-      elements: build.elements,
-      columnLength_m: build.length_m,
-      columnDiameter_m: envelope(family.bodyDiameter_m, build.strings),
-      electrodeRadius_m,
-      greatest_Vpeak: greatest,
-    }),
+    geometry: geometryOf(limits, build.elements, build.length_m, envelope(family.bodyDiameter_m, build.strings)),
     strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
   };
+}
+
+/** How many different parts and values the design is made of. */
+function differentParts({ hvArm, lvArm }: Design): number {
+  const elements = hvArm.elements.flatMap((each) => [
+    `${each.part} ${each.resistance_ohm}`,
+    ...(each.capacitor === null ? [] : [`${each.capacitor} ${each.capacitance_F}`]),
+  ]);
+  const branches = lvArm.branches.flatMap((branch) => {
+    if ("trimmer" in branch) return [`${branch.part} ${branch.trimmer.greatest_F}`];
+    if (!("series" in branch)) return [`${branch.part} ${branch.capacitance_F}`];
+    return branch.series.map((item) =>
+      "rheostat" in item ? `${item.part} ${item.rheostat.greatest_ohm}` : `${item.part} ${item.resistance_ohm}`,
+    );
+  });
+  return new Set([...elements, ...branches]).size;
 }
 
 const protectorParts = ({ ask }: Limits): Part[] =>
   ask.j.design.protectors.flatMap((fitted) => ask.j.parts.get(fitted.part) ?? []);
 
-const unique = (parts: readonly Part[]): Part[] => [...new Map(parts.map((part) => [part.id, part])).values()];
-
-function noLvArm(reason: string): Finding {
-  return {
-    id: "scaleFactor.existence",
-    level: "stop",
-    what: "LV arm for the wanted scale factor",
-    actual: null,
-    limit: null,
-    unit: "1",
-    sense: "none",
-    margin: null,
-    reason,
-    source: candidateFormulas.hvArm.source,
-    cure: null,
-    path: null,
-  };
+/** Capacitors make a column longer than the search knew: it may pass the longest accepted. */
+function lengthFindings({ geometry }: Design, limits: Limits): Finding[] {
+  if (geometry.columnLength_m <= limits.length_m * (1 + 1e-9)) return [];
+  return [
+    found("column.length", "stop", "length of the column", {
+      actual: geometry.columnLength_m,
+      limit: limits.length_m,
+      unit: "m",
+      sense: "atMost",
+      reason:
+        `With its capacitors the column is ${show(geometry.columnLength_m, "m")} long; ` +
+        `${show(limits.length_m, "m")} is the longest accepted.`,
+    }),
+  ];
 }
 
 function uncertaintyFindings(build: Build, limits: Limits): Finding[] {
   if (!tooUncertain(build, limits)) return [];
   const wanted = limits.ask.j.document.brief.wantedUncertainty;
   return [
-    {
-      id: "scaleFactor.uncertainty",
-      level: "stop",
-      what: "uncertainty of the string from its parts",
+    found("scaleFactor.uncertainty", "caution", "uncertainty of the string from its parts", {
       actual: build.uncertainty,
       limit: wanted,
-      unit: "1",
       sense: "atMost",
-      margin: 1 - build.uncertainty / wanted,
       reason:
-        `The string alone is uncertain by ${show(build.uncertainty, "1")} (k = 2) before it is measured; ` +
-        `${show(wanted, "1")} is wanted. Measure the elements, calibrate, or take a closer family.`,
+        `The string alone is uncertain by ${formatShare(build.uncertainty)} (k = 2) before it is measured; ` +
+        `${formatShare(wanted)} is wanted. Measure the elements, calibrate, or take a closer family.`,
       source: candidateFormulas.partsUncertainty.source,
-      cure: null,
-      path: null,
-    },
+    }),
   ];
 }
 
 function insulationFindings({ need, ask }: Limits): Finding[] {
   if (!need.beyondClearance && !need.beyondCreepage) return [];
-  const tables = [need.beyondCreepage ? "creepage" : null, need.beyondClearance ? "clearance" : null]
-    .filter((each) => each !== null)
-    .join(" and ");
+  const tables = [need.beyondCreepage ? "creepage" : null, need.beyondClearance ? "clearance" : null];
   return [
-    {
-      id: "insulation.beyondTables",
-      level: "caution",
-      what: "insulation beyond the tables",
+    found("insulation.beyondTables", "caution", "insulation beyond the tables", {
       actual: ask.working.greatest_Vpeak,
-      limit: null,
       unit: "V",
-      sense: "none",
-      margin: null,
       reason:
-        `The table of ${tables} does not reach ${show(ask.working.greatest_Vpeak, "V")} in these surroundings; ` +
-        "the column length rests on 3 kV/cm with air density alone.",
+        `The table of ${tables.filter((each) => each !== null).join(" and ")} does not reach ` +
+        `${show(ask.working.greatest_Vpeak, "V")} in these surroundings; the column length rests on 3 kV/cm with air density.`,
       source: candidateFormulas.columnLength.source,
-      cure: null,
       path: "insulation.column_m",
-    },
+    }),
   ];
 }

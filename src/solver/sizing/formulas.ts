@@ -1,5 +1,6 @@
-import type { Formula } from "../standards/formula.ts";
+import type { Formula, Solution } from "../standards/formula.ts";
 import { candidateFormulas } from "./candidateFormulas.ts";
+import { compensationFormulas, lvCapacitanceRecord } from "./compensationFormulas.ts";
 import { geometryFormulas } from "./geometry.ts";
 import { lvSolutionFormulas } from "./lvSolution.ts";
 import { windowFormulas } from "./windowFormulas.ts";
@@ -10,4 +11,8 @@ export const sizingFormulas: readonly Formula<string, string>[] = [
   candidateFormulas,
   geometryFormulas,
   lvSolutionFormulas,
+  compensationFormulas,
 ].flatMap((group) => Object.values(group) as unknown as Formula<string, string>[]);
+
+/** Records for what the search solves for. */
+export const sizingSolutions: readonly Solution[] = [lvCapacitanceRecord];

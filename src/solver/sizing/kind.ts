@@ -6,7 +6,8 @@ import type { Asking } from "./asking.ts";
 import { acceptedBandShare, bandTop } from "./bandLimit.ts";
 import type { InsulationNeed } from "./columnNeed.ts";
 import { envelope } from "./geometry.ts";
-import { type Offer, offers } from "./pool.ts";
+import { trimReach } from "./lvReach.ts";
+import { type Offer, offers, type Pool } from "./pool.ts";
 
 /** Most elements in series that are looked at. */
 export const mostElements = 5000;
@@ -28,6 +29,8 @@ export interface Limits {
   readonly footHeight_m: number;
   /** Voltage of one of n elements per volt at the electrode, times n: R1 / (R1 + R2p). */
   readonly share: number;
+  /** Greatest peak across one element that a capacitor may see where every string gets capacitors; else Infinity. */
+  readonly capacitor_V: number;
   /** Body length needed by count, filled as it is asked for; 0: not yet. */
   readonly bodies_m: Float64Array;
 }
@@ -43,14 +46,18 @@ export interface Kind {
   readonly pitch_m: number;
   /** Least elements in series by voltage and by the path along one body; over 5000 where none suffices. */
   readonly leastCount: number;
-  readonly leastBy: "voltage" | "creepage";
+  readonly leastBy: "voltage" | "creepage" | "capacitor";
+  /** Greatest R1, Ω: the window's, or where a trim that can be bought no longer makes up for the family's tolerance. */
+  readonly greatest_ohm: number;
+  readonly greatestBy: "window" | "trim";
 }
 
-export function kindOf(family: ResistorFamily, limits: Limits): Kind {
+export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind {
   const { policy, surroundings, waveform } = limits.ask.j.document.brief;
   const { working } = limits.ask;
   const rms_V = policy.voltageDerating * (family.limitingVoltage_V as number);
   const peak_V = rms_V * (waveform.kind === "sine" ? Math.SQRT2 : 1);
+  const capacitor = up((working.greatest_Vpeak * limits.share) / limits.capacitor_V);
   const allowed = stressFormulas.dissipationRating.compute({
     P: family.ratedDissipation_W,
     Tr: family.deratingFrom_degC,
@@ -62,6 +69,7 @@ export function kindOf(family: ResistorFamily, limits: Limits): Kind {
     up((working.greatestRms_V * limits.share) / rms_V),
     up((working.greatest_Vpeak * limits.share) / peak_V),
   );
+  const trim = trimReach(limits.ask, pool, family.tolerance);
   const creepage = countByBody(family.bodyLength_m, limits);
   return {
     family,
@@ -70,8 +78,10 @@ export function kindOf(family: ResistorFamily, limits: Limits): Kind {
     peak_V,
     dissipation_W: policy.powerDerating * allowed,
     pitch_m: family.bodyLength_m + family.leadSpace_m,
-    leastCount: Math.max(voltage, creepage),
-    leastBy: creepage > voltage ? "creepage" : "voltage",
+    leastCount: Math.max(voltage, creepage, capacitor),
+    leastBy: capacitor > Math.max(creepage, voltage) ? "capacitor" : creepage > voltage ? "creepage" : "voltage",
+    greatest_ohm: Math.min(limits.greatest_ohm, trim),
+    greatestBy: trim < limits.greatest_ohm ? "trim" : "window",
   };
 }
 

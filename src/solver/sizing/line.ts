@@ -51,7 +51,7 @@ export class Line {
     this.strings = strings;
     this.limits = limits;
     const smallest = kind.offers[0]?.value ?? Number.POSITIVE_INFINITY;
-    const byWindow = Math.floor(((strings * limits.greatest_ohm) / smallest) * (1 + 1e-12));
+    const byWindow = Math.floor(((strings * kind.greatest_ohm) / smallest) * (1 + 1e-12));
     const byLength = Math.floor((limits.length_m / kind.pitch_m) * (1 + 1e-12));
     this.first = kind.leastCount;
     this.last = Math.min(mostElements, byWindow, byLength);
@@ -178,7 +178,7 @@ export class Line {
     this.uncertain[n - this.first] = this.uncertainty(n);
     if (this.length(n) > limits.length_m * (1 + 1e-12)) return;
     const bound = limits.bare ? bandBound(kind, this.length(n), strings, limits) : Number.POSITIVE_INFINITY;
-    const greatest = Math.min(limits.greatest_ohm, bound);
+    const greatest = Math.min(kind.greatest_ohm, bound);
     // The largest value allowed falls as n rises, so the search goes on from where it stood.
     while (this.at >= 0 && (n * offers[this.at]!.value) / strings > greatest) this.at--;
     let at = this.at;

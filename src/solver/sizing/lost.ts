@@ -34,7 +34,7 @@ const down = (x: number): number => Math.floor(x * (1 + 1e-12));
 
 const asWanted = (kind: Kind, limits: Limits): Asked => ({
   least_ohm: limits.least_ohm,
-  greatest_ohm: limits.greatest_ohm,
+  greatest_ohm: kind.greatest_ohm,
   length_m: limits.length_m,
   dissipation_W: kind.dissipation_W,
   inHand: true,
@@ -74,7 +74,7 @@ export function whyNone(kind: Kind, limits: Limits): Reason {
   const long = without({ length_m: Number.POSITIVE_INFINITY });
   if (long.length > 0) return tooLong(kind, limits, long);
   const high = without({ greatest_ohm: Number.POSITIVE_INFINITY });
-  if (high.length > 0) return tooHigh(limits, high);
+  if (high.length > 0) return tooHigh(kind, high);
   const low = without({ least_ohm: 0 });
   if (low.length > 0) return tooLow(limits, low);
   const hot = without({ dissipation_W: Number.POSITIVE_INFINITY });
@@ -87,18 +87,22 @@ export function whyNone(kind: Kind, limits: Limits): Reason {
 
 const V = (limits: Limits) => show(limits.ask.working.greatest_Vpeak, "V");
 
+const governs: Record<Kind["leastBy"], string> = {
+  voltage: "by its limiting voltage",
+  creepage: "by creepage along its body",
+  capacitor: "by the rating of the capacitor across each",
+};
+
 function tooMany(kind: Kind, limits: Limits): Reason {
   const { greatestRms_V, greatest_Vpeak } = limits.ask.working;
-  const needed = Math.max(
-    up((greatestRms_V * limits.share) / kind.rms_V),
-    up((greatest_Vpeak * limits.share) / kind.peak_V),
-  );
-  if (needed <= mostElements) {
+  if (kind.leastBy === "creepage") {
     const reason = `Its body of ${show(kind.family.bodyLength_m, "m")} is too short for creepage even with ${mostElements} in series.`;
     return { reason, actual: kind.family.bodyLength_m, limit: null, unit: "m" };
   }
+  const each = Math.min(kind.peak_V, limits.capacitor_V);
+  const needed = Math.max(up((greatestRms_V * limits.share) / kind.rms_V), up((greatest_Vpeak * limits.share) / each));
   const reason =
-    `${needed} in series would be needed at ${show(kind.rms_V, "V")} each for ${V(limits)}; ${mostElements} is the most. ` +
+    `${needed} in series would be needed ${governs[kind.leastBy]} for ${V(limits)}; ${mostElements} is the most. ` +
     "Take a family with a higher limiting voltage.";
   return { reason, actual: needed, limit: mostElements, unit: "1" };
 }
@@ -119,13 +123,16 @@ function tooLong(kind: Kind, limits: Limits, found: readonly Range[]): Reason {
   return { reason, actual: length, limit: limits.length_m, unit: "m" };
 }
 
-function tooHigh(limits: Limits, found: readonly Range[]): Reason {
+function tooHigh(kind: Kind, found: readonly Range[]): Reason {
   const best = found.reduce((a, b) => (least_ohm(b) < least_ohm(a) ? b : a));
   const R = least_ohm(best);
-  const reason =
-    `The ${best.least} in series that its limits ask for are at least ${show(R, "ohm")} (${many(best)}); ` +
-    `the window ends at ${show(limits.greatest_ohm, "ohm")}.`;
-  return { reason, actual: R, limit: limits.greatest_ohm, unit: "ohm" };
+  const end =
+    kind.greatestBy === "window"
+      ? `the window ends at ${show(kind.greatest_ohm, "ohm")}.`
+      : `with its tolerance of ${Number((kind.family.tolerance * 100).toPrecision(3))} % the LV arm can be trimmed up to ` +
+        `${show(kind.greatest_ohm, "ohm")} only.`;
+  const reason = `The ${best.least} in series that its limits ask for are at least ${show(R, "ohm")} (${many(best)}); ${end}`;
+  return { reason, actual: R, limit: kind.greatest_ohm, unit: "ohm" };
 }
 
 function tooLow(limits: Limits, found: readonly Range[]): Reason {
@@ -165,8 +172,8 @@ const outOfBand = (limits: Limits): Reason => ({
 
 const severalAtOnce = (kind: Kind, limits: Limits): Reason => ({
   reason:
-    `At least ${kind.leastCount} are needed in series by ${kind.leastBy}, and no value sold brings such a string into the window ` +
-    `of ${show(limits.least_ohm, "ohm")} to ${show(limits.greatest_ohm, "ohm")} within all other limits.`,
+    `At least ${kind.leastCount} are needed in series ${governs[kind.leastBy]}, and no value sold brings such a string into the window ` +
+    `of ${show(limits.least_ohm, "ohm")} to ${show(kind.greatest_ohm, "ohm")} within all other limits.`,
   actual: kind.leastCount,
   limit: null,
   unit: "1",

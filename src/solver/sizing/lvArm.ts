@@ -2,8 +2,8 @@ import { show } from "../checks/show.ts";
 import type { LvBranch } from "../job/design.ts";
 import type { Part, ResistorFamily, TrimmerFamily } from "../job/part.ts";
 import type { Finding } from "../standards/finding.ts";
-import { practice } from "../standards/source.ts";
 import type { Asking } from "./asking.ts";
+import { found } from "./found.ts";
 import { lvResistorFamilies, lvValues } from "./lvFamilies.ts";
 import type { LvNeed } from "./lvSolution.ts";
 import { seriesTrim } from "./lvTrim.ts";
@@ -38,11 +38,11 @@ export function lvResistors(ask: Asking, pool: Pool, hvArm_ohm: number, need: Lv
   const handOnly = ask.j.document.brief.policy.partsInHandOnly;
   for (const fromHand of handOnly ? [true, false] : [false]) {
     for (const reach of [1, 0.75, 0.5, 0.25, 0]) {
-      const found = bestOf(ask, pool, narrowed(need, reach), hvArm_ohm, counts, fromHand);
-      if (found === null) continue;
-      const findings = reach < 1 ? [shortReach(need, found)] : [];
+      const chosen = bestOf(ask, pool, narrowed(need, reach), hvArm_ohm, counts, fromHand);
+      if (chosen === null) continue;
+      const findings = reach < 1 ? [shortReach(need, chosen)] : [];
       if (handOnly && !fromHand) findings.push(notInHand(need));
-      return { branches: branchesOf(found), parts: [found.family, found.trimmer], findings };
+      return { branches: branchesOf(chosen), parts: [chosen.family, chosen.trimmer], findings };
     }
   }
   return { branches: [], parts: [], findings: [noParts(need)] };
@@ -78,8 +78,8 @@ function bestOf(
   for (const count of counts) {
     for (const family of lvResistorFamilies(pool)) {
       if (!bears(ask, family, need, hvArm_ohm, count)) continue;
-      const found = trimmed(valuesOf(ask, family, count, need, fromHand), { family, trimmers, count, need });
-      if (found !== null) return found;
+      const chosen = trimmed(valuesOf(ask, family, count, need, fromHand), { family, trimmers, count, need });
+      if (chosen !== null) return chosen;
     }
   }
   return null;
@@ -106,6 +106,11 @@ function valuesOf(ask: Asking, family: ResistorFamily, count: number, need: LvNe
   return lvValues(family, series, about / 2, about * 2);
 }
 
+/** Branches stay within a factor of 1.7 of each other, so that an open one does what an equal one would. */
+const mostUnequal = Math.log(1.7);
+/** A lifted wiper leaves the whole track in; it may raise the LV arm by this much. */
+const mostLifted = 0.1;
+
 function trimmed(
   values: readonly number[],
   given: { family: ResistorFamily; trimmers: readonly TrimmerFamily[]; count: number; need: LvNeed },
@@ -122,12 +127,12 @@ function trimmed(
         { ohm: fixed_ohm, tolerance: t },
         { ohm: branch_ohm, tolerance: t, count: count - 1 },
       );
-      if (span === null || span.least_ohm < 0) continue;
+      if (span === null || span.least_ohm < 0 || Math.abs(Math.log(total / branch_ohm)) > mostUnequal) continue;
       for (const trimmer of trimmers) {
         const span_ohm = smallestTrack(trimmer, span);
         if (span_ohm === null) continue;
-        const found = { family, trimmer, count, branch_ohm, fixed_ohm, span_ohm, set_ohm: total - fixed_ohm };
-        if (best === null || better(found, best)) best = found;
+        const chosen = { family, trimmer, count, branch_ohm, fixed_ohm, span_ohm, set_ohm: total - fixed_ohm };
+        if (best === null || better(chosen, best)) best = chosen;
       }
     }
   }
@@ -143,80 +148,62 @@ function smallestTrack(trimmer: TrimmerFamily, span: { least_ohm: number; greate
 }
 
 function better(a: Trimmed, b: Trimmed): boolean {
+  const lifted = (each: Trimmed) => {
+    const branch = each.fixed_ohm + each.set_ohm;
+    const arm = 1 / (1 / branch + (each.count - 1) / each.branch_ohm);
+    return arm * (1 / (each.fixed_ohm + each.span_ohm) + (each.count - 1) / each.branch_ohm) < 1 / (1 + mostLifted)
+      ? 1
+      : 0;
+  };
   const different = (each: Trimmed) => (each.branch_ohm === each.fixed_ohm ? 1 : 2);
   const unequal = (each: Trimmed) => Math.abs(Math.log((each.fixed_ohm + each.set_ohm) / each.branch_ohm));
   return (
-    (different(a) - different(b) || a.span_ohm - b.span_ohm || unequal(a) - unequal(b) || a.branch_ohm - b.branch_ohm) <
-    0
+    (lifted(a) - lifted(b) ||
+      different(a) - different(b) ||
+      a.span_ohm - b.span_ohm ||
+      unequal(a) - unequal(b) ||
+      a.branch_ohm - b.branch_ohm) < 0
   );
 }
 
-function branchesOf(found: Trimmed): LvBranch[] {
-  const { family, trimmer, count, span_ohm, set_ohm } = found;
+function branchesOf(chosen: Trimmed): LvBranch[] {
+  const { family, trimmer, count, span_ohm, set_ohm } = chosen;
   const least_ohm = span_ohm * trimmer.leastShare;
   const setting = (set_ohm - least_ohm) / (span_ohm - least_ohm);
   const name = (i: number) => `R2${"abc"[i]}`;
   const plain = Array.from({ length: count - 1 }, (_, i) => ({
     name: name(i),
-    series: [{ part: family.id, resistance_ohm: found.branch_ohm }],
+    series: [{ part: family.id, resistance_ohm: chosen.branch_ohm }],
   }));
   const rheostat = { least_ohm, greatest_ohm: span_ohm, setting };
   const adjusted = {
     name: name(count - 1),
     series: [
-      { part: family.id, resistance_ohm: found.fixed_ohm },
+      { part: family.id, resistance_ohm: chosen.fixed_ohm },
       { part: trimmer.id, rheostat },
     ],
   };
   return [...plain, adjusted];
 }
 
-const source = practice("the trim reaches every extreme of the parts");
-const finding = (
-  id: string,
-  level: Finding["level"],
-  what: string,
-  reason: string,
-  more: Partial<Finding> = {},
-): Finding => ({
-  id,
-  level,
-  what,
-  actual: null,
-  limit: null,
-  unit: "ohm",
-  sense: "none",
-  margin: null,
-  reason,
-  source,
-  cure: null,
-  path: null,
-  ...more,
-});
-
 const asked = (need: LvNeed) => `${show(need.least_ohm, "ohm")} to ${show(need.greatest_ohm, "ohm")}`;
 
-const shortReach = (need: LvNeed, found: Trimmed): Finding =>
-  finding(
-    "lvArm.trim",
-    "stop",
-    "reach of the LV trim",
-    `The LV arm must reach ${asked(need)} over all tolerances; no rheostat sold does in series with ` +
-      `${show(found.fixed_ohm, "ohm")}. Take a string of closer tolerance, or choose the fixed resistors after measuring the string.`,
-  );
+const shortReach = (need: LvNeed, chosen: Trimmed): Finding =>
+  found("lvArm.trim", "stop", "reach of the LV trim", {
+    unit: "ohm",
+    reason:
+      `The LV arm must reach ${asked(need)} over all tolerances; no rheostat sold does in series with ` +
+      `${show(chosen.fixed_ohm, "ohm")}. Take a string of closer tolerance, or choose the fixed resistors after measuring the string.`,
+  });
 
 const notInHand = (need: LvNeed): Finding =>
-  finding(
-    "lvArm.notInHand",
-    "caution",
-    "LV arm from parts in hand",
-    `No parts in hand make ${asked(need)}; the LV arm shown is to be bought.`,
-  );
+  found("lvArm.notInHand", "caution", "LV arm from parts in hand", {
+    unit: "ohm",
+    reason: `No parts in hand make ${asked(need)}; the LV arm shown is to be bought.`,
+  });
 
 const noParts = (need: LvNeed): Finding =>
-  finding(
-    "lvArm.parts",
-    "stop",
-    "parts for the LV arm",
-    `No resistors and rheostat make ${show(need.nominal_ohm, "ohm")} in two or three branches within their limits.`,
-  );
+  found("lvArm.parts", "stop", "parts for the LV arm", {
+    unit: "ohm",
+    reason: `No resistors and rheostat make ${show(need.nominal_ohm, "ohm")} in two or three branches within their limits.`,
+  });

@@ -20,7 +20,9 @@ export function lvResistorFamilies(pool: Pool): readonly ResistorFamily[] {
 }
 
 const fineness: readonly SeriesName[] = ["E3", "E6", "E12", "E24", "E48", "E96", "E192"];
-const coarser = (a: SeriesName, b: SeriesName): SeriesName => (fineness.indexOf(a) < fineness.indexOf(b) ? a : b);
+/** The coarser of two series. */
+export const coarser = (a: SeriesName, b: SeriesName): SeriesName =>
+  fineness.indexOf(a) < fineness.indexOf(b) ? a : b;
 
 /** Values of a family from `least` to `greatest`, Ω, ascending: of the wanted series, or of a coarser one where no finer is sold. */
 export function lvValues(family: ResistorFamily, series: SeriesName, least: number, greatest: number): number[] {

@@ -1,4 +1,9 @@
+import { strayFormulas } from "../checks/columnStrays.ts";
+import { capacitanceOf } from "../checks/lvArm.ts";
+import type { ResistorFamily } from "../job/part.ts";
 import { candidateFormulas } from "./candidateFormulas.ts";
+import { pitchWith } from "./compensation.ts";
+import { bodyRule, compensationFormulas, lvCapacitanceRecord, strayRule } from "./compensationFormulas.ts";
 import type { Limits } from "./kind.ts";
 import { lvSolutionFormulas } from "./lvSolution.ts";
 import type { Candidate } from "./outcome.ts";
@@ -12,6 +17,7 @@ export function recordCandidate(limits: Limits, candidate: Candidate): Candidate
   givens(limits, candidate, at);
   string(limits, at);
   lvArm(limits, at);
+  capacitors(limits, candidate, at);
   return {
     ...candidate,
     hvArmResistance_ohm: figure("hvArmResistance_ohm"),
@@ -35,10 +41,22 @@ function givens(limits: Limits, candidate: Candidate, at: string): void {
   sheet.given(`${at}/part/tolerance`, family.tolerance);
   sheet.given(`${at}/part/temperatureCoefficient_per_K`, family.temperatureCoefficient_per_K);
   sheet.given(`${at}/part/voltageCoefficient_per_V`, family.voltageCoefficient_per_V);
-  sheet.given(`${at}/part/pitch_m`, candidate.design.geometry.pitch_m);
+  sheet.given(`${at}/part/pitch_m`, pitchOf(candidate, family, sheet.number("insulation.column_m") ?? 0));
   sheet.given("/brief/source/resistance_ohm", brief.source.resistance_ohm);
   sheet.given("/brief/surroundings/ambientSpan_K", brief.surroundings.ambientSpan_K);
   sheet.given(`/instruments/${limits.ask.at}/resistanceSpread`, limits.ask.j.instrument.resistanceSpread);
+}
+
+/** Pitch without stretching, m; the stretched one where the column is as long as it is wide. */
+function pitchOf(
+  { design, parts, elements, columnLength_m }: Candidate,
+  family: ResistorFamily,
+  need_m: number,
+): number {
+  const capacitor = parts.find((part) => part.id === design.hvArm.elements[0]?.capacitor);
+  const own = family.bodyLength_m + family.leadSpace_m;
+  const pitch = capacitor === undefined ? own : pitchWith(own, capacitor.bodyLength_m);
+  return Math.max(elements * pitch, need_m) === columnLength_m ? pitch : design.geometry.pitch_m;
 }
 
 function string({ ask }: Limits, at: string): void {
@@ -78,4 +96,34 @@ function lvArm({ ask }: Limits, at: string): void {
   sheet.derive(`${at}.lvArmWanted_ohm`, f.nominal, nominal);
   sheet.derive(`${at}.lvArmLeast_ohm`, f.least, ends);
   sheet.derive(`${at}.lvArmGreatest_ohm`, f.greatest, ends);
+}
+
+/** The capacitor across each element with what it had to be, and the LV capacitance that matches it. */
+function capacitors({ ask }: Limits, { design, parts, family }: Candidate, at: string): void {
+  const { sheet } = ask.j;
+  const element = design.hvArm.elements[0];
+  const resistor = parts.find((part) => part.id === family) as ResistorFamily;
+  if (element === undefined || element.capacitor === null) return;
+  const given = (key: string, value: number): string => {
+    sheet.given(`${at}${key}`, value);
+    return `${at}${key}`;
+  };
+  sheet.given(`${at}.elementCapacitor_F`, element.capacitance_F);
+  const Ce = `${at}.strayToEarth_F`;
+  sheet.derive(Ce, strayFormulas.toEarth, {
+    l: `${at}.columnLength_m`,
+    d: given("/geometry/columnDiameter_m", design.geometry.columnDiameter_m),
+    h: given("/geometry/footHeight_m", design.geometry.footHeight_m),
+  });
+  sheet.derive(`${at}.elementCapacitorLeast_F`, compensationFormulas.elementCapacitor, {
+    ks: given(".strayRule", strayRule),
+    kb: given(".bodyRule", bodyRule),
+    Ce,
+    n: `${at}.elements`,
+    p: `${at}.strings`,
+    Cb: given("/part/selfCapacitance_F", resistor.selfCapacitance_F),
+  });
+  if (design.lvArm.capacitanceBy === "none") return;
+  const fitted = design.lvArm.branches.reduce((sum, branch) => sum + capacitanceOf(branch), 0);
+  sheet.solved(`${at}.lvCapacitance_F`, lvCapacitanceRecord, fitted, { Ce, C: `${at}.elementCapacitor_F` }, 0);
 }

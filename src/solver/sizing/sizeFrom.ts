@@ -3,12 +3,13 @@ import type { Part, ResistorFamily } from "../job/part.ts";
 import { ok, type Result, refuse } from "../quantities/result.ts";
 import { bandTop } from "./bandLimit.ts";
 import { type Drafted, drafted } from "./candidate.ts";
+import { alwaysCompensated, capacitorPeak } from "./compensation.ts";
 import { footHeightOf } from "./geometry.ts";
 import { kindOf, type Limits, mostElements } from "./kind.ts";
 import { combinations, whyBehind, whyNone } from "./lost.ts";
 import type { Candidate, LostFamily, Sizing } from "./outcome.ts";
 import { linesOf, pick } from "./pick.ts";
-import { poolOf, refusedFamily } from "./pool.ts";
+import { type Pool, poolOf, refusedFamily } from "./pool.ts";
 import { recordCandidate } from "./record.ts";
 import { resistanceWindow, type WindowFound, windowOf } from "./resistanceWindow.ts";
 
@@ -20,11 +21,11 @@ export function sizeFrom(document: DividerDocument, parts: readonly Part[], top:
   if (!windowed.ok) return windowed;
   const found = windowed.value;
   const window = resistanceWindow(document, pool, found);
-  const limits = limitsOf(document, found);
+  const limits = limitsOf(document, found, pool);
   const refused = pool.resistors.flatMap((family) => refusedFamily(family) ?? []);
   const families = pool.resistors.filter((family) => refusedFamily(family) === null);
   if (!window.open) return ok(closed(window, refused, families, found));
-  const kinds = families.map((family) => kindOf(family, limits));
+  const kinds = families.map((family) => kindOf(family, limits, pool));
   const picked = pick(linesOf(kinds, limits), limits, Math.max(1, Math.floor(top)));
   const drafts = stopsLast(picked.builds.map((build) => drafted(build, limits, pool)));
   const candidates = drafts.map((draft, i): Candidate => recordCandidate(limits, { rank: i + 1, ...draft }));
@@ -41,9 +42,11 @@ export function sizeFrom(document: DividerDocument, parts: readonly Part[], top:
   return ok({ window, candidates, lost: [...lost, ...refused], considered, sheet: found.ask.j.sheet.data() });
 }
 
-function limitsOf(document: DividerDocument, { ask, need, least, greatest }: WindowFound): Limits {
+function limitsOf(document: DividerDocument, { ask, need, least, greatest }: WindowFound, pool: Pool): Limits {
   const { policy } = document.brief;
+  const capacitor_V = alwaysCompensated(ask) ? capacitorPeak(pool, policy.voltageDerating) : 0;
   return {
+    capacitor_V: capacitor_V > 0 ? capacitor_V : Number.POSITIVE_INFINITY,
     ask,
     need,
     least_ohm: least?.resistance_ohm ?? 0,
