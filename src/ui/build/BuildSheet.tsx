@@ -1,5 +1,12 @@
 import { useMemo } from "react";
-import { type DividerDocument, type PartsList, type Proof, partsList, partsListCsv } from "../../solver/index.ts";
+import {
+  cautions,
+  type DividerDocument,
+  type PartsList,
+  type Proof,
+  partsList,
+  partsListCsv,
+} from "../../solver/index.ts";
 import { download } from "../charts/download.ts";
 import { Cautions } from "../prove/Cautions.tsx";
 import { PartsTable } from "./PartsTable.tsx";
@@ -18,7 +25,7 @@ export function BuildSheet({ document, proof }: Props) {
   const list = useMemo(() => partsList(document), [document]);
   return (
     <>
-      {proof === null ? null : <Cautions cautions={proof.cautions} screen="build" />}
+      <Cautions cautions={cautions} screen="build" />
       <section className="sheet-section" aria-labelledby="parts-heading">
         <h2 id="parts-heading">parts list</h2>
         {list.ok ? <Listed list={list.value} name={document.name} proof={proof} /> : <Refused {...list.error} />}

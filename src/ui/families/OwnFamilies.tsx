@@ -3,7 +3,6 @@ import type { DividerDocument, Part } from "../../solver/index.ts";
 import { freeId } from "./draftFamily.ts";
 import { FamilyForm } from "./FamilyForm.tsx";
 import { FamilyTable, type OwnFamily } from "./FamilyTable.tsx";
-import { ImportFamilies } from "./ImportFamilies.tsx";
 import "./families.css";
 
 export interface FamilyActions {
@@ -38,10 +37,6 @@ export function OwnFamilies({ document, actions }: Props) {
       <details className="table-on-request">
         <summary>add a family</summary>
         <FamilyForm idFor={idFor} onAdd={actions.onAddFamily} />
-      </details>
-      <details className="table-on-request">
-        <summary>families from a CSV file</summary>
-        <ImportFamilies parts={parts} onAdd={actions.onAddFamily} />
       </details>
     </section>
   );

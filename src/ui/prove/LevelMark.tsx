@@ -1,4 +1,5 @@
 import type { Level } from "../../solver/index.ts";
+import "./level.css";
 
 /** Clear is a filled circle, caution a triangle, stop an octagon; always with its word beside it or in its place. */
 export function LevelMark({ level, word = true }: { readonly level: Level; readonly word?: boolean }) {
