@@ -1,8 +1,9 @@
 import { StrictMode, useMemo, useState } from "react";
 import { createRoot } from "react-dom/client";
 import "./harness.css";
-import { type Candidate, prove, size, takeCandidate } from "../../../src/solver/index.ts";
+import { type Candidate, type Part, prove, size, takeCandidate } from "../../../src/solver/index.ts";
 import { BuildSheet } from "../../../src/ui/build/BuildSheet.tsx";
+import { OwnFamilies } from "../../../src/ui/families/OwnFamilies.tsx";
 import { ProveSheet } from "../../../src/ui/prove/ProveSheet.tsx";
 import { SizeSheet } from "../../../src/ui/size/SizeSheet.tsx";
 import { inventedDocument } from "../inventedDocument.ts";
@@ -43,10 +44,24 @@ function Real() {
   );
 }
 
+function Families() {
+  const [document, setDocument] = useState(inventedDocument);
+  const families = {
+    onInHandOnly: console.log,
+    onAddFamily: (part: Part) => {
+      setDocument({ ...document, parts: [...document.parts, part] });
+      return null;
+    },
+    onRemoveFamily: (i: number) => setDocument({ ...document, parts: document.parts.filter((_, k) => k !== i) }),
+  };
+  return <OwnFamilies document={document} actions={families} />;
+}
+
 const screens: Record<string, () => React.ReactNode> = {
   "#size": () => <Size shut={false} />,
   "#shut": () => <Size shut />,
   "#prove": () => <ProveSheet document={inventedDocument} proof={inventedProof} actions={actions} />,
+  "#families": () => <Families />,
   "#real": () => <Real />,
   "#build": () => <BuildSheet document={inventedDocument} proof={inventedProof} />,
 };
