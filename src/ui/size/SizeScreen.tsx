@@ -1,4 +1,5 @@
 import { useMemo } from "react";
+import type { Cure, Edit, Origin, Part } from "../../solver/index.ts";
 import { type FamilyActions, OwnFamilies } from "../families/OwnFamilies.tsx";
 import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
@@ -38,26 +39,29 @@ function useSizeActions(): SizeActions {
 }
 
 function useFamilyActions(): FamilyActions {
-  const session = useSession();
   const apply = useApply();
   return useMemo(
     () => ({
       onInHandOnly: (only) =>
         void apply((store) => store.editAt("/brief/policy/partsInHandOnly", only, { step: "parts in hand only" })),
       onAddFamily: (part, assumed) => {
-        const index = session.store.getState().document.parts.length;
-        const done = apply((store) => store.editAt("/parts/-", part, { step: `family ${part.name}` }));
-        if (!done.ok) return `${done.error.why} ${done.error.cure}`;
-        for (const key of assumed) {
-          const value = part[key as keyof typeof part];
-          apply((store) => store.editAt(`/parts/${index}/${key}`, value, { step: "stand-in", origin: "assumed" }));
-        }
-        return null;
+        const done = apply((store) => store.applyCure(addition(part, assumed, store.document.parts.length)));
+        return done.ok ? null : `${done.error.why} ${done.error.cure}`;
       },
       onRemoveFamily: (index) => void apply((store) => store.removeAt(`/parts/${index}`, "take out a family")),
     }),
-    [session, apply],
+    [apply],
   );
+}
+
+/** A family and the origins of its stand-ins as one step. */
+function addition(part: Part, assumed: readonly string[], index: number): Cure {
+  const values: Readonly<Record<string, unknown>> = { ...part };
+  const edits: (Edit & { readonly origin?: Origin })[] = [
+    { pointer: "/parts/-", value: part },
+    ...assumed.map((key) => ({ pointer: `/parts/${index}/${key}`, value: values[key], origin: "assumed" as const })),
+  ];
+  return { label: `family ${part.name}`, edits };
 }
 
 export default SizeScreen;
