@@ -3,6 +3,7 @@ export * from "./build/partsList.ts";
 export * from "./build/partsListCsv.ts";
 export type { FaultRow } from "./checks/faults.ts";
 export type { InstrumentRow } from "./checks/instruments.ts";
+export { plainPointer } from "./checks/judging.ts";
 export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";
 export type * from "./job/brief.ts";
 export type * from "./job/design.ts";

@@ -1,0 +1,137 @@
+import { createContext, useContext } from "react";
+import { useStore } from "zustand";
+import { createStore, type StoreApi } from "zustand/vanilla";
+import type { DividerDocument, Proof, Refusal, Sizing } from "../../solver/index.ts";
+import type { Keeper } from "../../store/keeper.ts";
+import type { Store } from "../../store/state.ts";
+import type { DividerStore } from "../../store/store.ts";
+import type { Runner } from "../../work/runner.ts";
+
+/** The last answer of the solver. While a newer one is awaited it stands, marked as stale, never mixed with new inputs. */
+export interface Judged {
+  readonly document: DividerDocument | null;
+  readonly sizing: Sizing | null;
+  readonly proof: Proof | null;
+  readonly refusal: Refusal | null;
+  readonly stale: boolean;
+  /** Time the worker took for it, ms. */
+  readonly took_ms: number;
+}
+
+export type ScreenName = "ask" | "route" | "size" | "prove" | "build" | "calibrate" | "use";
+
+/** What the page looks at: nothing of it is saved. */
+export interface Looking {
+  readonly screen: ScreenName;
+  /** Selected element, 1 next to the tap; null: none. */
+  readonly element: number | null;
+  readonly why: WhyAsked | null;
+  readonly notice: Notice | null;
+  readonly offline: boolean;
+}
+
+export interface WhyAsked {
+  readonly path: string;
+  readonly index: number | null;
+  readonly from: "proof" | "sizing";
+  readonly left: number;
+  readonly top: number;
+}
+
+export interface Notice {
+  readonly text: string;
+  readonly bad: boolean;
+  readonly details?: readonly string[];
+}
+
+export interface Session {
+  readonly store: DividerStore;
+  readonly judged: StoreApi<Judged>;
+  readonly looking: StoreApi<Looking>;
+  readonly runner: Runner;
+  /** null until the browser copy is open, or where there is none. */
+  keeper: Keeper | null;
+}
+
+export const SessionContext = createContext<Session | null>(null);
+
+export function useSession(): Session {
+  const session = useContext(SessionContext);
+  if (session === null) throw new Error("outside of a session");
+  return session;
+}
+
+export const useInputs = <T>(pick: (state: Store) => T): T => useStore(useSession().store, pick);
+export const useDocument = (): DividerDocument => useInputs((state) => state.document);
+export const useJudged = <T>(pick: (state: Judged) => T): T => useStore(useSession().judged, pick);
+export const useLooking = <T>(pick: (state: Looking) => T): T => useStore(useSession().looking, pick);
+
+const candidatesAsked = 60;
+
+/** Asks for the outcome of every new document; the design chosen while it follows the brief is taken over into the document. */
+export function judgeEveryChange(session: Session): () => void {
+  const { store, judged, runner } = session;
+  let settled: DividerDocument | null = null;
+  let searched: DividerDocument | null = null;
+  const search = (document: DividerDocument) => {
+    searched = document;
+    runner.long.ask({ kind: "size", document, top: candidatesAsked }, (answer) => {
+      if (answer.kind === "done") judged.setState({ sizing: answer.outcome.sizing });
+    });
+  };
+  const ask = (document: DividerDocument) => {
+    if (document === settled) return;
+    judged.setState({ stale: true });
+    runner.check.ask({ kind: "follow", document, top: candidatesAsked }, (answer) => {
+      if (answer.kind === "refused") {
+        judged.setState({ document, refusal: answer.refusal, stale: false, proof: null });
+        return;
+      }
+      if (answer.kind !== "done") return;
+      const { outcome } = answer;
+      const sizing = outcome.sizing ?? judged.getState().sizing;
+      judged.setState({ ...outcome, sizing, refusal: null, stale: false, took_ms: answer.took_ms });
+      if (outcome.sizing !== null) searched = document;
+      else if (!sameQuestion(searched, document)) search(document);
+      store.getState().adopt(document, outcome.document);
+      settled = store.getState().document;
+      judged.setState({ document: settled });
+    });
+  };
+  ask(store.getState().document);
+  return store.subscribe((now, before) => {
+    if (now.document !== before.document) queueMicrotask(() => ask(store.getState().document));
+  });
+}
+
+/** Whether a search would find the same: the brief, the instruments and who reads. */
+const sameQuestion = (a: DividerDocument | null, b: DividerDocument): boolean =>
+  a !== null && a.brief === b.brief && a.instruments === b.instruments && a.principal === b.principal;
+
+export const newJudged = (): StoreApi<Judged> =>
+  createStore<Judged>()(() => ({
+    document: null,
+    sizing: null,
+    proof: null,
+    refusal: null,
+    stale: true,
+    took_ms: 0,
+  }));
+
+export const newLooking = (): StoreApi<Looking> =>
+  createStore<Looking>()(() => ({ screen: "ask", element: null, why: null, notice: null, offline: false }));
+
+/** Opens the why of a figure beside the number that was pressed. */
+export function openWhy(
+  session: Session,
+  path: string,
+  index: number | null = null,
+  from: WhyAsked["from"] = "proof",
+): void {
+  const box = document.activeElement?.getBoundingClientRect();
+  const width = 440;
+  const left = Math.max(8, Math.min(box?.left ?? 80, window.innerWidth - width - 8)) + window.scrollX;
+  const below = (box?.bottom ?? 80) + 6;
+  const top = (below > window.innerHeight * 0.6 ? Math.max(8, (box?.top ?? 0) - 360) : below) + window.scrollY;
+  session.looking.setState({ why: { path, index, from, left, top } });
+}
