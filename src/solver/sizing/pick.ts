@@ -115,9 +115,12 @@ class Walk {
     const ids = [...new Set(this.lines.map((line) => line.kind.family.id))];
     const best = ids.flatMap((id) => this.bestClear.get(id) ?? this.bestStopped.get(id) ?? []).sort(order);
     const listed = new Set(best.slice(0, this.top));
+    const names = new Set([...listed].map(nameOf));
     for (const build of [...this.clear, ...this.stopped]) {
       if (listed.size >= this.top) break;
-      if (![...listed].some((each) => same(each, build))) listed.add(build);
+      if (names.has(nameOf(build))) continue;
+      names.add(nameOf(build));
+      listed.add(build);
     }
     const families = new Set([...listed].map((build) => build.kind.family.id));
     const behind = new Map<string, { best: Build; dominator: Build | null }>();
@@ -131,4 +134,4 @@ class Walk {
   }
 }
 
-const same = (a: Build, b: Build): boolean => a.kind === b.kind && a.strings === b.strings && a.elements === b.elements;
+const nameOf = (build: Build): string => `${build.elements} ${build.strings} ${build.kind.family.id}`;
