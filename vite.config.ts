@@ -1,5 +1,5 @@
 import { createHash } from "node:crypto";
-import { readFileSync } from "node:fs";
+import { readdirSync, readFileSync } from "node:fs";
 import react from "@vitejs/plugin-react";
 import type { Plugin } from "vite";
 import { configDefaults, defineConfig } from "vitest/config";
@@ -25,11 +25,18 @@ const offline: Plugin = {
   name: "offline",
   apply: "build",
   generateBundle(_, bundle) {
-    const files = Object.keys(bundle).filter((name) => !name.endsWith(".map"));
+    const shipped = readdirSync(new URL("./public", import.meta.url)).filter((name) => !name.endsWith(".json"));
+    const files = [...Object.keys(bundle).filter((name) => !name.endsWith(".map")), ...shipped];
     const hash = createHash("sha256");
     for (const name of files.sort()) {
-      const item = bundle[name]!;
-      hash.update(name).update(item.type === "chunk" ? item.code : item.source);
+      const item = bundle[name];
+      const body =
+        item === undefined
+          ? readFileSync(new URL(`./public/${name}`, import.meta.url))
+          : item.type === "chunk"
+            ? item.code
+            : item.source;
+      hash.update(name).update(body);
     }
     const source = readFileSync(new URL("./src/start/offline.js", import.meta.url), "utf8")
       .replace("__FILES__", JSON.stringify(["./", ...files.filter((f) => f !== "index.html")]))

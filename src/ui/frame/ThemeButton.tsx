@@ -21,7 +21,7 @@ export function ThemeButton() {
   return (
     <button
       type="button"
-      aria-label={`theme: ${theme}`}
+      title="light, dark, or as the system has it"
       onClick={() => {
         const chosen = next[theme];
         localStorage.setItem("theme", chosen);

@@ -13,12 +13,15 @@ export function Why() {
   const box = useRef<HTMLElement>(null);
   const back = useRef<Element | null>(null);
   const open = asked !== null;
+  const path = asked?.path;
   useEffect(() => {
     if (!open) return;
     back.current = document.activeElement;
-    box.current?.focus();
     return () => (back.current as HTMLElement | null)?.focus?.();
   }, [open]);
+  useEffect(() => {
+    if (path !== undefined) box.current?.focus();
+  }, [path]);
   if (asked === null) return null;
   const sheet = asked.from === "sizing" ? sizing?.sheet : proof?.sheet;
   const close = () => session.looking.setState({ why: null });
