@@ -22,7 +22,11 @@ export type Drafted = Omit<Candidate, "rank">;
 export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
   const { ask } = limits;
   const { family } = build.kind;
-  const findings: Finding[] = [...insulationFindings(limits), ...uncertaintyFindings(build, limits)];
+  const findings: Finding[] = [
+    ...inputFindings(limits),
+    ...insulationFindings(limits),
+    ...uncertaintyFindings(build, limits),
+  ];
   const need = lvNeedOf(ask, build.hvArm_ohm, family.tolerance);
   const lv = need.ok ? lvResistors(ask, pool, build.hvArm_ohm, need.value) : null;
   if (!need.ok)
@@ -100,6 +104,28 @@ function differentParts({ hvArm, lvArm }: Design): number {
 
 const protectorParts = ({ ask }: Limits): Part[] =>
   ask.j.design.protectors.flatMap((fitted) => ask.j.parts.get(fitted.part) ?? []);
+
+/** What the instrument sees at the greatest peak, whatever the string: a larger scale factor is the only cure. */
+function inputFindings({ ask }: Limits): Finding[] {
+  const { instrument, document } = ask.j;
+  const { scaleFactor } = document.brief;
+  const seen = ask.working.greatest_Vpeak / scaleFactor;
+  if (seen <= instrument.greatestInput_Vpeak) return [];
+  return [
+    found("instrument.input", "stop", "voltage at the instrument", {
+      actual: seen,
+      limit: instrument.greatestInput_Vpeak,
+      unit: "V",
+      sense: "atMost",
+      reason: `${instrument.name} would see ${show(seen, "V")} at the greatest peak and may see ${show(instrument.greatestInput_Vpeak, "V")}.`,
+      cure: {
+        label: "ten times the scale factor",
+        edits: [{ pointer: "/brief/scaleFactor", value: scaleFactor * 10 }],
+        sizeAgain: true,
+      },
+    }),
+  ];
+}
 
 /** Capacitors make a column longer than the search knew: it may pass the longest accepted. */
 function lengthFindings({ geometry }: Design, limits: Limits): Finding[] {

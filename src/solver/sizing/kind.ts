@@ -24,8 +24,10 @@ export interface Limits {
   /** Infinity: no bound. */
   readonly length_m: number;
   readonly handOnly: boolean;
-  /** Strings without capacitors that have a band to carry: each candidate's own stray bounds its R1. */
-  readonly bare: boolean;
+  /** Element peak above which a string goes without capacitors and its own stray bounds its R1; Infinity: never, 0: always. */
+  readonly bareAbove_V: number;
+  /** Least elements so that one shorted leaves the instrument within its greatest input. */
+  readonly faultCount: number;
   readonly footHeight_m: number;
   /** Voltage of one of n elements per volt at the electrode, times n: R1 / (R1 + R2p). */
   readonly share: number;
@@ -46,7 +48,7 @@ export interface Kind {
   readonly pitch_m: number;
   /** Least elements in series by voltage and by the path along one body; over 5000 where none suffices. */
   readonly leastCount: number;
-  readonly leastBy: "voltage" | "creepage" | "capacitor";
+  readonly leastBy: "voltage" | "creepage" | "capacitor" | "fault";
   /** Greatest R1, Ω: the window's, or where a trim that can be bought no longer makes up for the family's tolerance. */
   readonly greatest_ohm: number;
   readonly greatestBy: "window" | "trim";
@@ -57,7 +59,6 @@ export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind
   const { working } = limits.ask;
   const rms_V = policy.voltageDerating * (family.limitingVoltage_V as number);
   const peak_V = rms_V * (waveform.kind === "sine" ? Math.SQRT2 : 1);
-  const capacitor = up((working.greatest_Vpeak * limits.share) / limits.capacitor_V);
   const allowed = stressFormulas.dissipationRating.compute({
     P: family.ratedDissipation_W,
     Tr: family.deratingFrom_degC,
@@ -69,8 +70,14 @@ export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind
     up((working.greatestRms_V * limits.share) / rms_V),
     up((working.greatest_Vpeak * limits.share) / peak_V),
   );
+  const least = {
+    voltage,
+    creepage: countByBody(family.bodyLength_m, limits),
+    capacitor: up((working.greatest_Vpeak * limits.share) / limits.capacitor_V),
+    fault: limits.faultCount,
+  };
+  const leastCount = Math.max(...Object.values(least));
   const trim = trimReach(limits.ask, pool, family.tolerance);
-  const creepage = countByBody(family.bodyLength_m, limits);
   return {
     family,
     offers: offers(family, limits.handOnly),
@@ -78,14 +85,24 @@ export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind
     peak_V,
     dissipation_W: policy.powerDerating * allowed,
     pitch_m: family.bodyLength_m + family.leadSpace_m,
-    leastCount: Math.max(voltage, creepage, capacitor),
-    leastBy: capacitor > Math.max(creepage, voltage) ? "capacitor" : creepage > voltage ? "creepage" : "voltage",
+    leastCount,
+    leastBy: (Object.keys(least) as (keyof typeof least)[]).find((key) => least[key] === leastCount)!,
     greatest_ohm: Math.min(limits.greatest_ohm, trim),
     greatestBy: trim < limits.greatest_ohm ? "trim" : "window",
   };
 }
 
 const up = (x: number): number => Math.ceil(x * (1 - 1e-12));
+
+/**
+ * Least elements so that one of them shorted leaves the instrument within its greatest input: the scale factor then falls to
+ * 1 + (F − 1)(n − 1)/n. 1 where the voltage itself is within it; also where the reading is above it anyway, which no count cures.
+ */
+export function countByFault({ j, working, tapScaleFactor, seriesProtector_ohm }: Asking): number {
+  const atTap = j.instrument.greatestInput_Vpeak * (1 + seriesProtector_ohm / j.instrument.resistance_ohm);
+  const share = (working.greatest_Vpeak / atTap - 1) / (tapScaleFactor - 1);
+  return share <= 0 || share >= 1 ? 1 : up(1 / (1 - share));
+}
 
 /** Body length that one of n equal elements needs, m; the same for every family, so it is looked up once. */
 export function bodyNeeded(n: number, { ask, need, share, bodies_m }: Limits): number {

@@ -45,6 +45,7 @@ export class Line {
   private readonly blockMost: Float64Array;
   private filled: number;
   private at: number;
+  private bare = false;
 
   constructor(kind: Kind, strings: number, limits: Limits) {
     this.kind = kind;
@@ -177,8 +178,12 @@ export class Line {
     const { offers } = kind;
     this.uncertain[n - this.first] = this.uncertainty(n);
     if (this.length(n) > limits.length_m * (1 + 1e-12)) return;
-    const bound = limits.bare ? bandBound(kind, this.length(n), strings, limits) : Number.POSITIVE_INFINITY;
+    const bare = (limits.ask.working.greatest_Vpeak * limits.share) / n > limits.bareAbove_V;
+    const bound = bare ? bandBound(kind, this.length(n), strings, limits) : Number.POSITIVE_INFINITY;
     const greatest = Math.min(kind.greatest_ohm, bound);
+    // From the count on at which capacitors carry the band, larger values are allowed again.
+    if (this.bare && !bare) this.at = offers.length - 1;
+    this.bare = bare;
     // The largest value allowed falls as n rises, so the search goes on from where it stood.
     while (this.at >= 0 && (n * offers[this.at]!.value) / strings > greatest) this.at--;
     let at = this.at;

@@ -71,6 +71,7 @@ export function whyNone(kind: Kind, limits: Limits): Reason {
   if (kind.dissipation_W <= 0) return noDissipation(kind, limits);
   const wanted = asWanted(kind, limits);
   const without = (lifted: Partial<Asked>) => ranges(kind, limits, { ...wanted, ...lifted });
+  if (ranges(kind, limits, wanted).length > 0) return outOfBand(limits);
   const long = without({ length_m: Number.POSITIVE_INFINITY });
   if (long.length > 0) return tooLong(kind, limits, long);
   const high = without({ greatest_ohm: Number.POSITIVE_INFINITY });
@@ -81,7 +82,6 @@ export function whyNone(kind: Kind, limits: Limits): Reason {
   if (hot.length > 0) return tooHot(kind, limits, hot);
   const hand = without({ inHand: false });
   if (hand.length > 0) return tooFew(kind, hand);
-  if (ranges(kind, limits, wanted).length > 0) return outOfBand(limits);
   return severalAtOnce(kind, limits);
 }
 
@@ -91,10 +91,16 @@ const governs: Record<Kind["leastBy"], string> = {
   voltage: "by its limiting voltage",
   creepage: "by creepage along its body",
   capacitor: "by the rating of the capacitor across each",
+  fault: "by what one shorted element would put on the instrument",
 };
 
 function tooMany(kind: Kind, limits: Limits): Reason {
   const { greatestRms_V, greatest_Vpeak } = limits.ask.working;
+  if (kind.leastBy === "fault") {
+    const { greatestInput_Vpeak } = limits.ask.j.instrument;
+    const reason = `${kind.leastCount} in series would be needed ${governs.fault}, which may see ${show(greatestInput_Vpeak, "V")}; ${mostElements} is the most.`;
+    return { reason, actual: kind.leastCount, limit: mostElements, unit: "1" };
+  }
   if (kind.leastBy === "creepage") {
     const reason = `Its body of ${show(kind.family.bodyLength_m, "m")} is too short for creepage even with ${mostElements} in series.`;
     return { reason, actual: kind.family.bodyLength_m, limit: null, unit: "m" };

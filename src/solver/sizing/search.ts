@@ -3,7 +3,7 @@ import { ok, type Result } from "../quantities/result.ts";
 import { bandTop } from "./bandLimit.ts";
 import { alwaysCompensated, capacitorPeak } from "./compensation.ts";
 import { footHeightOf } from "./geometry.ts";
-import { type Kind, kindOf, type Limits, mostElements } from "./kind.ts";
+import { countByFault, type Kind, kindOf, type Limits, mostElements } from "./kind.ts";
 import { linesOf, type Picked, pick } from "./pick.ts";
 import { type Pool, refusedFamily } from "./pool.ts";
 import { isOpen, type WindowFound, windowOf } from "./resistanceWindow.ts";
@@ -31,16 +31,19 @@ export function search(document: DividerDocument, pool: Pool, top: number): Resu
 
 function limitsOf(document: DividerDocument, { ask, need, least, greatest }: WindowFound, pool: Pool): Limits {
   const { policy } = document.brief;
-  const capacitor_V = alwaysCompensated(ask) ? capacitorPeak(pool, policy.voltageDerating) : 0;
+  const capacitor_V = capacitorPeak(pool, policy.voltageDerating);
+  const always = alwaysCompensated(ask);
   return {
-    capacitor_V: capacitor_V > 0 ? capacitor_V : Number.POSITIVE_INFINITY,
     ask,
     need,
     least_ohm: least?.resistance_ohm ?? 0,
     greatest_ohm: greatest?.resistance_ohm ?? Number.POSITIVE_INFINITY,
     length_m: policy.greatestLength_m ?? Number.POSITIVE_INFINITY,
     handOnly: policy.partsInHandOnly,
-    bare: policy.compensation === "never" && bandTop(ask) > 0,
+    capacitor_V: always && capacitor_V > 0 ? capacitor_V : Number.POSITIVE_INFINITY,
+    bareAbove_V:
+      always || bandTop(ask) === 0 ? Number.POSITIVE_INFINITY : policy.compensation === "never" ? 0 : capacitor_V,
+    faultCount: countByFault(ask),
     footHeight_m: footHeightOf(document),
     share: 1 / (1 + 1 / (ask.tapScaleFactor - 1)),
     bodies_m: new Float64Array(mostElements + 1),

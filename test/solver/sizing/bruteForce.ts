@@ -5,6 +5,7 @@ import { airDensityAtAltitude } from "../../../src/solver/standards/airDensity.t
 import { altitudeFactor, steadyClearance } from "../../../src/solver/standards/clearance.ts";
 import { creepage } from "../../../src/solver/standards/creepage.ts";
 import { preferredBetween } from "../../../src/solver/standards/preferred.ts";
+import { verticalCylinderCapacitance } from "../../../src/solver/standards/strayCapacitance.ts";
 
 /** One combination with its figures, all to be small but the margin. */
 export interface Plain {
@@ -23,7 +24,7 @@ export interface Voltages {
 
 /**
  * Every family, value, 1 to 4 strings and 1 to 5000 elements, one by one, each limit as it is stated in words: written apart
- * from the search, without bounds, order or shortcuts. A window is taken as given.
+ * from the search, without bounds, order or shortcuts. A window is taken as given; no capacitor is to be had.
  */
 export function everyBuild(
   document: DividerDocument,
@@ -61,6 +62,13 @@ export function everyBuild(
           const length = Math.max(n * (each.bodyLength_m + each.leadSpace_m), column, wide[p]!);
           if (rms > rmsLimit || peak > peakLimit || heat > P || body > each.bodyLength_m) continue;
           if (policy.greatestLength_m !== null && length > policy.greatestLength_m) continue;
+          if (V.greatest / (1 + ((brief.scaleFactor - 1) * (n - 1)) / n) > document.instruments[0]!.greatestInput_Vpeak)
+            continue;
+          if (brief.waveform.kind === "sine") {
+            const stray = verticalCylinderCapacitance(metre(length), metre(wide[p]!), metre(0.12));
+            const x = 2 * Math.PI * brief.waveform.frequency_Hz! * R1 * stray;
+            if ((x * x) / 180 > Math.min(brief.wantedUncertainty / 5, 1.5 ** 2 / 180)) continue;
+          }
           const t = each.tolerance;
           const drift = surroundings.ambientSpan_K * each.temperatureCoefficient_per_K;
           const effect = (each.voltageCoefficient_per_V * V.peak * fraction) / n;
