@@ -4,7 +4,7 @@ import { plainText, signed, withUnit } from "./axisText.ts";
 import { ChartFrame } from "./ChartFrame.tsx";
 import { Choice } from "./Choice.tsx";
 import type { Column } from "./columns.ts";
-import { type MagnitudeView, magnitudeAxis, percentOf, phaseAxis } from "./frequencySeries.ts";
+import { type MagnitudeView, magnitudeAxis, percentOf, phaseAxis, unwrapped } from "./frequencySeries.ts";
 import type { Band, Mark } from "./LinePlot.tsx";
 import { LinePlot } from "./lazyPlots.tsx";
 import { type Axis, logAxis } from "./logAxis.ts";
@@ -43,7 +43,7 @@ export function FrequencyChart(p: Props) {
     () => magnitudeAxis(view, response, p.tolerance, [low, high]),
     [view, response, p.tolerance, low, high],
   );
-  const phase = useMemo(() => phaseAxis(response.phase_deg), [response]);
+  const phase = useMemo(() => phaseAxis(series.phase), [series]);
   const bands = useMemo(() => toleranceBand(view, p.tolerance, [low, high]), [view, p.tolerance, low, high]);
   const marks = useMemo(
     () =>
@@ -88,7 +88,7 @@ function Panels({ width, response, series, cursor, y, phase, bands, marks, phase
   const upper = useMemo(() => plotBox(width, magnitudeHeight, 76), [width]);
   const lower = useMemo(() => plotBox(width, phaseHeight, 76), [width]);
   const ys = useMemo(() => [series.magnitude], [series]);
-  const phases = useMemo(() => [response.phase_deg], [response]);
+  const phases = useMemo(() => [series.phase], [series]);
   if (x === null || y === null || phase === null)
     return <p className="chart-note">Nothing to draw: no finite point.</p>;
   const xs = response.frequency_Hz;
@@ -124,11 +124,13 @@ function Panels({ width, response, series, cursor, y, phase, bands, marks, phase
 
 function seriesOf(response: FrequencyResponse, view: MagnitudeView) {
   const magnitude = view === "dB" ? response.magnitude_dB : response.magnitude_dB.map(percentOf);
+  const phase = unwrapped(response.phase_deg);
   const plain = { x: true, y: false };
   const upper = checkSeries(response.frequency_Hz, [{ ...magnitudeTrace[0], y: magnitude }], plain);
-  const lower = checkSeries(response.frequency_Hz, [{ ...phaseTrace[0], y: response.phase_deg }], plain);
+  const lower = checkSeries(response.frequency_Hz, [{ ...phaseTrace[0], y: phase }], plain);
   return {
     magnitude,
+    phase,
     left: Math.max(upper.left, lower.left),
     magnitudeRows: thinRows(upper.rows, ["magnitude"], 400),
     phaseRows: thinRows(lower.rows, ["phase"], 400),

@@ -45,3 +45,13 @@ export function phaseAxis(phase_deg: readonly number[]): Axis | null {
   const ticks = Array.from({ length: last - first + 1 }, (_, i) => (first + i) * step);
   return { kind: "linear", domain: [ticks[0]!, ticks[ticks.length - 1]!], ticks, minor: [] };
 }
+
+/** Phase without its jumps of a whole turn, so that a trace is one line. */
+export function unwrapped(phase_deg: readonly number[]): readonly number[] {
+  let turns = 0;
+  return phase_deg.map((phase, i) => {
+    const before = phase_deg[i - 1];
+    if (before !== undefined && Math.abs(phase - before) > 180) turns -= Math.sign(phase - before);
+    return phase + 360 * turns;
+  });
+}

@@ -8,10 +8,14 @@ interface Props {
   readonly onTake: (candidate: Candidate) => void;
 }
 
+const shownFirst = 12;
+
 /** Every candidate with the figures it is judged on; sorted by any of them. */
 export function CandidateTable({ candidates, chosen, onTake }: Props) {
   const [order, setOrder] = useState<Order>({ id: "rank", down: false });
-  const rows = useMemo(() => sorted(candidates, order), [candidates, order]);
+  const [all, setAll] = useState(false);
+  const inOrder = useMemo(() => sorted(candidates, order), [candidates, order]);
+  const rows = all ? inOrder : inOrder.filter((c, i) => i < shownFirst || c === chosen);
   const press = (column: CandidateColumn) =>
     setOrder((now) =>
       now.id === column.id ? { id: now.id, down: !now.down } : { id: column.id, down: column.greaterFirst ?? false },
@@ -46,6 +50,11 @@ export function CandidateTable({ candidates, chosen, onTake }: Props) {
           ))}
         </tbody>
       </table>
+      {candidates.length <= shownFirst ? null : (
+        <button type="button" className="quiet-button" aria-expanded={all} onClick={() => setAll(!all)}>
+          {all ? `only the first ${shownFirst}` : `all ${candidates.length} candidates`}
+        </button>
+      )}
     </section>
   );
 }

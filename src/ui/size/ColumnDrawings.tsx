@@ -13,9 +13,12 @@ interface Props {
 
 const drawn_px = 190;
 
-/** The best five side by side, to one scale, on one earth line. */
+/** The best five side by side, to one scale, on one earth line; and the one in the design, where it is not among them. */
 export function ColumnDrawings({ candidates, chosen, onTake }: Props) {
-  const best = useMemo(() => candidates.slice(0, 5), [candidates]);
+  const best = useMemo(() => {
+    const first = candidates.slice(0, 5);
+    return chosen === null || first.includes(chosen) ? first : [...first, chosen];
+  }, [candidates, chosen]);
   const sketches = useMemo(() => best.map(columnSketch), [best]);
   const tallest = Math.max(0.1, ...sketches.map((s) => s.height_m));
   const scale = drawn_px / tallest;
@@ -45,20 +48,14 @@ function Column({ sketch, scale }: { readonly sketch: ColumnSketch; readonly sca
   const up = (y_m: number) => drawn_px + 1 - y_m * scale;
   const middle = width / 2;
   const gap = Math.max(4, (sketch.bodies[0]?.diameter_m ?? 0.005) * scale * 1.6);
+  const boxHeight = Math.min(sketch.foot_m, 14 / scale);
   const offsets = Array.from({ length: sketch.strings }, (_, s) => (s - (sketch.strings - 1) / 2) * gap);
   return (
     <svg width={width} height={drawn_px + 4} aria-hidden="true" className="column-drawing">
       <line className="earth" x1={-60} x2={width + 60} y1={drawn_px + 2} y2={drawn_px + 2} />
-      <rect className="foot" x={middle - 12} width={24} y={up(sketch.foot_m)} height={sketch.foot_m * scale} />
+      <rect className="foot" x={middle - 12} width={24} y={up(boxHeight)} height={boxHeight * scale} />
       {offsets.map((dx) => (
-        <line
-          key={dx}
-          className="lead"
-          x1={middle + dx}
-          x2={middle + dx}
-          y1={up(sketch.foot_m)}
-          y2={up(sketch.top_m)}
-        />
+        <line key={dx} className="lead" x1={middle + dx} x2={middle + dx} y1={up(boxHeight)} y2={up(sketch.top_m)} />
       ))}
       {offsets.flatMap((dx) =>
         sketch.bodies.map((body) => {

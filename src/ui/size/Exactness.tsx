@@ -137,7 +137,7 @@ export function CapacitanceChoice({ sheet, lvArm, onWhy }: Props & { readonly lv
             <SheetFigure sheet={sheet} path="lvArm.capacitanceFitted_F" unit="F" onWhy={onWhy} />
           </td>
           <td />
-          <td className="reason">{lvArm.capacitanceBy === "none" ? "No LV capacitor is asked for: dc only." : ""}</td>
+          <td className="reason"></td>
         </tr>
       </tbody>
     </table>

@@ -4,15 +4,16 @@ interface Props {
   readonly design: Design | null;
   /** null: no search has run. */
   readonly candidates: readonly Candidate[] | null;
+  readonly chosen: Candidate | null;
   readonly onSizeAgain: () => void;
 }
 
 /** Whether the design is chosen again as the brief changes, and the way back when it is not. */
-export function Follows({ design, candidates, onSizeAgain }: Props) {
+export function Follows({ design, candidates, chosen, onSizeAgain }: Props) {
   const follows = design?.follows ?? false;
   return (
     <p className="follows">
-      <span>{sentence(design, candidates)}</span>
+      <span>{sentence(design, candidates, chosen)}</span>
       {follows ? null : (
         <button type="button" className="cure-button" onClick={onSizeAgain}>
           size again
@@ -22,9 +23,11 @@ export function Follows({ design, candidates, onSizeAgain }: Props) {
   );
 }
 
-function sentence(design: Design | null, candidates: readonly Candidate[] | null): string {
+function sentence(design: Design | null, candidates: readonly Candidate[] | null, chosen: Candidate | null): string {
   if (candidates !== null && candidates.length === 0) return "No candidate stands; the families below say why.";
   if (design === null) return "There is no design yet.";
   if (design.follows) return "The design follows the brief: the best candidate is chosen again as the brief changes.";
-  return "The design is kept as picked; the findings say what of the brief it no longer meets.";
+  const place =
+    chosen === null ? "no candidate of this search" : `candidate ${chosen.rank} of ${candidates?.length ?? 0}`;
+  return `The design is kept as picked (${place}); the findings say what of the brief it does not meet.`;
 }

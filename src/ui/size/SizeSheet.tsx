@@ -68,7 +68,12 @@ function CandidateSection({ sizing, document, actions }: Omit<Props, "proof">) {
   return (
     <section className="sheet-section" aria-labelledby="candidates-heading">
       <h2 id="candidates-heading">candidates</h2>
-      <Follows design={document.design} candidates={candidates ?? null} onSizeAgain={actions.onSizeAgain} />
+      <Follows
+        design={document.design}
+        candidates={candidates ?? null}
+        chosen={chosen}
+        onSizeAgain={actions.onSizeAgain}
+      />
       {candidates === undefined || candidates.length === 0 ? null : (
         <>
           <ColumnDrawings candidates={candidates} chosen={chosen} onTake={actions.onTake} />
@@ -100,8 +105,14 @@ function LvSection({ document, proof, actions }: Omit<Props, "sizing">) {
           <h3>exact and fitted</h3>
           <Exactness sheet={proof.sheet} onWhy={onWhy} />
           <h3>LV capacitance, three matches</h3>
-          <CapacitanceReach sheet={proof.sheet} lvArm={design.lvArm} />
-          <CapacitanceChoice sheet={proof.sheet} lvArm={design.lvArm} onWhy={onWhy} />
+          {design.lvArm.capacitanceBy === "none" ? (
+            <p className="finding-sentence">No LV capacitor is asked for: the divider is matched at dc only.</p>
+          ) : (
+            <>
+              <CapacitanceReach sheet={proof.sheet} lvArm={design.lvArm} />
+              <CapacitanceChoice sheet={proof.sheet} lvArm={design.lvArm} onWhy={onWhy} />
+            </>
+          )}
         </>
       )}
     </section>
