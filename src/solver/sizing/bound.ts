@@ -24,6 +24,7 @@ const named: Record<Bound["id"], readonly [string, Bound["side"]]> = {
   instrumentShare: ["instrument's share", "atMost"],
   lvArmValue: ["the LV arm can be bought", "atMost"],
   band: ["band of a string without capacitors", "atMost"],
+  lvPole: ["band of an LV arm without capacitors", "atMost"],
 };
 
 export const pathOf = (id: Bound["id"]) => `window.${id}_ohm`;

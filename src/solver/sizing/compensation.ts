@@ -6,7 +6,7 @@ import type { Finding } from "../standards/finding.ts";
 import { preferredBetween } from "../standards/preferred.ts";
 import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
 import type { Asking } from "./asking.ts";
-import { acceptedBandShare, bandTop } from "./bandLimit.ts";
+import { bandTop, bareReach } from "./bandLimit.ts";
 import { bodyRule, compensationFormulas, strayRule } from "./compensationFormulas.ts";
 import { found } from "./found.ts";
 import { envelope, footHeightOf } from "./geometry.ts";
@@ -45,12 +45,10 @@ export function alwaysCompensated(ask: Asking): boolean {
 /** Whether this build gets capacitors: as above, or a bare string would fall by more than its share at the band's top. */
 export function compensated(build: Build, limits: Limits): boolean {
   if (alwaysCompensated(limits.ask)) return true;
-  const f = bandTop(limits.ask);
-  if (limits.ask.j.document.brief.policy.compensation === "never" || f === 0) return false;
+  if (limits.ask.j.document.brief.policy.compensation === "never" || bandTop(limits.ask) === 0) return false;
   const diameter = envelope(build.kind.family.bodyDiameter_m, build.strings);
   const Ce = columnStray(limits, build.length_m, diameter);
-  const fall = compensationFormulas.bareFall.compute({ f, R1: build.hvArm_ohm, Ce }) as number;
-  return fall > acceptedBandShare(limits.ask) * (1 + 1e-9);
+  return build.hvArm_ohm > bareReach(limits.ask, Ce) * (1 + 1e-9);
 }
 
 const classes: readonly DielectricClass[] = ["class1", "mica", "film", "air"];

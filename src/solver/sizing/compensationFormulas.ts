@@ -45,20 +45,6 @@ export const compensationFormulas = {
     source: computedHere("charge shared between source and divider"),
     compute: ({ Cs, e, n, p, Cb }) => (((Cs * e) / (1 - e)) * n) / p - Cb,
   }),
-  bareFall: formula({
-    id: "sizing.bareFall",
-    title: "Fall of the string without capacitors at the band's top",
-    statement: "{=} = (2π · {f} · {R1} · {Ce})² / 180",
-    result: one("δ", "relative fall"),
-    inputs: {
-      f: { symbol: "f", unit: "Hz", meaning: "top of the band" },
-      R1: { symbol: "R_1", unit: "ohm", meaning: "HV arm resistance" },
-      Ce: F("C_e", "stray capacitance of the column to earth"),
-    },
-    holds: "First order, ω·R1·Ce up to 1.5; beyond it only says that capacitors are needed.",
-    source: computedHere("first order of √(jx)/sinh √(jx)"),
-    compute: ({ f, R1, Ce }) => (2 * Math.PI * f * R1 * Ce) ** 2 / 180,
-  }),
 };
 
 export const lvCapacitanceRecord: Solution = {

@@ -1,21 +1,21 @@
+import { gain } from "./gain.ts";
 import type { Build, Line } from "./line.ts";
 
-/** Whether `a` is no worse than `b` in all six figures and better in one. Every string is of one value, so the number of different parts is equal. */
-export function dominates(a: Build, b: Build): boolean {
-  const noWorse =
-    a.elementCount <= b.elementCount &&
-    a.length_m <= b.length_m &&
-    a.uncertainty <= b.uncertainty &&
-    a.loading <= b.loading &&
-    a.margin >= b.margin;
-  return (
-    noWorse &&
-    (a.elementCount < b.elementCount ||
-      a.length_m < b.length_m ||
-      a.uncertainty < b.uncertainty ||
-      a.loading < b.loading ||
-      a.margin > b.margin)
-  );
+type Figures = Pick<Build, "elementCount" | "length_m" | "uncertainty" | "loading" | "margin">;
+
+/**
+ * Whether `a` is no worse than `b` in all six figures and better in one; 1 part in 1e12 decides nothing. Every string is of one
+ * value, so the number of different parts is equal.
+ */
+export function dominates(a: Figures, b: Figures): boolean {
+  const gains = [
+    b.elementCount - a.elementCount,
+    gain(a.length_m, b.length_m),
+    gain(a.uncertainty, b.uncertainty),
+    gain(a.loading, b.loading),
+    gain(b.margin, a.margin),
+  ];
+  return gains.every((each) => each >= 0) && gains.some((each) => each > 0);
 }
 
 /** The order of the list: fewest elements, shortest, least uncertainty; then a fixed tie-break. */
@@ -30,6 +30,9 @@ export function inOrder(a: Build, b: Build): number {
     (a.kind.family.id < b.kind.family.id ? -1 : a.kind.family.id > b.kind.family.id ? 1 : 0)
   );
 }
+
+const looseness = 1e-11;
+const slack = 1 + looseness;
 
 /**
  * Finds what dominates a build among all lines, without listing them. In a line, count and length rise with n and uncertainty
@@ -50,7 +53,7 @@ export class Dominance {
   surely(line: Line, n: number): boolean {
     const other = this.before.get(line);
     if (other === undefined) return false;
-    const high = other.lastWithin(line.length(n), Math.floor((n * line.strings) / other.strings));
+    const high = other.lastWithin(line.length(n) * slack, Math.floor((n * line.strings) / other.strings));
     return other.beats(high, line, n) || other.beats(high - 1, line, n);
   }
 
@@ -70,13 +73,13 @@ export class Dominance {
 
   private inLine(line: Line, build: Build): Build | null {
     const most = Math.floor(build.elementCount / line.strings);
-    const high = line.lastWithin(build.length_m, most);
+    const high = line.lastWithin(build.length_m * slack, most);
     if (high < line.first) return null;
-    const low = line.firstWithin(build.uncertainty, high);
+    const low = line.firstWithin(build.uncertainty * slack, high);
     if (low > high) return null;
-    // A share below, so that rounding cannot hide a build; `dominates` decides on the figures themselves.
+    // Looser than `dominates`, which decides on the figures themselves, so that rounding cannot hide a build.
     const hvArm = this.sags ? build.hvArm_ohm * (1 - 1e-9) : 0;
-    const at = line.search(low, high, hvArm, build.margin, (n) => dominates(line.build(n) as Build, build));
+    const at = line.search(low, high, hvArm, build.margin - looseness, (n) => dominates(line.build(n) as Build, build));
     return at === null ? null : line.build(at);
   }
 }

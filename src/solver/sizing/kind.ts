@@ -3,7 +3,7 @@ import type { ResistorFamily } from "../job/part.ts";
 import { metre } from "../quantities/quantity.ts";
 import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
 import type { Asking } from "./asking.ts";
-import { acceptedBandShare, bandTop } from "./bandLimit.ts";
+import { bareReach } from "./bandLimit.ts";
 import type { InsulationNeed } from "./columnNeed.ts";
 import { envelope } from "./geometry.ts";
 import { trimReach } from "./lvReach.ts";
@@ -132,9 +132,9 @@ function countByBody(body_m: number, limits: Limits): number {
 export const leastLength = (kind: Kind, strings: number, limits: Limits): number =>
   Math.max(limits.need.column_m, envelope(kind.family.bodyDiameter_m, strings));
 
-/** Greatest R1 of a bare string of this length by its own stray, Ω: first-order fall at the band's top. */
+/** Greatest R1 of a bare string of this length by its own stray and by what lies beside the LV arm, Ω. */
 export function bandBound(kind: Kind, length_m: number, strings: number, limits: Limits): number {
   const diameter_m = envelope(kind.family.bodyDiameter_m, strings);
   const stray = verticalCylinderCapacitance(metre(length_m), metre(diameter_m), metre(limits.footHeight_m));
-  return Math.sqrt(180 * acceptedBandShare(limits.ask)) / (2 * Math.PI * bandTop(limits.ask) * stray);
+  return bareReach(limits.ask, stray);
 }

@@ -1,3 +1,4 @@
+import { gain } from "./gain.ts";
 import { bandBound, bodyNeeded, type Kind, type Limits, leastLength, mostElements } from "./kind.ts";
 
 /** Names of the limit that leaves the smallest margin. */
@@ -121,10 +122,10 @@ export class Line {
     const i = n - this.first;
     const k = m - other.first;
     const count = m * other.strings - n * this.strings;
-    const length = other.length(m) - this.length(n);
-    const uncertain = other.uncertain[k]! - this.uncertain[i]!;
-    const load = other.loading(other.hvArm[k]!) - this.loading(this.hvArm[i]!);
-    const margin = this.margin[i]! - other.margin[k]!;
+    const length = gain(this.length(n), other.length(m));
+    const uncertain = gain(this.uncertain[i]!, other.uncertain[k]!);
+    const load = gain(this.loading(this.hvArm[i]!), other.loading(other.hvArm[k]!));
+    const margin = gain(other.margin[k]!, this.margin[i]!);
     if (count < 0 || length < 0 || uncertain < 0 || load < 0 || margin < 0) return false;
     return count > 0 || length > 0 || uncertain > 0 || load > 0 || margin > 0;
   }

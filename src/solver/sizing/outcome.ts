@@ -15,7 +15,8 @@ export interface Bound {
     | "existence"
     | "instrumentShare"
     | "lvArmValue"
-    | "band";
+    | "band"
+    | "lvPole";
   /** Plain name: "source sag". */
   readonly name: string;
   readonly side: "atLeast" | "atMost";

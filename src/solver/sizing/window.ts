@@ -1,6 +1,6 @@
 import { show } from "../checks/show.ts";
 import type { Asking } from "./asking.ts";
-import { bandLimit } from "./bandLimit.ts";
+import { bandLimit, lvPoleLimit } from "./bandLimit.ts";
 import { bound, none, pathOf, percent, shareOfUncertainty, type WindowGiven } from "./bound.ts";
 import type { Bound } from "./outcome.ts";
 import { existence, instrumentShare, lvArmValue } from "./scaleFactorBounds.ts";
@@ -18,6 +18,7 @@ export function windowBounds(given: WindowGiven): Bound[] {
     instrumentShare(given),
     lvArmValue(given),
     bandLimit(given),
+    lvPoleLimit(given),
   ];
 }
 

@@ -68,6 +68,7 @@ function upperWays(document: DividerDocument, found: WindowFound, greatest: Boun
       ];
     }
     case "band":
+    case "lvPole":
       return [
         cure("fit capacitors across the elements", { pointer: "/brief/policy/compensation", value: "whenNeeded" }),
       ];

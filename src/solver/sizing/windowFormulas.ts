@@ -143,6 +143,27 @@ export const windowFormulas = {
     source: kuffel,
     compute: ({ e, f, Ce }) => Math.sqrt(180 * e) / (2 * Math.PI * f * Ce),
   }),
+  lvPole: formula({
+    id: "sizing.lvPole",
+    title: "Greatest R1 of a divider without capacitors, by cable and instrument",
+    statement: "{=} = ({F} / (1 + {Rs} / {Rm}) − 1) · √(2 · {e}) / (2π · {f} · {C})",
+    result: greatest,
+    inputs: {
+      F,
+      Rm,
+      Rs,
+      e: one("ε", "deviation accepted at the band's top"),
+      f: { symbol: "f", unit: "Hz", meaning: "top of the band" },
+      C: { symbol: "C_b", unit: "F", meaning: "cable, instrument and protectors" },
+    },
+    holds:
+      "One pole of the LV arm with what lies beside it, first-order fall (f/f_p)²/2; capacitors in both arms lift it.",
+    source: computedHere("first order of 1/√(1 + (f/f_p)²)"),
+    compute: ({ F, Rm, Rs, e, f, C }) => {
+      const over = F / (1 + Rs / Rm) - 1;
+      return over > 0 && C > 0 ? (over * Math.sqrt(2 * e)) / (2 * Math.PI * f * C) : null;
+    },
+  }),
   share: formula({
     id: "sizing.share",
     title: "Share of the wanted uncertainty for one systematic effect",
