@@ -14,6 +14,8 @@ export interface Judged {
   readonly proof: Proof | null;
   readonly refusal: Refusal | null;
   readonly stale: boolean;
+  /** The list of candidates is being searched for anew; the one shown is of an earlier brief. */
+  readonly searching: boolean;
   /** Time the worker took for it, ms. */
   readonly took_ms: number;
 }
@@ -75,24 +77,24 @@ export function judgeEveryChange(session: Session): () => void {
   let searched: DividerDocument | null = null;
   const search = (document: DividerDocument) => {
     searched = document;
+    judged.setState({ searching: true });
     runner.long.ask({ kind: "size", document, top: candidatesAsked }, (answer) => {
-      if (answer.kind === "done") judged.setState({ sizing: answer.outcome.sizing });
+      if (answer.kind === "done") judged.setState({ sizing: answer.outcome.sizing, searching: false });
+      if (answer.kind === "refused") judged.setState({ sizing: null, searching: false });
     });
   };
   const ask = (document: DividerDocument) => {
     if (document === settled) return;
     judged.setState({ stale: true });
-    runner.check.ask({ kind: "follow", document, top: candidatesAsked }, (answer) => {
+    runner.check.ask({ kind: "follow", document, top: 1 }, (answer) => {
       if (answer.kind === "refused") {
         judged.setState({ document, refusal: answer.refusal, stale: false, proof: null });
         return;
       }
       if (answer.kind !== "done") return;
-      const { outcome } = answer;
-      const sizing = outcome.sizing ?? judged.getState().sizing;
-      judged.setState({ ...outcome, sizing, refusal: null, stale: false, took_ms: answer.took_ms });
-      if (outcome.sizing !== null) searched = document;
-      else if (!sameQuestion(searched, document)) search(document);
+      const { outcome, took_ms } = answer;
+      judged.setState({ proof: outcome.proof, document: outcome.document, refusal: null, stale: false, took_ms });
+      if (!sameQuestion(searched, document)) search(document);
       store.getState().adopt(document, outcome.document);
       settled = store.getState().document;
       judged.setState({ document: settled });
@@ -106,7 +108,14 @@ export function judgeEveryChange(session: Session): () => void {
 
 /** Whether a search would find the same: the brief, the instruments and who reads. */
 const sameQuestion = (a: DividerDocument | null, b: DividerDocument): boolean =>
-  a !== null && a.brief === b.brief && a.instruments === b.instruments && a.principal === b.principal;
+  a !== null &&
+  a.brief === b.brief &&
+  a.instruments === b.instruments &&
+  a.principal === b.principal &&
+  ownParts(a) === ownParts(b);
+
+const ownParts = ({ parts }: DividerDocument): string =>
+  JSON.stringify(parts.filter((part) => part.origin !== "catalogue"));
 
 export const newJudged = (): StoreApi<Judged> =>
   createStore<Judged>()(() => ({
@@ -115,6 +124,7 @@ export const newJudged = (): StoreApi<Judged> =>
     proof: null,
     refusal: null,
     stale: true,
+    searching: false,
     took_ms: 0,
   }));
 
