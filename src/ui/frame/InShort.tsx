@@ -30,6 +30,7 @@ function Figures({ stale }: { readonly stale: boolean }) {
   const deviates = useJudged(
     (state) => Math.abs(Number(state.proof?.sheet.values["scaleFactor.deviation"] ?? 0)) > 1e-6,
   );
+  const endless = useJudged((state) => state.proof?.sheet.values["response.bandwidth_Hz"] === null);
   return (
     <dl className={stale ? "in-short stale" : "in-short"}>
       <div>
@@ -54,7 +55,13 @@ function Figures({ stale }: { readonly stale: boolean }) {
       <div>
         <dt>band</dt>
         <dd>
-          0 – <Figure path="response.bandwidth_Hz" label="bandwidth" />
+          {endless ? (
+            "dc up: no −3 dB point in this model"
+          ) : (
+            <>
+              0 – <Figure path="response.bandwidth_Hz" label="bandwidth" />
+            </>
+          )}
         </dd>
       </div>
       <div>

@@ -1,12 +1,10 @@
 import { useState } from "react";
 import { StartDialog } from "./StartDialog.tsx";
 import { useInputs, useLooking, useSession } from "./session.ts";
-import { useApply } from "./useApply.ts";
 
 /** What happened to the work: an example is open, a file was repaired or refused, another tab writes, a copy could not be kept. */
 export function Notices() {
   const session = useSession();
-  const apply = useApply();
   const notice = useLooking((state) => state.notice);
   const file = useInputs((state) => state.file);
   const [starting, setStarting] = useState(false);
@@ -57,7 +55,7 @@ export function Notices() {
   function copyOf(of: typeof session): void {
     const slot = crypto.randomUUID();
     sessionStorage.setItem("slot", slot);
-    if (of.keeper === null) apply((store) => (store.workOnACopy(), { ok: true, value: null }));
+    if (of.keeper === null) of.store.getState().workOnACopy();
     else void of.keeper.workOnACopy(slot);
   }
 }
