@@ -181,7 +181,7 @@ export class Line {
     if (this.length(n) > limits.length_m * (1 + 1e-12)) return;
     const bare = (limits.ask.working.greatest_Vpeak * limits.share) / n > limits.bareAbove_V;
     const bound = bare ? bandBound(kind, this.length(n), strings, limits) : Number.POSITIVE_INFINITY;
-    const greatest = Math.min(kind.greatest_ohm, bound);
+    const greatest = Math.min(kind.greatest_ohm, bound) * (1 + 1e-12);
     // From the count on at which capacitors carry the band, larger values are allowed again.
     if (this.bare && !bare) this.at = offers.length - 1;
     this.bare = bare;
@@ -192,7 +192,7 @@ export class Line {
     if (at < 0) return;
     const { value } = offers[at]!;
     const hvArm_ohm = (n * value) / strings;
-    if (hvArm_ohm < limits.least_ohm) return;
+    if (hvArm_ohm < limits.least_ohm * (1 - 1e-12)) return;
     this.judge(n, value, hvArm_ohm);
   }
 

@@ -71,7 +71,8 @@ export function whyNone(kind: Kind, limits: Limits): Reason {
   if (kind.dissipation_W <= 0) return noDissipation(kind, limits);
   const wanted = asWanted(kind, limits);
   const without = (lifted: Partial<Asked>) => ranges(kind, limits, { ...wanted, ...lifted });
-  if (ranges(kind, limits, wanted).length > 0) return outOfBand(limits);
+  if (ranges(kind, limits, wanted).length > 0)
+    return limits.bareAbove_V < Number.POSITIVE_INFINITY ? outOfBand(limits) : severalAtOnce(kind, limits);
   const long = without({ length_m: Number.POSITIVE_INFINITY });
   if (long.length > 0) return tooLong(kind, limits, long);
   const high = without({ greatest_ohm: Number.POSITIVE_INFINITY });

@@ -58,19 +58,17 @@ function noMatch(given: StringMatched, transfer_F: number, beside_F: number, str
   const { scaleFactor: F } = document.brief;
   const asked = transfer_F * (F - 1);
   const instrument = document.instruments[at]!;
-  const over = beside_F - asked;
-  const metres = over / instrument.cable.capacitance_F_per_m;
-  const short = instrument.cable.length_m - metres;
+  const metres = (beside_F - asked) / instrument.cable.capacitance_F_per_m;
+  // A tenth shorter than must be, to the decimetre, so that something is left to be fitted.
+  const length_m = Math.floor((instrument.cable.length_m - metres) * 9) / 10;
+  const canShorten = metres > 0 && length_m > 0;
   const raised = (string_F * beside_F * 1.25) / Math.max(asked, Number.MIN_VALUE);
-  const canShorten = over > 0 && short > 0.1;
-  const ways = [
-    canShorten ? `shorten the cable by ${show(metres * 1.1, "m")}` : null,
-    `raise C1 to ${show(raised, "F")}`,
-  ].filter((each) => each !== null);
+  const shorten = `shorten the cable by ${show(instrument.cable.length_m - length_m, "m")}`;
+  const ways = [...(canShorten ? [shorten] : []), `raise C1 to ${show(raised, "F")}`];
   const cure: Cure | null = canShorten
     ? {
-        label: `shorten the cable to ${show(Math.floor(short * 9) / 10, "m")}`,
-        edits: [{ pointer: `/instruments/${at}/cable/length_m`, value: Math.floor(short * 9) / 10 }],
+        label: `shorten the cable to ${show(length_m, "m")}`,
+        edits: [{ pointer: `/instruments/${at}/cable/length_m`, value: length_m }],
         sizeAgain: true,
       }
     : null;

@@ -1,8 +1,9 @@
 import { useId, useMemo, useState } from "react";
-import type { CapacitorFamily, Part, SeriesName } from "../../solver/index.ts";
+import type { CapacitorFamily, SeriesName } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 import { Choice } from "../charts/Choice.tsx";
 import {
+  type AddedFamily,
   type Draft,
   type DraftField,
   draftedPart,
@@ -16,7 +17,7 @@ interface Props {
   /** An id for the new part. */
   readonly idFor: (kind: FamilyKind) => string;
   /** Returns what was wrong, if the document refused it. */
-  readonly onAdd: (part: Part, assumed: readonly string[]) => string | null;
+  readonly onAdd: (added: readonly AddedFamily[]) => string | null;
 }
 
 const kinds = [
@@ -43,7 +44,7 @@ export function FamilyForm({ idFor, onAdd }: Props) {
   const add = () => {
     setTried(true);
     if (drafted.part === null) return;
-    const fault = onAdd(drafted.part, drafted.assumed);
+    const fault = onAdd([{ part: drafted.part, assumed: drafted.assumed }]);
     setRefused(fault);
     if (fault !== null) return;
     setDraft(emptyDraft(draft.kind));

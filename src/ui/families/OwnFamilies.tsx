@@ -1,6 +1,6 @@
-import { useCallback, useMemo } from "react";
+import { lazy, Suspense, useCallback, useMemo, useState } from "react";
 import type { DividerDocument, Part } from "../../solver/index.ts";
-import { freeId } from "./draftFamily.ts";
+import { type AddedFamily, freeId } from "./draftFamily.ts";
 import { FamilyForm } from "./FamilyForm.tsx";
 import { FamilyTable, type OwnFamily } from "./FamilyTable.tsx";
 import "./families.css";
@@ -8,7 +8,7 @@ import "./families.css";
 export interface FamilyActions {
   readonly onInHandOnly: (only: boolean) => void;
   /** Returns what was wrong, if it was refused. */
-  readonly onAddFamily: (part: Part, assumed: readonly string[]) => string | null;
+  readonly onAddFamilies: (added: readonly AddedFamily[]) => string | null;
   readonly onRemoveFamily: (index: number) => void;
 }
 
@@ -36,9 +36,23 @@ export function OwnFamilies({ document, actions }: Props) {
       )}
       <details className="table-on-request">
         <summary>add a family</summary>
-        <FamilyForm idFor={idFor} onAdd={actions.onAddFamily} />
+        <FamilyForm idFor={idFor} onAdd={actions.onAddFamilies} />
       </details>
+      <Import parts={parts} onAdd={actions.onAddFamilies} />
     </section>
+  );
+}
+
+const ImportFamilies = lazy(() => import("./ImportFamilies.tsx").then((m) => ({ default: m.ImportFamilies })));
+
+/** The reader of CSV files is fetched when it is opened. */
+function Import(props: { readonly parts: readonly Part[]; readonly onAdd: FamilyActions["onAddFamilies"] }) {
+  const [open, setOpen] = useState(false);
+  return (
+    <details className="table-on-request" onToggle={(event) => setOpen(event.currentTarget.open)}>
+      <summary>families from a CSV file</summary>
+      <Suspense fallback={null}>{open ? <ImportFamilies {...props} /> : null}</Suspense>
+    </details>
   );
 }
 

@@ -112,6 +112,12 @@ function numberOf(parsed: Parsed): number | string {
   }
 }
 
+/** A family to be added, with the keys of its ratings that are stand-ins. */
+export interface AddedFamily {
+  readonly part: Part;
+  readonly assumed: readonly string[];
+}
+
 export interface Drafted {
   /** null as long as something is missing or wrong. */
   readonly part: Part | null;

@@ -53,8 +53,8 @@ export function everyBuild(
       for (let p = 1; p <= 4; p++) {
         for (let n = 1; n <= 5000; n++) {
           const R1 = (n * R) / p;
-          if (R1 < window[0]) continue;
-          if (R1 > window[1]) break;
+          if (R1 < window[0] * (1 - 1e-12)) continue;
+          if (R1 > window[1] * (1 + 1e-12)) break;
           const rms = (V.greatestRms * fraction) / n;
           const peak = (V.greatest * fraction) / n;
           const heat = (rms * rms) / R;
