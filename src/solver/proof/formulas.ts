@@ -9,7 +9,7 @@ import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stress.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
-import { sizingFormulas } from "../sizing/formulas.ts";
+import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
@@ -34,8 +34,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
 
 /** Every solution record, by id: what no closed formula gives. */
 export const solutions: ReadonlyMap<string, Solution> = new Map(
-  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords)].map((record) => [
-    record.id,
-    record,
-  ]),
+  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords), ...sizingSolutions].map(
+    (record) => [record.id, record],
+  ),
 );

@@ -56,7 +56,7 @@ const classes: readonly DielectricClass[] = ["class1", "mica", "film", "air"];
 /** Families that may stand across an element at this peak, best dielectric first, then the lowest rating that does, the shortest. */
 export function elementFamilies(pool: Pool, derating: number, peak_V: number): CapacitorFamily[] {
   return pool.capacitors
-    .filter((family) => dielectricFits(family, "hvArm") && family.ratedVoltage_V >= peak_V * (1 - 1e-12))
+    .filter((family) => dielectricFits(family, "hvArm") && family.ratedVoltage_V * derating >= peak_V * (1 - 1e-12))
     .sort(
       (a, b) =>
         classes.indexOf(a.dielectricClass) - classes.indexOf(b.dielectricClass) ||
