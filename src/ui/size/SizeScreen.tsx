@@ -1,5 +1,6 @@
 import { useMemo } from "react";
-import type { Cure, Edit, Origin, Part } from "../../solver/index.ts";
+import type { Cure, Edit, Origin } from "../../solver/index.ts";
+import type { AddedFamily } from "../families/draftFamily.ts";
 import { type FamilyActions, OwnFamilies } from "../families/OwnFamilies.tsx";
 import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
@@ -44,8 +45,8 @@ function useFamilyActions(): FamilyActions {
     () => ({
       onInHandOnly: (only) =>
         void apply((store) => store.editAt("/brief/policy/partsInHandOnly", only, { step: "parts in hand only" })),
-      onAddFamily: (part, assumed) => {
-        const done = apply((store) => store.applyCure(addition(part, assumed, store.document.parts.length)));
+      onAddFamilies: (added) => {
+        const done = apply((store) => store.applyCure(addition(added, store.document.parts.length)));
         return done.ok ? null : `${done.error.why} ${done.error.cure}`;
       },
       onRemoveFamily: (index) => void apply((store) => store.removeAt(`/parts/${index}`, "take out a family")),
@@ -54,14 +55,18 @@ function useFamilyActions(): FamilyActions {
   );
 }
 
-/** A family and the origins of its stand-ins as one step. */
-function addition(part: Part, assumed: readonly string[], index: number): Cure {
-  const values: Readonly<Record<string, unknown>> = { ...part };
-  const edits: (Edit & { readonly origin?: Origin })[] = [
-    { pointer: "/parts/-", value: part },
-    ...assumed.map((key) => ({ pointer: `/parts/${index}/${key}`, value: values[key], origin: "assumed" as const })),
-  ];
-  return { label: `family ${part.name}`, edits };
+/** Families and the origins of their stand-ins as one step. */
+function addition(added: readonly AddedFamily[], first: number): Cure {
+  const edits: (Edit & { readonly origin?: Origin })[] = added.map(({ part }) => ({
+    pointer: "/parts/-",
+    value: part,
+  }));
+  for (const [i, { part, assumed }] of added.entries()) {
+    const values: Readonly<Record<string, unknown>> = { ...part };
+    for (const key of assumed)
+      edits.push({ pointer: `/parts/${first + i}/${key}`, value: values[key], origin: "assumed" });
+  }
+  return { label: added.length === 1 ? `family ${added[0]!.part.name}` : `${added.length} families`, edits };
 }
 
 export default SizeScreen;

@@ -48,8 +48,8 @@ function Families() {
   const [document, setDocument] = useState(inventedDocument);
   const families = {
     onInHandOnly: console.log,
-    onAddFamily: (part: Part) => {
-      setDocument({ ...document, parts: [...document.parts, part] });
+    onAddFamilies: (added: readonly { part: Part }[]) => {
+      setDocument({ ...document, parts: [...document.parts, ...added.map((each) => each.part)] });
       return null;
     },
     onRemoveFamily: (i: number) => setDocument({ ...document, parts: document.parts.filter((_, k) => k !== i) }),
