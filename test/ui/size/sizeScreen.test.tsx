@@ -1,6 +1,6 @@
 import { act, fireEvent, render, screen } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
-import { describe, expect, it, vi } from "vitest";
+import { describe, expect, it } from "vitest";
 import { SessionContext } from "../../../src/ui/frame/session.ts";
 import { SizeScreen } from "../../../src/ui/size/SizeScreen.tsx";
 import { inventedSession } from "../../support/inventedSession.ts";
@@ -66,14 +66,14 @@ describe("Size on a session", () => {
 
 describe("families from a file", () => {
   it("are previewed row by row and added together as one step", async () => {
-    const { session, document, container } = opened();
+    const { session, document } = opened();
     const details = screen.getByText("families from a CSV file").closest("details")!;
     details.open = true;
     fireEvent(details, new Event("toggle"));
     const head =
       "kind,name,least_ohm,greatest_ohm,tolerance,ratedDissipation_W,limitingVoltage_V,bodyLength_m,bodyDiameter_m";
     const rows = ["a", "b", ""].map((name) => `resistor,${name},1k,1M,0.01,0.6,350,0.0065,0.0025`);
-    const input = await vi.waitFor(() => container.querySelector<HTMLInputElement>("input[type=file]")!);
+    const input = await screen.findByLabelText<HTMLInputElement>("CSV file, one family a row");
     await userEvent.upload(input, new File([[head, ...rows].join("\n")], "families.csv", { type: "text/csv" }));
     expect(await screen.findByText(/name: A plain name is needed/)).toBeInTheDocument();
     const before = document().parts.length;
