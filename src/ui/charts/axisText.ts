@@ -38,8 +38,8 @@ export const withUnit = (value: number, unit: UnitName, digits = 4): string =>
 export const figureText = (value: number, unit: UnitName, digits = 3): string =>
   formatQuantity(value, unit, { digits });
 
-/** A signed number: "+0.03", "−1.2", "0". */
+/** A signed number: "+0.03", "−1.2"; what only rounding of the arithmetic leaves is "0". */
 export function signed(value: number, digits = 3): string {
-  const rounded = Number(value.toPrecision(digits));
+  const rounded = Math.abs(value) < 1e-9 ? 0 : Number(value.toPrecision(digits));
   return rounded > 0 ? `+${rounded}` : plainText(rounded);
 }

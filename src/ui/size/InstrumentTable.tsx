@@ -23,7 +23,7 @@ export function InstrumentTable({ rows }: { readonly rows: readonly InstrumentRo
               may see
             </th>
             <th scope="col" className="number">
-              error with the principal's factor
+              error if the principal's is used
             </th>
           </tr>
         </thead>

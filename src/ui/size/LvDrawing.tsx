@@ -9,7 +9,7 @@ interface Props {
   readonly instrument: Instrument | null;
 }
 
-const step = 92;
+const step = 78;
 const rail = 26;
 const floor = 176;
 
@@ -27,7 +27,7 @@ export function LvDrawing({ design, parts, instrument }: Props) {
         height={floor + 46}
         viewBox={`0 0 ${width} ${floor + 46}`}
         aria-hidden="true"
-        style={{ minWidth: Math.min(600, width) }}
+        style={{ minWidth: 0.9 * width }}
       >
         <line className="lead" x1={14} x2={at(branches.length - 1)} y1={rail} y2={rail} />
         <line className="lead" x1={at(0)} x2={at(branches.length - 1)} y1={floor} y2={floor} />

@@ -9,9 +9,10 @@ export const stringName = ({ elements, resistance_ohm }: Candidate): string =>
 export const candidateName = (candidate: Candidate): string =>
   candidate.strings > 1 ? `${candidate.strings} strings, ${stringName(candidate)}` : stringName(candidate);
 
-/** A share as percent with three digits: "0.42 %". */
+/** A share as percent with at most three digits: "0.42 %"; what only rounding of the arithmetic leaves is "0 %". */
 export function percentText(share: number, digits = 3): string {
-  const text = String(Number((100 * share).toPrecision(digits))).replace("-", "\u2212");
+  const shown = Math.abs(share) < 1e-11 ? 0 : Number((100 * share).toPrecision(digits));
+  const text = String(shown).replace("-", "\u2212");
   return `${text}\u2009%`;
 }
 
