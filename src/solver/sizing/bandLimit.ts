@@ -82,6 +82,12 @@ export function bareReach(ask: Asking, stray_F: number): number {
   return Math.min(Math.sqrt(180 * e) / (w * stray_F), byLvArm);
 }
 
+/** Greatest resistance of an element without capacitor before its own capacitance bypasses it at the band's top, Ω. */
+export function bareElement(ask: Asking, self_F: number): number {
+  const w = 2 * Math.PI * bandTop(ask);
+  return self_F > 0 ? Math.sqrt(2 * acceptedBandShare(ask)) / (w * self_F) : Number.POSITIVE_INFINITY;
+}
+
 /** Highest frequency that must be right: the band's top, the sine's own, 0.35 over the rise time of a pulse or square. */
 export function bandTop({ j }: Asking): number {
   const { waveform, band_Hz } = j.document.brief;

@@ -9,8 +9,8 @@ import { found } from "./found.ts";
 import { envelope } from "./geometry.ts";
 import type { Limits } from "./kind.ts";
 import type { Build } from "./line.ts";
-import { lvResistors } from "./lvArm.ts";
-import { lvNeedOf } from "./lvReach.ts";
+import { type LvResistors, lvResistors } from "./lvArm.ts";
+import { lvNeedOf, nominalLvArm } from "./lvReach.ts";
 import type { Candidate } from "./outcome.ts";
 import { tooUncertain } from "./pick.ts";
 import type { Pool } from "./pool.ts";
@@ -27,14 +27,11 @@ export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
     ...insulationFindings(limits),
     ...uncertaintyFindings(build, limits),
   ];
-  const need = lvNeedOf(ask, build.hvArm_ohm, family.tolerance);
-  const lv = need.ok ? lvResistors(ask, pool, build.hvArm_ohm, need.value) : null;
-  if (!need.ok)
-    findings.push(found("scaleFactor.existence", "stop", "LV arm", { reason: `${need.error.why} ${need.error.cure}` }));
-  findings.push(...(lv?.findings ?? []));
+  const lv = lvArmOf(build, limits, pool);
+  findings.push(...lv.findings);
   const bare: Fitted = {
-    design: designOf(build, limits, lv?.branches ?? []),
-    parts: unique([family, ...(lv?.parts ?? []), ...protectorParts(limits)]),
+    design: designOf(build, limits, lv.branches),
+    parts: unique([family, ...lv.parts, ...protectorParts(limits)]),
     findings: [],
   };
   const fitted = compensated(build, limits) ? withCapacitors(build, limits, pool, bare) : bare;
@@ -63,6 +60,18 @@ export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
     design: fitted.design,
     parts: fitted.parts,
   };
+}
+
+/** LV resistors over all tolerances; where the extremes do not exist those for nominal parts, with a stop. */
+function lvArmOf(build: Build, { ask }: Limits, pool: Pool): LvResistors {
+  const need = lvNeedOf(ask, build.hvArm_ohm, build.kind.family.tolerance);
+  if (need.ok) return lvResistors(ask, pool, build.hvArm_ohm, need.value);
+  const stop = found("scaleFactor.existence", "stop", "LV arm", { reason: `${need.error.why} ${need.error.cure}` });
+  const nominal_ohm = nominalLvArm(ask, build.hvArm_ohm);
+  if (nominal_ohm === null) return { branches: [], parts: [], findings: [stop] };
+  const nominal = { nominal_ohm, least_ohm: nominal_ohm, greatest_ohm: nominal_ohm };
+  const lv = lvResistors(ask, pool, build.hvArm_ohm, nominal);
+  return { ...lv, findings: [stop, ...lv.findings] };
 }
 
 function designOf(build: Build, limits: Limits, branches: Design["lvArm"]["branches"]): Design {

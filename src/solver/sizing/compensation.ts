@@ -6,7 +6,7 @@ import type { Finding } from "../standards/finding.ts";
 import { preferredBetween } from "../standards/preferred.ts";
 import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
 import type { Asking } from "./asking.ts";
-import { bandTop, bareReach } from "./bandLimit.ts";
+import { bandTop, bareElement, bareReach } from "./bandLimit.ts";
 import { bodyRule, compensationFormulas, strayRule } from "./compensationFormulas.ts";
 import { found } from "./found.ts";
 import { envelope, footHeightOf } from "./geometry.ts";
@@ -48,7 +48,8 @@ export function compensated(build: Build, limits: Limits): boolean {
   if (limits.ask.j.document.brief.policy.compensation === "never" || bandTop(limits.ask) === 0) return false;
   const diameter = envelope(build.kind.family.bodyDiameter_m, build.strings);
   const Ce = columnStray(limits, build.length_m, diameter);
-  return build.hvArm_ohm > bareReach(limits.ask, Ce) * (1 + 1e-9);
+  const each_ohm = bareElement(limits.ask, build.kind.family.selfCapacitance_F);
+  return build.hvArm_ohm > bareReach(limits.ask, Ce) * (1 + 1e-9) || build.resistance_ohm > each_ohm * (1 + 1e-9);
 }
 
 const classes: readonly DielectricClass[] = ["class1", "mica", "film", "air"];
@@ -80,12 +81,22 @@ export function elementCapacitor(build: Build, limits: Limits, pool: Pool): Elem
   const families = elementFamilies(pool, policy.voltageDerating, peak_V);
   if (families.length === 0) return noCapacitor(peak_V, policy.voltageDerating, pool);
   const choices = families.map((family) => fitted(build, limits, family));
-  const meets = choices.find((choice) => choice.findings.length === 0);
-  return meets ?? choices.reduce((best, choice) => (choice.capacitance_F > best.capacitance_F ? choice : best));
+  return choices.find((choice) => choice.findings.length === 0) ?? choices.reduce(nearer);
+}
+
+/** Where no choice meets both rules: the one that stays within what the source bears, then the larger; else the smaller. */
+function nearer(a: Choice, b: Choice): Choice {
+  const fits = (choice: Choice) => choice.capacitance_F <= choice.target_F * (1 + 1e-9);
+  if (fits(a) !== fits(b)) return fits(a) ? a : b;
+  return a.capacitance_F > b.capacitance_F === fits(a) ? a : b;
+}
+
+interface Choice extends ElementCapacitor {
+  readonly target_F: number;
 }
 
 /** The family's value for this build: the column grows with the capacitor's body, so its stray is taken from there. */
-function fitted(build: Build, limits: Limits, family: CapacitorFamily): ElementCapacitor {
+function fitted(build: Build, limits: Limits, family: CapacitorFamily): Choice {
   const { kind, strings, elements } = build;
   const pitch = pitchWith(kind.pitch_m, family.bodyLength_m);
   const diameter_m = envelope(kind.family.bodyDiameter_m + family.bodyDiameter_m, strings);
@@ -103,12 +114,12 @@ function fitted(build: Build, limits: Limits, family: CapacitorFamily): ElementC
   const target = Math.min(wanted, Math.max(most, bodyRule * Cb));
   const series = coarser(limits.ask.j.document.brief.policy.series, family.series);
   const values = preferredBetween(series, family.least_F, family.greatest_F);
-  const enough =
-    target < wanted ? values.filter((value) => value <= target).at(-1) : values.find((value) => value >= target);
-  const capacitance_F = enough ?? values.at(-1) ?? family.greatest_F;
+  const below = values.filter((value) => value <= target).at(-1) ?? values[0];
+  const above = values.find((value) => value >= target) ?? values.at(-1);
+  const capacitance_F = (target < wanted ? below : above) ?? family.greatest_F;
   const C1 = (strings * (capacitance_F + Cb)) / elements;
   const findings = capacitance_F < wanted * (1 - 1e-9) ? [smallCapacitor(C1, stray_F, most < wanted)] : [];
-  return { family, capacitance_F, length_m, diameter_m, stray_F, findings };
+  return { family, capacitance_F, length_m, diameter_m, stray_F, findings, target_F: target };
 }
 
 function greatestBySource({ ask }: Limits, shape: { n: number; p: number; Cb: number }): number {

@@ -92,6 +92,13 @@ export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind
   };
 }
 
+/** The same without regard to what a rheostat reaches. */
+export const untrimmed = (kind: Kind, limits: Limits): Kind => ({
+  ...kind,
+  greatest_ohm: limits.greatest_ohm,
+  greatestBy: "window",
+});
+
 const up = (x: number): number => Math.ceil(x * (1 - 1e-12));
 
 /**

@@ -1,3 +1,4 @@
+import { bareElement } from "./bandLimit.ts";
 import { gain } from "./gain.ts";
 import { bandBound, bodyNeeded, type Kind, type Limits, leastLength, mostElements } from "./kind.ts";
 
@@ -47,6 +48,7 @@ export class Line {
   private filled: number;
   private at: number;
   private bare = false;
+  private readonly bareElement_ohm: number;
 
   constructor(kind: Kind, strings: number, limits: Limits) {
     this.kind = kind;
@@ -63,6 +65,7 @@ export class Line {
     this.margin = new Float64Array(size);
     this.uncertain = new Float64Array(size);
     this.leastLength_m = leastLength(kind, strings, limits);
+    this.bareElement_ohm = bareElement(limits.ask, kind.family.selfCapacitance_F) * (1 + 1e-12);
     this.governing = new Uint8Array(size);
     this.blockMost = new Float64Array(Math.ceil(size / block));
     this.filled = this.first - 1;
@@ -186,7 +189,9 @@ export class Line {
     if (this.bare && !bare) this.at = offers.length - 1;
     this.bare = bare;
     // The largest value allowed falls as n rises, so the search goes on from where it stood.
-    while (this.at >= 0 && (n * offers[this.at]!.value) / strings > greatest) this.at--;
+    const each = bare ? this.bareElement_ohm : Number.POSITIVE_INFINITY;
+    const tooLarge = (value: number) => (n * value) / strings > greatest || value > each;
+    while (this.at >= 0 && tooLarge(offers[this.at]!.value)) this.at--;
     let at = this.at;
     while (at >= 0 && offers[at]!.count < n * strings) at--;
     if (at < 0) return;

@@ -171,7 +171,7 @@ function tooFew(kind: Kind, found: readonly Range[]): Reason {
 
 const outOfBand = (limits: Limits): Reason => ({
   reason:
-    "The stray capacitance of its column takes too much at the band's top without capacitors across the elements.",
+    "Its own, its column's or the cable's capacitance takes too much at the band's top without capacitors across the elements.",
   actual: null,
   limit: limits.greatest_ohm,
   unit: "ohm",

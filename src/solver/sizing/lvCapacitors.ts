@@ -15,6 +15,8 @@ export interface LvCapacitanceNeed {
   readonly nominal_F: number;
   readonly least_F: number;
   readonly greatest_F: number;
+  /** Greatest deviation over the band that is left, relative. */
+  readonly deviation: number;
   /** Dielectric of the string's capacitors: the same in both arms cancels temperature. */
   readonly dielectric: string;
   /** Two or three fixed capacitors in parallel. */
@@ -49,7 +51,7 @@ export function lvCapacitors(ask: Asking, pool: Pool, need: LvCapacitanceNeed): 
       if (chosen !== null) return { ...built(chosen, need), findings: [] };
     }
   }
-  return { branches: [], parts: [], findings: [noReach(need)] };
+  return { branches: [], parts: [], findings: [noReach(need, tap_V, policy.voltageDerating, ask)] };
 }
 
 function lvCapacitorFamilies(pool: Pool, dielectric: string): CapacitorFamily[] {
@@ -129,11 +131,18 @@ function built(chosen: Chosen, need: LvCapacitanceNeed): Omit<LvCapacitors, "fin
   return { branches, parts: [family, trimmer] };
 }
 
-const noReach = (need: LvCapacitanceNeed): Finding =>
-  found("compensation.reach", "stop", "LV capacitors", {
+function noReach(need: LvCapacitanceNeed, tap_V: number, derating: number, ask: Asking): Finding {
+  const { scaleFactor } = ask.j.document.brief;
+  return found("compensation.reach", "stop", "LV capacitors", {
     actual: need.nominal_F,
     unit: "F",
     reason:
-      `No fixed capacitors, links and trimmer sold reach ${show(need.least_F, "F")} to ${show(need.greatest_F, "F")} ` +
-      "without a hole at the voltage of the tap. Raise C1 or shorten the cable.",
+      `No fixed capacitors, links and trimmer sold for ${show(tap_V / derating, "V")} reach ${show(need.least_F, "F")} to ` +
+      `${show(need.greatest_F, "F")} without a hole. A larger scale factor lowers the voltage of the tap; C1 moves the capacitance.`,
+    cure: {
+      label: "ten times the scale factor",
+      edits: [{ pointer: "/brief/scaleFactor", value: scaleFactor * 10 }],
+      sizeAgain: true,
+    },
   });
+}

@@ -47,6 +47,7 @@ export function lvCapacitanceNeed(given: StringMatched): LvCapacitanceNeed | Fin
     nominal_F,
     least_F: nominal_F - whole_F * share - beside,
     greatest_F: nominal_F + whole_F * share + beside,
+    deviation: 10 ** ((match.flattest_dB ?? 0) / 20) - 1,
     dielectric: given.dielectric,
     counts: given.counts,
   };

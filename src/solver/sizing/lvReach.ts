@@ -1,7 +1,7 @@
 import { preferredSeries } from "../standards/preferred.ts";
 import type { Asking } from "./asking.ts";
 import { coarser, lvResistorFamilies } from "./lvFamilies.ts";
-import { type LvNeed, lvNeed } from "./lvSolution.ts";
+import { type LvNeed, lvNeed, lvSolutionFormulas } from "./lvSolution.ts";
 import { seriesTrim } from "./lvTrim.ts";
 import type { Pool } from "./pool.ts";
 
@@ -15,6 +15,16 @@ export const lvNeedOf = (ask: Asking, hvArm_ohm: number, stringTolerance: number
     leakage_S: ask.leakage_S,
     stringTolerance,
     instrumentSpread: ask.j.instrument.resistanceSpread,
+  });
+
+/** LV arm resistance for nominal parts alone, Ω; null where none exists. */
+export const nominalLvArm = (ask: Asking, hvArm_ohm: number): number | null =>
+  lvSolutionFormulas.nominal.compute({
+    F: ask.j.document.brief.scaleFactor,
+    R1: hvArm_ohm,
+    Rm: ask.j.instrument.resistance_ohm,
+    Rs: ask.seriesProtector_ohm,
+    G: ask.leakage_S,
   });
 
 /**

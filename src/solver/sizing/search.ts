@@ -3,7 +3,7 @@ import { ok, type Result } from "../quantities/result.ts";
 import { bandTop } from "./bandLimit.ts";
 import { alwaysCompensated, capacitorPeak } from "./compensation.ts";
 import { footHeightOf } from "./geometry.ts";
-import { countByFault, type Kind, kindOf, type Limits, mostElements } from "./kind.ts";
+import { countByFault, type Kind, kindOf, type Limits, mostElements, untrimmed } from "./kind.ts";
 import { linesOf, type Picked, pick } from "./pick.ts";
 import { type Pool, refusedFamily } from "./pool.ts";
 import { isOpen, type WindowFound, windowOf } from "./resistanceWindow.ts";
@@ -22,10 +22,14 @@ export function search(document: DividerDocument, pool: Pool, top: number): Resu
   if (!windowed.ok) return windowed;
   const found = windowed.value;
   const limits = limitsOf(document, found, pool);
-  const kinds = pool.resistors
-    .filter((family) => refusedFamily(family) === null)
-    .map((family) => kindOf(family, limits, pool));
-  const picked = pick(isOpen(found) ? linesOf(kinds, limits) : [], limits, top);
+  const families = pool.resistors.filter((family) => refusedFamily(family) === null);
+  const trimmed = families.map((family) => kindOf(family, limits, pool));
+  if (!isOpen(found)) return ok({ found, limits, kinds: trimmed, picked: pick([], limits, top) });
+  const first = pick(linesOf(trimmed, limits), limits, top);
+  if (first.builds.length > 0) return ok({ found, limits, kinds: trimmed, picked: first });
+  // Better a build whose trim falls short, and says so, than none.
+  const kinds = trimmed.map((kind) => untrimmed(kind, limits));
+  const picked = pick(linesOf(kinds, limits), limits, top);
   return ok({ found, limits, kinds, picked });
 }
 

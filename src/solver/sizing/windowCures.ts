@@ -10,14 +10,43 @@ import { systematicShare } from "./windowFormulas.ts";
 /** Room left between two bounds that a cure has parted. */
 const room = 1.25;
 
-/** The cheapest ways to part two bounds that collide: each was tried on the document and opens the window. */
+/** Steps that one cure may take where several bounds stand in the way, and how many cures are shown. */
+const mostSteps = 3;
+const mostCures = 5;
+
+/** The cheapest ways to part the bounds that collide: each was tried on the document and opens the window; fewest steps first. */
 export function windowCures(document: DividerDocument, pool: Pool, found: WindowFound): Cure[] {
-  const { least, greatest } = found;
-  const ways = [...upperWays(document, found, greatest), ...lowerWays(document, found, least, greatest)];
-  return ways.filter(({ edits }) => {
-    const tried = windowOf(edited(document, edits), pool);
-    return tried.ok && isOpen(tried.value);
-  });
+  const cures: Cure[] = [];
+  let waiting: { document: DividerDocument; found: WindowFound; steps: readonly Cure[] }[] = [
+    { document, found, steps: [] },
+  ];
+  for (let step = 0; step < mostSteps && cures.length === 0; step++) {
+    const next: typeof waiting = [];
+    for (const each of waiting) {
+      for (const way of waysOf(each.document, each.found)) {
+        const changed = edited(each.document, way.edits);
+        const tried = windowOf(changed, pool);
+        if (!tried.ok) continue;
+        const steps = [...each.steps, way];
+        if (isOpen(tried.value)) cures.push(joined(steps));
+        else next.push({ document: changed, found: tried.value, steps });
+      }
+    }
+    waiting = next.slice(0, 24);
+  }
+  return cures.slice(0, mostCures);
+}
+
+const waysOf = (document: DividerDocument, found: WindowFound): Cure[] => [
+  ...upperWays(document, found, found.greatest),
+  ...lowerWays(document, found, found.least, found.greatest),
+];
+
+/** One cure of several steps; a later edit of the same key stands for an earlier one. */
+function joined(steps: readonly Cure[]): Cure {
+  const edits = new Map(steps.flatMap((each) => each.edits).map((edit) => [edit.pointer, edit]));
+  const labels = new Map(steps.map((each) => [each.edits[0]?.pointer, each.label]));
+  return { label: [...labels.values()].join("; "), edits: [...edits.values()], sizeAgain: true };
 }
 
 const cure = (label: string, ...edits: Edit[]): Cure => ({ label, edits, sizeAgain: true });

@@ -1,8 +1,10 @@
 import type { Design, Geometry } from "../job/design.ts";
 import type { Part } from "../job/part.ts";
+import { formatShare } from "../quantities/format.ts";
 import type { Finding } from "../standards/finding.ts";
 import { bandTop } from "./bandLimit.ts";
 import { elementCapacitor } from "./compensation.ts";
+import { found } from "./found.ts";
 import { columnGeometry, geometryFormulas } from "./geometry.ts";
 import type { Limits } from "./kind.ts";
 import type { Build } from "./line.ts";
@@ -48,8 +50,24 @@ export function withCapacitors(build: Build, limits: Limits, pool: Pool, bare: F
       lvArm: { ...design.lvArm, branches: [...design.lvArm.branches, ...lv.branches], capacitanceBy: "flattest" },
     },
     parts: unique([...parts, ...lv.parts]),
-    findings: [...chosen.findings, ...lv.findings],
+    findings: [...chosen.findings, ...lv.findings, ...bandFindings(need.deviation, limits)],
   };
+}
+
+/** Even the flattest match leaves more over the band than is wanted: strays are too large against the capacitors. */
+function bandFindings(deviation: number, { ask }: Limits): Finding[] {
+  const wanted = ask.j.document.brief.wantedUncertainty;
+  if (deviation <= wanted) return [];
+  return [
+    found("response.band", "stop", "deviation over the wanted band", {
+      actual: deviation,
+      limit: wanted,
+      sense: "atMost",
+      reason:
+        `Even the flattest LV capacitance leaves ${formatShare(deviation)} over the band; ${formatShare(wanted)} is wanted. ` +
+        "The strays of the column are too large against its capacitors.",
+    }),
+  ];
 }
 
 /** Two banks where one of them open, which doubles the reading of an edge, stays within the instrument's greatest input. */

@@ -67,8 +67,12 @@ export function everyBuild(
           if (brief.waveform.kind === "sine") {
             const stray = verticalCylinderCapacitance(metre(length), metre(wide[p]!), metre(0.12));
             const x = 2 * Math.PI * brief.waveform.frequency_Hz! * R1 * stray;
+            const own = 2 * Math.PI * brief.waveform.frequency_Hz! * R * each.selfCapacitance_F;
             const pole = 2 * Math.PI * brief.waveform.frequency_Hz! * (R1 / (brief.scaleFactor - 1)) * 150e-12;
-            if (Math.max((x * x) / 180, (pole * pole) / 2) > Math.min(brief.wantedUncertainty / 5, 1.5 ** 2 / 180))
+            if (
+              Math.max((x * x) / 180, (pole * pole) / 2, (own * own) / 2) >
+              Math.min(brief.wantedUncertainty / 5, 1.5 ** 2 / 180)
+            )
               continue;
           }
           const t = each.tolerance;
