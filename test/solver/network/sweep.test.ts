@@ -1,27 +1,14 @@
-import {
-  type BigNumber,
-  bignumberDependencies,
-  create,
-  type FactoryFunctionMap,
-  lusolveDependencies,
-  type Matrix,
-  matrixDependencies,
-} from "mathjs";
 import { describe, expect, it } from "vitest";
 import { dcSolution } from "../../../src/solver/network/dcSolution.ts";
 import { elementVoltages } from "../../../src/solver/network/elementVoltages.ts";
 import type { LadderNetwork } from "../../../src/solver/network/ladderNetwork.ts";
 import { bandwidth, sweep } from "../../../src/solver/network/sweep.ts";
+import { plus as plusExact, rational, solveExactly, toNumber } from "../../support/rational.ts";
 import { expectRelative } from "../../support/relative.ts";
 import { randomNetwork, seeded, sketch } from "./invented.ts";
 
-const exact = create({ lusolveDependencies, matrixDependencies, bignumberDependencies } as FactoryFunctionMap, {
-  number: "BigNumber",
-  precision: 40,
-});
-
 /**
- * Independent route: every node in one dense nodal matrix [[G, −B], [B, G]], solved by mathjs in 40-digit arithmetic.
+ * Independent route: every node in one dense nodal matrix [[G, −B], [B, G]], solved in exact fractions.
  * (In double precision the dense solve itself is out by up to 1e-6 of full scale on such networks.) Nodes: tap, inner, output.
  */
 function dense(network: LadderNetwork, f: number) {
@@ -30,13 +17,12 @@ function dense(network: LadderNetwork, f: number) {
   const Rs = network.seriesProtector.resistance_ohm;
   const out = Rs > 0 ? n : 0;
   const size = Rs > 0 ? n + 1 : n;
-  const big = (x: number) => exact.bignumber!(x);
-  const zero = () => Array.from({ length: 2 * size }, () => big(0));
+  const zero = () => Array.from({ length: 2 * size }, () => rational(0));
   const Y = Array.from({ length: 2 * size }, zero);
   const I = zero();
   const plus = (row: number, column: number, G: number, B: number, sign = 1) => {
     const add = (r: number, c: number, x: number) => {
-      Y[r]![c] = Y[r]![c]!.plus(big(x).times(sign));
+      Y[r]![c] = plusExact(Y[r]![c]!, rational(sign * x));
     };
     add(row, column, G);
     add(row + size, column + size, G);
@@ -52,8 +38,8 @@ function dense(network: LadderNetwork, f: number) {
   };
   const drive = (node: number, G: number, B: number) => {
     plus(node, node, G, B);
-    I[node] = I[node]!.plus(big(G));
-    I[node + size] = I[node + size]!.plus(big(B));
+    I[node] = plusExact(I[node]!, rational(G));
+    I[node + size] = plusExact(I[node + size]!, rational(B));
   };
   for (let i = 0; i < n; i++) {
     const [G, B] = [1 / network.resistance_ohm[i]!, w * network.capacitance_F[i]!];
@@ -68,14 +54,13 @@ function dense(network: LadderNetwork, f: number) {
   shunt(network.seriesProtector.at === "divider" ? out : 0, Number.POSITIVE_INFINITY, network.cable.capacitance_F);
   shunt(out, network.instrument.resistance_ohm, network.instrument.capacitance_F);
   if (Rs > 0) branch(0, out, 1 / Rs, 0);
-  const v = exact.lusolve!(exact.matrix!(Y), exact.matrix!(I.map((each) => [each]))) as Matrix;
-  const flat = (v.toArray() as BigNumber[][]).map((row) => Number(row[0]));
+  const flat = solveExactly(Y, I).map(toNumber);
   const node = (i: number) => (i === n ? { re: 1, im: 0 } : { re: flat[i]!, im: flat[i + size]! });
   return { out: { re: flat[out]!, im: flat[out + size]! }, nodes: Array.from({ length: n + 1 }, (_, i) => node(i)) };
 }
 
 describe("frequency sweep of the ladder", () => {
-  it("agrees with a dense nodal solve on random networks of 1 to 10 elements to 1e-11 of full scale", () => {
+  it("agrees with a dense nodal solve on random networks of 1 to 10 elements to 1e-12 of full scale", () => {
     const random = seeded(7);
     for (let round = 0; round < 12; round++) {
       const network = randomNetwork(random, 1 + Math.floor(random() * 10));
@@ -84,8 +69,8 @@ describe("frequency sweep of the ladder", () => {
         const solved = sweep(network, [f])!;
         const { out } = dense(network, f);
         const full = Math.max(1, F * Math.hypot(out.re, out.im));
-        expectRelative(solved.real[0], F * out.re, 1e-11, "dense solve in 40 digits", full);
-        expectRelative(solved.imaginary[0], F * out.im, 1e-11, "dense solve in 40 digits", full);
+        expectRelative(solved.real[0], F * out.re, 1e-12, "dense solve in exact fractions", full);
+        expectRelative(solved.imaginary[0], F * out.im, 1e-12, "dense solve in exact fractions", full);
       }
     }
   });
