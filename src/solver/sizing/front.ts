@@ -1,4 +1,4 @@
-import { gain } from "./gain.ts";
+import { advantage } from "./advantage.ts";
 import type { Build, Line } from "./line.ts";
 
 type Figures = Pick<Build, "elementCount" | "length_m" | "uncertainty" | "loading" | "margin">;
@@ -8,14 +8,14 @@ type Figures = Pick<Build, "elementCount" | "length_m" | "uncertainty" | "loadin
  * value, so the number of different parts is equal.
  */
 export function dominates(a: Figures, b: Figures): boolean {
-  const gains = [
+  const advantages = [
     b.elementCount - a.elementCount,
-    gain(a.length_m, b.length_m),
-    gain(a.uncertainty, b.uncertainty),
-    gain(a.loading, b.loading),
-    gain(b.margin, a.margin),
+    advantage(a.length_m, b.length_m),
+    advantage(a.uncertainty, b.uncertainty),
+    advantage(a.loading, b.loading),
+    advantage(b.margin, a.margin),
   ];
-  return gains.every((each) => each >= 0) && gains.some((each) => each > 0);
+  return advantages.every((each) => each >= 0) && advantages.some((each) => each > 0);
 }
 
 /** The order of the list: fewest elements, shortest, least uncertainty; then a fixed tie-break. */

@@ -1,5 +1,5 @@
+import { advantage } from "./advantage.ts";
 import { bareElement } from "./bandLimit.ts";
-import { gain } from "./gain.ts";
 import { bandBound, bodyNeeded, type Kind, type Limits, leastLength, mostElements } from "./kind.ts";
 
 /** Names of the limit that leaves the smallest margin. */
@@ -125,10 +125,10 @@ export class Line {
     const i = n - this.first;
     const k = m - other.first;
     const count = m * other.strings - n * this.strings;
-    const length = gain(this.length(n), other.length(m));
-    const uncertain = gain(this.uncertain[i]!, other.uncertain[k]!);
-    const load = gain(this.loading(this.hvArm[i]!), other.loading(other.hvArm[k]!));
-    const margin = gain(other.margin[k]!, this.margin[i]!);
+    const length = advantage(this.length(n), other.length(m));
+    const uncertain = advantage(this.uncertain[i]!, other.uncertain[k]!);
+    const load = advantage(this.loading(this.hvArm[i]!), other.loading(other.hvArm[k]!));
+    const margin = advantage(other.margin[k]!, this.margin[i]!);
     if (count < 0 || length < 0 || uncertain < 0 || load < 0 || margin < 0) return false;
     return count > 0 || length > 0 || uncertain > 0 || load > 0 || margin > 0;
   }
