@@ -1,7 +1,7 @@
 /** The solver's only door: the rest of the program imports from here and from nowhere deeper. */
 export * from "./build/partsList.ts";
 export * from "./build/partsListCsv.ts";
-export type { FaultRow } from "./checks/faults.ts";
+export type { FaultRow } from "./checks/faultRow.ts";
 export type { InstrumentRow } from "./checks/instruments.ts";
 export { plainPointer } from "./checks/judging.ts";
 export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";

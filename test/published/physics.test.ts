@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { loadingFormulas } from "../../src/solver/checks/loading.ts";
-import { stressFormulas } from "../../src/solver/checks/stress.ts";
+import { stressFormulas } from "../../src/solver/checks/stressFormulas.ts";
 import { parseQuantity } from "../../src/solver/quantities/parse.ts";
 import { metre } from "../../src/solver/quantities/quantity.ts";
 import { airDensityAtAltitude, pressureShare } from "../../src/solver/standards/airDensity.ts";

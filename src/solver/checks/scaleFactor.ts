@@ -121,7 +121,7 @@ export const scaleFactorFormulas = {
   stringTolerance: formula<"lots", "Re" | "t">({
     id: "scaleFactor.stringTolerance",
     title: "String: standard uncertainty from tolerance",
-    statement: "{=}² = Σ({Re}·{t})² / (3·p·(Σ {Re})²) + (Σ {Re}·{t} / (3·Σ {Re}))²",
+    statement: "{=}² = Σ({Re}·{t})² / (3·{lots}·(Σ {Re})²) + (Σ {Re}·{t} / (3·Σ {Re}))²",
     result: one("u_1", "relative standard uncertainty of the HV arm"),
     inputs: {
       lots: one("p", "strings in parallel"),

@@ -1,12 +1,12 @@
 import { capacitiveLadderRecord } from "../checks/capacitiveLadder.ts";
 import { chargeFormulas } from "../checks/charge.ts";
 import { strayFormulas } from "../checks/columnStrays.ts";
-import { faultRecord } from "../checks/faults.ts";
+import { faultRecord } from "../checks/faultRow.ts";
 import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loading.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
-import { resistanceAbove, stressFormulas } from "../checks/stress.ts";
+import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";

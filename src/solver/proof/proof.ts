@@ -1,5 +1,5 @@
 /** The whole judgement of a design: every figure with its trace, the responses, the findings and the cautions. Plain data. */
-import type { FaultRow } from "../checks/faults.ts";
+import type { FaultRow } from "../checks/faultRow.ts";
 import type { InstrumentRow } from "../checks/instruments.ts";
 import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
@@ -57,9 +57,7 @@ export const figures = {
   "hvArm.resistance_ohm": "HV arm resistance R1",
   "hvArm.capacitance_F": "HV arm capacitance C1, string alone",
   "hvArm.effectiveCapacitance_F": "HV arm capacitance with strays",
-  "hvArm.columnLength_m": "column length",
   "strays.toEarth_F": "stray capacitance of the column to earth",
-  "element.resistance_ohm": "element resistance",
   "element.voltage_Vdc": "element voltage, dc",
   "element.voltage_Vrms": "element voltage, rms",
   "element.voltage_Vpeak": "element voltage, peak",

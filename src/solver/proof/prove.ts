@@ -1,5 +1,6 @@
 import { charge } from "../checks/charge.ts";
-import { faults, worstFault } from "../checks/faults.ts";
+import { worstFault } from "../checks/faultRow.ts";
+import { faults } from "../checks/faults.ts";
 import { instrumentRows } from "../checks/instruments.ts";
 import { insulation } from "../checks/insulation.ts";
 import { judging } from "../checks/judging.ts";

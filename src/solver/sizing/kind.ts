@@ -1,4 +1,4 @@
-import { stressFormulas } from "../checks/stress.ts";
+import { stressFormulas } from "../checks/stressFormulas.ts";
 import type { ResistorFamily } from "../job/part.ts";
 import { metre } from "../quantities/quantity.ts";
 import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
