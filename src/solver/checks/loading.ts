@@ -40,6 +40,21 @@ export const loadingFormulas = {
     source: computedHere("Joule's law"),
     compute: ({ V, Rin }) => (V * V) / Rin,
   }),
+  lvDissipation: formula({
+    id: "loading.lvDissipation",
+    title: "Dissipation of the LV arm",
+    statement: "{=} = ({V} · {R2p} / {Rin})² / {R2}",
+    result: { symbol: "P_2", unit: "W", meaning: "dissipation of the LV resistors at the greatest voltage" },
+    inputs: {
+      V: V("V_rms", "rms at the greatest voltage"),
+      R2p: ohm("R_2p", "LV arm with instrument"),
+      Rin,
+      R2: ohm("R_2", "LV arm resistance fitted"),
+    },
+    holds: "Mean over time.",
+    source: computedHere("Joule's law at the tap"),
+    compute: ({ V, R2p, Rin, R2 }) => ((V * R2p) / Rin) ** 2 / R2,
+  }),
   sag: formula({
     id: "loading.sag",
     title: "Sag of the source under the divider",
@@ -96,6 +111,12 @@ export function loading(j: Judging): void {
   const Rin = "input.resistance_ohm";
   sheet.derive("input.current_A", f.current, { V: "working.peak_V", Rin });
   sheet.derive("input.dissipation_W", f.dissipation, { V: "working.rms_V", Rin });
+  sheet.derive("lvArm.dissipation_W", f.lvDissipation, {
+    V: "working.greatestRms_V",
+    R2p: "lvArm.withInstrument_ohm",
+    Rin,
+    R2: "lvArm.fitted_ohm",
+  });
   sheet.derive("source.sag", f.sag, { Rs: "/brief/source/resistance_ohm", Rin });
   const F = "scaleFactor.predicted";
   sheet.derive("reading.atWorking_V", f.reading, { V: readingBasis(j), F });
