@@ -33,9 +33,18 @@ export function canonical(value: unknown): string {
   );
 }
 
-/** What a search depends on: not the design, the name, the typed texts or what was measured. */
-export const sizingKey = ({ brief, parts, instruments, principal, origins }: DividerDocument, top: number): string =>
-  canonical([brief, parts, instruments, principal, ownOrigins(origins), top]);
+/** What a search depends on: of the design only its protectors and a stated foot height; not the name or the typed texts. */
+export const sizingKey = (document: DividerDocument, top: number): string => {
+  const { brief, parts, instruments, principal, origins } = document;
+  return canonical([brief, parts, instruments, principal, ownOrigins(origins), keptOfDesign(document), top]);
+};
+
+/** Fitted protectors, and the foot height where it is stated rather than drawn by the search. */
+function keptOfDesign({ design, origins, typed }: DividerDocument): unknown {
+  const pointer = "/design/geometry/footHeight_m";
+  const stated = typed[pointer] !== undefined || origins[pointer] === "typed" || origins[pointer] === "measured";
+  return [design?.protectors ?? [], stated ? design?.geometry.footHeight_m : null];
+}
 
 const ownOrigins = (origins: DividerDocument["origins"]): DividerDocument["origins"] =>
   Object.fromEntries(Object.entries(origins).filter(([pointer]) => !pointer.startsWith("/design")));

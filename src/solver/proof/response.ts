@@ -1,3 +1,4 @@
+import { wantedBand } from "../checks/band.ts";
 import { type Judging, plainFinding } from "../checks/judging.ts";
 import { capacitanceOf, protectorCapacitance } from "../checks/lvArm.ts";
 import type { Show } from "../checks/show.ts";
@@ -46,7 +47,7 @@ export function response(
 /** LV capacitances by the three matches, what is fitted, their sum and the pole. Writes `lvArm.capacitance…_F`. */
 function lvCapacitances(j: Judging, network: LadderNetwork, residual: number): void {
   const { sheet, design, instrument, document } = j;
-  const band = bandOf(document.brief.band_Hz, document.brief.waveform.frequency_Hz);
+  const band = wantedBand(document.brief);
   const matches = lvCapacitance(network, band);
   const inputs = { C: "element.capacitance_F", C1: "hvArm.effectiveCapacitance_F", R1: "hvArm.resistance_ohm" };
   const record = responseRecords.lvCapacitance;
@@ -78,12 +79,6 @@ function lvCapacitances(j: Judging, network: LadderNetwork, residual: number): v
   });
 }
 
-/** The band that must be right; a lower end of 0 counts as a millionth of the upper. dc: nothing. */
-export function bandOf(band: readonly [number, number], frequency: number | null): readonly [number, number] {
-  const high = band[1] > 0 ? band[1] : (frequency ?? 0);
-  return [band[0] > 0 ? band[0] : high * 1e-6, high];
-}
-
 function frequencyResponse(
   j: Judging,
   network: LadderNetwork,
@@ -92,7 +87,7 @@ function frequencyResponse(
   show: Show,
 ): FrequencyResponse {
   const { brief } = j.document;
-  const band = bandOf(brief.band_Hz, brief.waveform.frequency_Hz);
+  const band = wantedBand(brief);
   const pole = j.sheet.number("response.lvPole_Hz") ?? 1;
   const decade = (f: number) => 10 ** Math.floor(Math.log10(f));
   const from = decade(Math.min(pole, f3 ?? pole, band[1] > 0 ? Math.max(band[0], 1e-3) : pole) / 10);

@@ -1,3 +1,4 @@
+import { bandTop } from "../checks/band.ts";
 import { protectorCapacitance } from "../checks/lvArm.ts";
 import { show } from "../checks/show.ts";
 import { metre } from "../quantities/quantity.ts";
@@ -15,7 +16,7 @@ const slenderness = 15;
 export function bandLimit(given: WindowGiven): Bound {
   const { ask, bare, column_m } = given;
   const { sheet } = ask.j;
-  const top = bandTop(ask);
+  const top = bandTop(ask.j.document.brief);
   if (top === 0) return none(given, "band", "The band is dc only.");
   if (!bare) return none(given, "band", "Capacitors across the elements carry the band.");
   const footHeight_m = 0.12;
@@ -49,7 +50,7 @@ export function besideLvArm({ j }: Asking): number {
 export function lvPoleLimit(given: WindowGiven): Bound {
   const { ask, bare } = given;
   const { sheet } = ask.j;
-  const top = bandTop(ask);
+  const top = bandTop(ask.j.document.brief);
   if (top === 0) return none(given, "lvPole", "The band is dc only.");
   if (!bare) return none(given, "lvPole", "Capacitors in both arms carry the band.");
   bandShare(ask);
@@ -75,7 +76,7 @@ export function lvPoleLimit(given: WindowGiven): Bound {
 /** Greatest R1 of a divider without capacitors for a column of this stray, Ω: by the string, and by cable and instrument. */
 export function bareReach(ask: Asking, stray_F: number): number {
   const e = acceptedBandShare(ask);
-  const w = 2 * Math.PI * bandTop(ask);
+  const w = 2 * Math.PI * bandTop(ask.j.document.brief);
   const beside = besideLvArm(ask);
   const byLvArm =
     beside === 0 ? Number.POSITIVE_INFINITY : ((ask.tapScaleFactor - 1) * Math.sqrt(2 * e)) / (w * beside);
@@ -84,16 +85,8 @@ export function bareReach(ask: Asking, stray_F: number): number {
 
 /** Greatest resistance of an element without capacitor before its own capacitance bypasses it at the band's top, Ω. */
 export function bareElement(ask: Asking, self_F: number): number {
-  const w = 2 * Math.PI * bandTop(ask);
+  const w = 2 * Math.PI * bandTop(ask.j.document.brief);
   return self_F > 0 ? Math.sqrt(2 * acceptedBandShare(ask)) / (w * self_F) : Number.POSITIVE_INFINITY;
-}
-
-/** Highest frequency that must be right: the band's top, the sine's own, 0.35 over the rise time of a pulse or square. */
-export function bandTop({ j }: Asking): number {
-  const { waveform, band_Hz } = j.document.brief;
-  if (waveform.kind === "dc") return band_Hz[1];
-  const edge = waveform.kind !== "sine" && waveform.riseTime_s ? 0.35 / waveform.riseTime_s : 0;
-  return band_Hz[1] > 0 ? band_Hz[1] : Math.max(waveform.frequency_Hz ?? 0, edge);
 }
 
 /** Deviation accepted of a bare string at the band's top: a fifth of the wanted uncertainty, within the first-order rule. */

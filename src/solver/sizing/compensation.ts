@@ -1,3 +1,4 @@
+import { bandTop } from "../checks/band.ts";
 import { show } from "../checks/show.ts";
 import type { CapacitorFamily, DielectricClass } from "../job/part.ts";
 import { dielectricFits } from "../parts/capacitorFamilies.ts";
@@ -6,7 +7,7 @@ import type { Finding } from "../standards/finding.ts";
 import { preferredBetween } from "../standards/preferred.ts";
 import { verticalCylinderCapacitance } from "../standards/strayCapacitance.ts";
 import type { Asking } from "./asking.ts";
-import { bandTop, bareElement, bareReach } from "./bandLimit.ts";
+import { bareElement, bareReach } from "./bandLimit.ts";
 import { bodyRule, compensationFormulas, strayRule } from "./compensationFormulas.ts";
 import { found } from "./found.ts";
 import { envelope, footHeightOf } from "./geometry.ts";
@@ -45,7 +46,8 @@ export function alwaysCompensated(ask: Asking): boolean {
 /** Whether this build gets capacitors: as above, or a bare string would fall by more than its share at the band's top. */
 export function compensated(build: Build, limits: Limits): boolean {
   if (alwaysCompensated(limits.ask)) return true;
-  if (limits.ask.j.document.brief.policy.compensation === "never" || bandTop(limits.ask) === 0) return false;
+  if (limits.ask.j.document.brief.policy.compensation === "never" || bandTop(limits.ask.j.document.brief) === 0)
+    return false;
   const diameter = envelope(build.kind.family.bodyDiameter_m, build.strings);
   const Ce = columnStray(limits, build.length_m, diameter);
   const each_ohm = bareElement(limits.ask, build.kind.family.selfCapacitance_F);

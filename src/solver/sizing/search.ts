@@ -1,6 +1,6 @@
+import { bandTop } from "../checks/band.ts";
 import type { DividerDocument } from "../job/document.ts";
 import { ok, type Result } from "../quantities/result.ts";
-import { bandTop } from "./bandLimit.ts";
 import { alwaysCompensated, capacitorPeak } from "./compensation.ts";
 import { footHeightOf } from "./geometry.ts";
 import { countByFault, type Kind, kindOf, type Limits, mostElements, untrimmed } from "./kind.ts";
@@ -46,7 +46,11 @@ function limitsOf(document: DividerDocument, { ask, need, least, greatest }: Win
     handOnly: policy.partsInHandOnly,
     capacitor_V: always && capacitor_V > 0 ? capacitor_V : Number.POSITIVE_INFINITY,
     bareAbove_V:
-      always || bandTop(ask) === 0 ? Number.POSITIVE_INFINITY : policy.compensation === "never" ? 0 : capacitor_V,
+      always || bandTop(ask.j.document.brief) === 0
+        ? Number.POSITIVE_INFINITY
+        : policy.compensation === "never"
+          ? 0
+          : capacitor_V,
     faultCount: countByFault(ask),
     footHeight_m: footHeightOf(document),
     share: 1 / (1 + 1 / (ask.tapScaleFactor - 1)),

@@ -1,8 +1,8 @@
+import { bandTop } from "../checks/band.ts";
 import type { Design, Geometry } from "../job/design.ts";
 import type { Part } from "../job/part.ts";
 import { formatShare } from "../quantities/format.ts";
 import type { Finding } from "../standards/finding.ts";
-import { bandTop } from "./bandLimit.ts";
 import { elementCapacitor } from "./compensation.ts";
 import { found } from "./found.ts";
 import { columnGeometry, geometryFormulas } from "./geometry.ts";
@@ -79,7 +79,7 @@ function bankCounts({ ask }: Limits): readonly number[] {
 /** The band that must be right; a lower end of 0 counts as a millionth of the upper. */
 function bandOf({ ask }: Limits): readonly [number, number] {
   const [low] = ask.j.document.brief.band_Hz;
-  const high = bandTop(ask);
+  const high = bandTop(ask.j.document.brief);
   return [low > 0 ? low : high * 1e-6, high];
 }
 

@@ -11,6 +11,8 @@ export type Level = "stop" | "caution" | "clear";
 export interface Edit {
   readonly pointer: string;
   readonly value: unknown;
+  /** Origin of the new value; default *typed*. */
+  readonly origin?: "typed" | "measured" | "catalogue" | "assumed";
 }
 
 /** What would clear a finding, as a button. Empty `edits` with `sizeAgain` asks for a new search. */
