@@ -36,7 +36,8 @@ export function formatQuantity(
   if (!Number.isFinite(value)) throw new RangeError(`cannot show ${value}`);
   const { symbol, prefixes } = units[unit];
   if (unit === "1") return plainNumber(value, Math.max(digits, 4));
-  if (value === 0 || !prefixes) return joined(figure(value, digits, trailing), symbol);
+  if (value === 0) return joined("0", symbol);
+  if (!prefixes) return joined(figure(value, digits, trailing), symbol);
   const [mantissa, exponent] = scaled(value, digits);
   const prefix = engineering.find(([power]) => power === exponent)![1];
   return joined(figure(mantissa, digits, trailing), `${prefix}${symbol}`);

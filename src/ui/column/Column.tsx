@@ -205,9 +205,9 @@ function Foot({ document: document_, scale }: { readonly document: DividerDocume
   const box = Math.max(8, Math.min(26, (floor - tap) * 0.5));
   const instrument = document_.instruments.find((each) => each.id === document_.principal);
   return (
-    <g className="foot">
+    <g className="base">
       <line className="wire" x1={axis} x2={axis} y1={tap} y2={floor - box} />
-      <circle className="tap" cx={axis} cy={tap} r={2.5} />
+      <circle className="tap-dot" cx={axis} cy={tap} r={2.5} />
       <text x={axis + 18} y={tap + 12}>
         tap
       </text>

@@ -119,9 +119,9 @@ const inputText = (input: WhyInput): string => valueText(input.value, input.unit
 
 function valueText(value: SheetValue, unit: string): string {
   if (value === null) return "–";
-  if (typeof value === "number") return numberText(value, unit, 5);
+  if (typeof value === "number") return numberText(value, unit, 6, false);
   const list = value as readonly (number | null)[];
   const first = list[0];
   const same = typeof first === "number" && list.every((each) => each === first);
-  return same ? `${list.length} × ${numberText(first, unit, 4)}` : `${list.length} values`;
+  return same ? `${list.length} × ${numberText(first, unit, 5, false)}` : `${list.length} values`;
 }

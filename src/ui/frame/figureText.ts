@@ -18,10 +18,10 @@ export function figureText(path: string, value: SheetValue, digits = 3): string 
 }
 
 /** A number in a unit of the sheet; small plain numbers as a share. */
-export function numberText(value: number, unit: string, digits = 3): string {
+export function numberText(value: number, unit: string, digits = 3, trailing = true): string {
   if (unit === "share") return formatShare(value, digits);
   if (unit === "dB") return `${Number(value.toPrecision(digits))}\u2009dB`.replace("-", "\u2212");
   if (unit === "1/K" || unit === "1/V") return `${formatQuantity(value * 1e6, "1")}\u2009ppm${unit.slice(1)}`;
   if (unit === "1" && value !== 0 && Math.abs(value) < 0.1) return formatShare(value, digits);
-  return formatQuantity(value, unit in units ? (unit as UnitName) : "1", { digits });
+  return formatQuantity(value, unit in units ? (unit as UnitName) : "1", { digits, trailing });
 }
