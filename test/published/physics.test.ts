@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { loadingFormulas } from "../../src/solver/checks/loading.ts";
+import { loadingFormulas } from "../../src/solver/checks/loadingFormulas.ts";
 import { stressFormulas } from "../../src/solver/checks/stressFormulas.ts";
 import { parseQuantity } from "../../src/solver/quantities/parse.ts";
 import { metre } from "../../src/solver/quantities/quantity.ts";

@@ -21,7 +21,8 @@ export function instrumentRows(j: Judging): InstrumentRow[] {
   const R1 = sheet.number("hvArm.resistance_ohm") as number;
   const R2 = sheet.number("lvArm.fitted_ohm");
   const principal = sheet.number("scaleFactor.predicted") as number;
-  const working = sheet.number(readingBasis(j)) as number;
+  const polarity = sheet.number("/brief/waveform/nominal_V:polarity") as number;
+  const working = polarity * (sheet.number(readingBasis(j)) as number);
   const greatest = sheet.number("working.greatest_Vpeak") as number;
   const Rs = seriesResistance(j);
   return j.document.instruments.map((each) => {

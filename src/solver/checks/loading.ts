@@ -1,94 +1,8 @@
 import type { Cure } from "../standards/finding.ts";
-import { formula } from "../standards/formula.ts";
-import { computedHere, practice } from "../standards/source.ts";
+import { practice } from "../standards/source.ts";
 import { type Judging, judgeLimit, plainFinding } from "./judging.ts";
+import { loadingFormulas } from "./loadingFormulas.ts";
 import type { Show } from "./show.ts";
-
-const ohm = (symbol: string, meaning: string) => ({ symbol, unit: "ohm", meaning });
-const V = (symbol: string, meaning: string) => ({ symbol, unit: "V", meaning });
-const one = (symbol: string, meaning: string) => ({ symbol, unit: "1", meaning });
-const Rin = ohm("R_in", "input resistance of the divider");
-
-export const loadingFormulas = {
-  inputResistance: formula({
-    id: "loading.inputResistance",
-    title: "Input resistance",
-    statement: "{=} = {R1} + {R2p}",
-    result: Rin,
-    inputs: { R1: ohm("R_1", "HV arm resistance"), R2p: ohm("R_2p", "LV arm with instrument") },
-    holds: "dc.",
-    source: computedHere("series sum"),
-    compute: ({ R1, R2p }) => R1 + R2p,
-  }),
-  current: formula({
-    id: "loading.current",
-    title: "Input current",
-    statement: "{=} = {V} / {Rin}",
-    result: { symbol: "I", unit: "A", meaning: "current through the string" },
-    inputs: { V: V("V_pk", "working voltage, peak"), Rin },
-    holds: "Resistive part; the capacitive part of an edge comes on top.",
-    source: computedHere("Ohm's law"),
-    compute: ({ V, Rin }) => V / Rin,
-  }),
-  dissipation: formula({
-    id: "loading.dissipation",
-    title: "Dissipation of the whole divider",
-    statement: "{=} = {V}² / {Rin}",
-    result: { symbol: "P", unit: "W", meaning: "dissipation at working voltage" },
-    inputs: { V: V("V_rms", "working voltage, rms"), Rin },
-    holds: "Mean over time; zero for single shots.",
-    source: computedHere("Joule's law"),
-    compute: ({ V, Rin }) => (V * V) / Rin,
-  }),
-  lvDissipation: formula({
-    id: "loading.lvDissipation",
-    title: "Dissipation of the LV arm",
-    statement: "{=} = ({V} · {R2p} / {Rin})² / {R2}",
-    result: { symbol: "P_2", unit: "W", meaning: "dissipation of the LV resistors at the greatest voltage" },
-    inputs: {
-      V: V("V_rms", "rms at the greatest voltage"),
-      R2p: ohm("R_2p", "LV arm with instrument"),
-      Rin,
-      R2: ohm("R_2", "LV arm resistance fitted"),
-    },
-    holds: "Mean over time.",
-    source: computedHere("Joule's law at the tap"),
-    compute: ({ V, R2p, Rin, R2 }) => ((V * R2p) / Rin) ** 2 / R2,
-  }),
-  sag: formula({
-    id: "loading.sag",
-    title: "Sag of the source under the divider",
-    statement: "{=} = {Rs} / ({Rs} + {Rin})",
-    result: one("ε", "relative sag"),
-    inputs: { Rs: ohm("R_src", "source resistance"), Rin },
-    holds: "Linear source.",
-    source: computedHere("source resistance in series with the divider"),
-    compute: ({ Rs, Rin }) => Rs / (Rs + Rin),
-  }),
-  currentAllowed: formula({
-    id: "loading.currentAllowed",
-    title: "Current the divider may draw",
-    statement: "{=} = {k} · {I}",
-    result: { symbol: "I_max", unit: "A", meaning: "a fifth of the source's limit" },
-    inputs: {
-      k: one("k", "share of the limit, 0.2"),
-      I: { symbol: "I_lim", unit: "A", meaning: "current limit of the source" },
-    },
-    holds: "A regulated supply stays in regulation up to its limit, then folds.",
-    source: practice("at most a fifth of the supply's limit"),
-    compute: ({ k, I }) => k * I,
-  }),
-  reading: formula({
-    id: "loading.reading",
-    title: "Reading of the instrument",
-    statement: "{=} = {V} / {F}",
-    result: V("v", "voltage at the instrument"),
-    inputs: { V: V("V", "voltage at the electrode"), F: one("F", "scale factor") },
-    holds: "Within the divider's band.",
-    source: computedHere("scale factor: input over output"),
-    compute: ({ V, F }) => V / F,
-  }),
-};
 
 /** What the instrument shows of the waveform: dc, rms, or the peak on a scope. */
 export function readingBasis(j: Judging): "working.dc_V" | "working.rms_V" | "working.peak_V" {
@@ -119,8 +33,17 @@ export function loading(j: Judging): void {
   });
   sheet.derive("source.sag", f.sag, { Rs: "/brief/source/resistance_ohm", Rin });
   const F = "scaleFactor.predicted";
-  sheet.derive("reading.atWorking_V", f.reading, { V: readingBasis(j), F });
-  sheet.derive("reading.atGreatest_Vpeak", f.reading, { V: "working.greatest_Vpeak", F });
+  const basis = readingBasis(j);
+  const negative = document.brief.waveform.nominal_V < 0 && basis !== "working.rms_V";
+  sheet.given("/brief/waveform/nominal_V:polarity", negative ? -1 : 1);
+  sheet.given("/brief/waveform/nominal_V:magnitude", 1);
+  sheet.derive("reading.atWorking_V", f.reading, { s: "/brief/waveform/nominal_V:polarity", V: basis, F });
+  sheet.derive("reading.magnitude_V", f.reading, { s: "/brief/waveform/nominal_V:magnitude", V: basis, F });
+  sheet.derive("reading.atGreatest_Vpeak", f.reading, {
+    s: "/brief/waveform/nominal_V:magnitude",
+    V: "working.greatest_Vpeak",
+    F,
+  });
 }
 
 const sizeAgain: Cure = { label: "size again", edits: [], sizeAgain: true };
@@ -129,6 +52,7 @@ export function judgeLoading(j: Judging, show: Show): void {
   const { sheet, document, instrument } = j;
   const { source, policy, wantedUncertainty } = document.brief;
   sheet.given("/brief/policy/allowedSag", policy.allowedSag ?? wantedUncertainty);
+  const sagging = sheet.number("source.sag") ?? 0;
   judgeLimit(
     j,
     {
@@ -141,7 +65,9 @@ export function judgeLoading(j: Judging, show: Show): void {
       statedMargin: 0,
       reason: (actual, limit) =>
         `The divider pulls the source down by ${actual}; ${limit} is accepted. ` +
-        "More HV arm resistance lowers it, or correct for it with the two-load method.",
+        (sagging > 0.5
+          ? `More than half is lost: it cannot be read. Raise R1 above ${show(source.resistance_ohm * (1 / (policy.allowedSag ?? wantedUncertainty) - 1), "ohm")}.`
+          : "More HV arm resistance lowers it, or correct for it with the two-load method."),
       source: loadingFormulas.sag.source,
       cure: sizeAgain,
     },
@@ -198,7 +124,7 @@ export function judgeLoading(j: Judging, show: Show): void {
     {
       id: "instrument.range",
       what: "reading within the locked range",
-      path: "reading.atWorking_V",
+      path: "reading.magnitude_V",
       limitPath: `/instruments/${at}/range_V`,
       unit: "V",
       sense: "atMost",
@@ -208,6 +134,16 @@ export function judgeLoading(j: Judging, show: Show): void {
     },
     show,
   );
+  if (instrument.readingAccuracy === 0) {
+    plainFinding(j, {
+      id: "instrument.accuracyNotStated",
+      level: "caution",
+      what: "accuracy of the instrument not stated",
+      reason:
+        "0 would be a claim of perfection: it counts as not stated. Type the accuracy of the reading, at least its resolution.",
+      source: practice("a measurement is no better than its instrument"),
+    });
+  }
   if (instrument.readingAccuracy > wantedUncertainty) {
     plainFinding(j, {
       id: "instrument.accuracy",

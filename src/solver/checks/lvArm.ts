@@ -124,6 +124,18 @@ export function judgeLvArm(j: Judging): void {
       });
     }
   }
+  const resistive = lvArm.branches.filter(isResistive);
+  if (resistive.length > 0 && resistive.every((branch) => branch.series.every((item) => "rheostat" in item))) {
+    plainFinding(j, {
+      id: "lvArm.rheostatAlone",
+      level: "stop",
+      what: "a trimmer alone as the LV arm",
+      reason:
+        "A lifted wiper or a turn to its end leaves no defined LV arm. Fit fixed resistors across it, and trim in one branch only.",
+      source: practice("fixed resistors carry the LV arm, a trimmer adjusts it"),
+      cure: { label: "size again", edits: [], sizeAgain: true },
+    });
+  }
   if (lvArm.stays === "withInstrument") {
     plainFinding(j, {
       id: "lvArm.stays",

@@ -84,6 +84,21 @@ function instrumentFit(j: Judging, show: Show): void {
 function voltages(j: Judging, show: Show): void {
   const { document, instrument } = j;
   const { waveform } = document.brief;
+  const duty = (waveform.width_s ?? 0) * (waveform.repetition_Hz ?? 0);
+  if (waveform.kind === "pulse" && duty > 1) {
+    plainFinding(j, {
+      id: "voltage.duty",
+      level: "stop",
+      what: "pulse width times repetition",
+      actual: duty,
+      limit: 1,
+      unit: "1",
+      sense: "atMost",
+      margin: 1 - duty,
+      reason: `A pulse of ${show(waveform.width_s ?? 0, "s")} cannot come ${show(waveform.repetition_Hz ?? 0, "Hz")} often: the duty is 0 to 1. Dissipation is judged as if it stood all the time.`,
+      source: computedHere("duty of a pulse train"),
+    });
+  }
   const stated = Math.abs(waveform.nominal_V);
   const peak = j.sheet.number("working.peak_V") as number;
   if (peak * 1.25 <= instrument.greatestInput_Vpeak) {

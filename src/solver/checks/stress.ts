@@ -50,6 +50,7 @@ export function judgeStress(j: Judging, working: WorkingVoltages, show: Show): v
     { d: "/brief/policy/powerDerating", P: "element.ratedDissipation_W" },
     n,
   );
+  sheet.deriveEach("element.criticalResistance_ohm", f.critical, { dv: d, Vlim, P: "element.dissipationLimit_W" }, n);
   stressFindings(j, working, show);
 }
 
@@ -89,7 +90,7 @@ function stressFindings(j: Judging, working: WorkingVoltages, show: Show): void 
   };
   const text = (basis: string) => (actual: string, limit: string, element: number | null) =>
     `Element ${element} stands ${actual} ${basis} at the greatest voltage; the part is rated ${limit} on this basis, ` +
-    `and ${Math.round(policy.voltageDerating * 100)} % of it is to be used.`;
+    `and ${Math.round(policy.voltageDerating * 100)} % of it is to be used. ${whichRules(j, element, show)}`;
   if (working.greatestRms_V > 0) {
     judgeLimit(
       j,
@@ -132,4 +133,13 @@ function stressFindings(j: Judging, working: WorkingVoltages, show: Show): void 
     },
     show,
   );
+}
+
+/** Whether voltage or dissipation rules this value, and where the two cross. */
+function whichRules(j: Judging, element: number | null, show: Show): string {
+  const i = (element ?? 1) - 1;
+  const crossing = j.sheet.array("element.criticalResistance_ohm")[i];
+  if (crossing === null || crossing === undefined) return "";
+  const R = j.design.hvArm.elements[i]!.resistance_ohm;
+  return `Above the critical resistance of ${show(crossing, "ohm")} the voltage rules, below it the dissipation: ${R >= crossing ? "the voltage" : "the dissipation"} here.`;
 }

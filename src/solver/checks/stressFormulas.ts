@@ -87,6 +87,20 @@ export const stressFormulas = {
     source: iec60115,
     compute: ({ d, P }) => d * P,
   }),
+  critical: formula({
+    id: "stress.criticalResistance",
+    title: "Critical resistance, derated",
+    statement: "{=} = ({dv} · {Vlim})² / {P}",
+    result: ohm("R_crit", "below it dissipation rules, above it the limiting voltage"),
+    inputs: {
+      dv: one("d_v", "voltage derating"),
+      Vlim: V("V_lim", "limiting element voltage"),
+      P: W("P_der", "derated dissipation limit"),
+    },
+    holds: "Where the derated voltage and the derated dissipation are reached together.",
+    source: iec60115,
+    compute: ({ dv, Vlim, P }) => (P > 0 ? (dv * Vlim) ** 2 / P : null),
+  }),
   hottest: formula({
     id: "stress.hottestAmbient",
     title: "Hottest ambient",

@@ -3,8 +3,9 @@ import { chargeFormulas } from "../checks/charge.ts";
 import { strayFormulas } from "../checks/columnStrays.ts";
 import { faultRecord } from "../checks/faultRow.ts";
 import { insulationFormulas } from "../checks/insulation.ts";
-import { loadingFormulas } from "../checks/loading.ts";
+import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
+import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
@@ -25,6 +26,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     capacitanceFormulas,
     insulationFormulas,
     chargeFormulas,
+    protectorFormulas,
     responseFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])

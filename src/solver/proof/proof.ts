@@ -64,6 +64,7 @@ export const figures = {
   "element.voltageLimit_V": "element voltage limit, derated",
   "element.dissipation_W": "element dissipation",
   "element.dissipationLimit_W": "element dissipation limit, derated",
+  "element.criticalResistance_ohm": "critical resistance, derated",
   "element.nodePotential_V": "potential of the element's upper end",
   "lvArm.wanted_ohm": "LV arm resistance wanted",
   "lvArm.fitted_ohm": "LV arm resistance fitted",

@@ -8,6 +8,7 @@ import { judgeLoading, loading } from "../checks/loading.ts";
 import { judgeLvArm } from "../checks/lvArm.ts";
 import { misuse } from "../checks/misuse.ts";
 import { networkOf } from "../checks/networkOf.ts";
+import { judgeProtectors } from "../checks/protectors.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
 import { show } from "../checks/show.ts";
 import { judgeStress } from "../checks/stress.ts";
@@ -40,6 +41,7 @@ export function prove(document: DividerDocument): Result<Proof> {
   judgeLoading(j, show);
   insulation(j, show);
   judgeLvArm(j);
+  judgeProtectors(j, show);
   misuse(j, show);
   const rows = faults(j, string, show);
   charge(j, show);
