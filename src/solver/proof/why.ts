@@ -9,7 +9,11 @@ export interface WhyInput extends FormulaInput {
   readonly name: string;
   readonly path: string;
   readonly value: number | readonly (number | null)[] | null;
-  /** Origin of a given; null for a figure that has a why of its own. */
+  /** A statement with each `{name}` replaced by its word: symbols, or numbers. */
+export const filled = (statement: string, words: Readonly<Record<string, string>>): string =>
+  statement.replace(/\{([^}]+)\}/g, (_, name: string) => words[name] ?? name);
+
+/** Origin of a given; null for a figure that has a why of its own. */
   readonly origin: Origin | null;
 }
 

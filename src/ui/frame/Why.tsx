@@ -1,5 +1,5 @@
 import { useEffect, useRef } from "react";
-import { citation, type SheetValue, type WhyInput, type Why as WhyOf, why } from "../../solver/index.ts";
+import { citation, filled, type SheetValue, type WhyInput, type Why as WhyOf, why } from "../../solver/index.ts";
 import { numberText } from "./figureText.ts";
 import { useJudged, useLooking, useSession } from "./session.ts";
 import { Typeset } from "./Typeset.tsx";
@@ -110,10 +110,6 @@ function Laid({ found, onGo }: { readonly found: WhyOf; readonly onGo: (path: st
     </>
   );
 }
-
-/** The statement with each `{name}` replaced. */
-const filled = (statement: string, words: Readonly<Record<string, string>>): string =>
-  statement.replace(/\{([^}]+)\}/g, (_, name: string) => words[name] ?? name);
 
 const inputText = (input: WhyInput): string => valueText(input.value, input.unit);
 
