@@ -1,4 +1,4 @@
-import { citation, type Why, why as whyOf } from "../../solver/index.ts";
+import { citation, filled, type Why, why as whyOf } from "../../solver/index.ts";
 import { runJob } from "../../work/runJob.ts";
 import { readArguments, wholeNumber } from "../arguments.ts";
 import { needsDesign, openDocument, refusalText } from "../openDocument.ts";
@@ -35,13 +35,14 @@ function laidOut(found: Why): string {
   const one = (value: unknown) =>
     Array.isArray(value) ? `${value.length} values` : value === null ? "none" : String(value);
   if (found.kind === "given") return `${found.path} = ${one(found.value)} (${found.origin})\n`;
+  const symbols = Object.fromEntries(found.inputs.map((input) => [input.name, input.symbol]));
   const inputs = found.inputs.map(
     (input) =>
       `  ${input.symbol} = ${one(input.value)} ${input.unit}  ${input.meaning}  [${input.origin ?? input.path}]`,
   );
   return [
     `${found.title}: ${found.symbol} = ${one(found.value)} ${found.unit}`,
-    `  ${found.statement}`,
+    `  ${filled(found.statement, { ...symbols, "=": found.symbol })}`,
     ...inputs,
     ...(found.method === null
       ? []

@@ -9,11 +9,7 @@ export interface WhyInput extends FormulaInput {
   readonly name: string;
   readonly path: string;
   readonly value: number | readonly (number | null)[] | null;
-  /** A statement with each `{name}` replaced by its word: symbols, or numbers. */
-export const filled = (statement: string, words: Readonly<Record<string, string>>): string =>
-  statement.replace(/\{([^}]+)\}/g, (_, name: string) => words[name] ?? name);
-
-/** Origin of a given; null for a figure that has a why of its own. */
+  /** Origin of a given; null for a figure that has a why of its own. */
   readonly origin: Origin | null;
 }
 
@@ -86,6 +82,10 @@ export function why(path: string, sheet: SheetData, origins: Origins = {}, index
     residualBound: solution?.residualBound ?? null,
   };
 }
+
+/** A statement with each `{name}` replaced by its word: symbols, or numbers. */
+export const filled = (statement: string, words: Readonly<Record<string, string>>): string =>
+  statement.replace(/\{([^}]+)\}/g, (_, name: string) => words[name] ?? name);
 
 /** Origin of a given: of the longest pointer in the map that covers it; a pointer not listed counts as typed. */
 function originOf(path: string, origins: Origins): Origin {
