@@ -3,6 +3,7 @@ import { checkAt, defaultAt } from "../file/checkAt.ts";
 import { inconsistency } from "../file/consistent.ts";
 import { isAtOrBelow, keysOf, valueAt, withoutItemAt, withValueAt } from "../file/pointer.ts";
 import type { DividerDocument, Origin, Result } from "../solver/index.ts";
+import { assumedAnew } from "./assumedDefaults.ts";
 
 export interface Change {
   readonly pointer: string;
@@ -63,7 +64,8 @@ const isBookkeeping = (pointer: string): boolean =>
 function finished(document: DividerDocument, pointer: string): Result<DividerDocument> {
   const own = isAtOrBelow(pointer, "/design") && !isAtOrBelow(pointer, "/design/follows");
   const { design } = document;
-  const value = own && design?.follows === true ? { ...document, design: { ...design, follows: false } } : document;
+  const stands = own && design?.follows === true ? { ...document, design: { ...design, follows: false } } : document;
+  const value = assumedAnew(stands, pointer);
   const fault = inconsistency(value);
   return fault === null ? { ok: true, value } : { ok: false, error: fault };
 }

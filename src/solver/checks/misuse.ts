@@ -56,6 +56,7 @@ function instrumentFit(j: Judging, show: Show): void {
       },
     });
   }
+  wrongFunction(j);
   if (sheet.number("lvArm.wanted_ohm") === null) {
     const R1 = sheet.number("hvArm.resistance_ohm") as number;
     const alone = 1 + R1 / instrument.resistance_ohm;
@@ -81,7 +82,54 @@ function instrumentFit(j: Judging, show: Show): void {
   }
 }
 
+/** A dc function on an alternating voltage reads its mean; an ac function on dc reads nothing; a meter cannot follow a pulse. */
+function wrongFunction(j: Judging): void {
+  const { instrument, document } = j;
+  const { kind } = document.brief.waveform;
+  const scope = instrument.function.startsWith("scope");
+  if (scope || instrument.function === "data logger") return;
+  const ac = instrument.function.endsWith(" ac");
+  const reason =
+    kind === "dc" && ac
+      ? `${instrument.name} reads alternating voltage only: on dc it shows nothing while the voltage stands.`
+      : kind !== "dc" && !ac
+        ? `${instrument.name} reads the mean, which is nought for an alternating voltage and tells nothing of a pulse's peak.`
+        : (kind === "pulse" || kind === "recorded") && ac
+          ? `${instrument.name} cannot follow a pulse.`
+          : null;
+  if (reason === null) return;
+  plainFinding(j, {
+    id: "instrument.function",
+    level: "stop",
+    what: "function of the instrument",
+    reason: `${reason} Choose another function, or an oscilloscope.`,
+    source: practice("the function must fit the waveform"),
+  });
+}
+
+/** An alternating voltage whose rms or peak was not stated: both consequences are said. */
+function rmsOrPeak(j: Judging, show: Show): void {
+  const { waveform } = j.document.brief;
+  if (waveform.kind !== "sine" || j.document.origins["/brief/waveform/statedAs"] !== "assumed") return;
+  const V = Math.abs(waveform.nominal_V);
+  const isRms = waveform.statedAs === "rms";
+  plainFinding(j, {
+    id: "voltage.statedAs",
+    level: "caution",
+    what: "rms or peak?",
+    reason:
+      `${show(V, "V")} was not said to be rms or peak. As rms the string must stand ${show(V * Math.SQRT2, "V")} peak, ` +
+      `as a peak ${show(V, "V")}; it is taken as ${isRms ? "rms" : "a peak"}.`,
+    source: practice("state rms or peak of an alternating voltage"),
+    cure: {
+      label: isRms ? "it is the peak" : "it is rms",
+      edits: [{ pointer: "/brief/waveform/statedAs", value: isRms ? "peak" : "rms" }],
+    },
+  });
+}
+
 function voltages(j: Judging, show: Show): void {
+  rmsOrPeak(j, show);
   const { document, instrument } = j;
   const { waveform } = document.brief;
   const duty = (waveform.width_s ?? 0) * (waveform.repetition_Hz ?? 0);

@@ -14,7 +14,7 @@ export const screens: readonly (readonly [ScreenName, string, string])[] = [
 
 /** Which screen a finding belongs to. */
 const home = (finding: Finding): ScreenName => {
-  if (/^(voltage|surroundings|instrument\.accuracy)/.test(finding.id)) return "ask";
+  if (/^(voltage|surroundings|instrument\.(accuracy|function))/.test(finding.id)) return "ask";
   if (/^source\.earth/.test(finding.id)) return "route";
   if (/^(scaleFactor|lvArm|dielectric|source\.(sag|current))/.test(finding.id)) return "size";
   return "prove";
