@@ -16,6 +16,7 @@ export function contentBand_Hz(waveform: Raw): readonly [number, number] {
   if (waveform.kind === "sine") return [frequency ?? 50, frequency ?? 50];
   if (waveform.kind === "square") return [frequency ?? 1000, Math.max(edge, frequency ?? 1000)];
   if (waveform.kind !== "pulse") return [0, 0];
-  const lowest = Math.min(1 / (2 * Math.PI * 10 * (positive(waveform.width_s) ?? 50e-6)), highest_Hz);
+  const droop = 1 / (2 * Math.PI * 10 * (positive(waveform.width_s) ?? 50e-6));
+  const lowest = Math.min(Number(droop.toPrecision(2)), highest_Hz);
   return [lowest, Math.max(edge, lowest)];
 }

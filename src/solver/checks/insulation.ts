@@ -82,6 +82,7 @@ export function insulation(j: Judging, show: Show): void {
   const { surroundings } = document.brief;
   const n = design.hvArm.elements.length;
   const f = insulationFormulas;
+  sheet.given("/design/geometry/columnLength_m", design.geometry.columnLength_m);
   sheet.given("/brief/surroundings/pollutionDegree", surroundings.pollutionDegree);
   sheet.given("/brief/surroundings/materialGroup", groups.indexOf(surroundings.materialGroup) + 1);
   sheet.given("/brief/surroundings/altitude_m", surroundings.altitude_m);

@@ -96,7 +96,7 @@ export function formatExact(value: number, unit: UnitName): string {
   if (value === 0 || !prefixes) return symbol === "" ? String(value) : `${value} ${symbol}`;
   // A resistance of "m" ohms would be asked about: below 1 Ω it is written plainly.
   if (unit === "ohm" && Math.abs(value) < 1) return `${value} ${symbol}`;
-  for (const [power, prefix] of engineering) {
+  for (const [power, prefix] of [...engineering].reverse()) {
     const size = Math.abs(value) / 10 ** power;
     if (size < 1 || size >= 1000 || "aP".includes(prefix || "-")) continue;
     const digits = shifted(String(value), -power);

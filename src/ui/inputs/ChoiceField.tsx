@@ -1,6 +1,7 @@
 import { useId } from "react";
 import { useDocument, useInputs } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
+import { originAt } from "./originAt.ts";
 import "./inputs.css";
 
 interface Props<T extends string | number | boolean> {
@@ -14,7 +15,7 @@ interface Props<T extends string | number | boolean> {
 export function ChoiceField<T extends string | number | boolean>({ label, pointer, value, options }: Props<T>) {
   const id = useId();
   const apply = useApply();
-  const origin = useDocument().origins[pointer] ?? "typed";
+  const origin = originAt(useDocument().origins, pointer);
   const locked = useInputs((state) => state.file.readOnly !== null);
   return (
     <div className={origin === "assumed" ? "field assumed" : "field"}>

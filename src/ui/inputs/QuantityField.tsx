@@ -13,6 +13,7 @@ import {
 } from "../../solver/index.ts";
 import { useDocument, useInputs, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
+import { originAt } from "./originAt.ts";
 import "./inputs.css";
 
 interface Props {
@@ -39,7 +40,7 @@ export function QuantityField(props: Props) {
   const id = useId();
   const document_ = useDocument();
   const locked = useInputs((state) => state.file.readOnly !== null);
-  const origin = document_.origins[pointer] ?? "typed";
+  const origin = originAt(document_.origins, pointer);
   const kept = document_.typed[pointer] ?? textOf(value, unit, share);
   const [text, setText] = useState(kept);
   const [parsed, setParsed] = useState<Parsed | null>(null);
