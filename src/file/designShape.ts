@@ -168,6 +168,11 @@ const geometryShape = object<Geometry>("Lengths in metres.", {
     aboveLeast: true,
     fallback: 0.4,
   }),
+  fieldCase: choice<Geometry["fieldCase"]>(
+    "Field case that clearances are judged by.",
+    { inhomogeneous: "case A, unless a field solve shows otherwise", homogeneous: "case B, claimed" },
+    "inhomogeneous",
+  ),
   pitch_m: quantity("m", "Body to body along the column.", { aboveLeast: true, fallback: 0.015 }),
   electrode: electrodeShape,
   shield: orNull(

@@ -193,6 +193,7 @@ export const inventedDocument: DividerDocument = {
       columnLength_m: 0.3,
       footHeight_m: 0.08,
       bandFraction: 0.1,
+      fieldCase: "inhomogeneous",
       pitch_m: 0.02,
       electrode: { kind: "toroid", radius_m: 0.06, tubeRadius_m: 0.015, thickness_m: 0.03, offset_m: 0.02 },
       shield: null,

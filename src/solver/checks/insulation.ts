@@ -107,7 +107,26 @@ export function insulation(j: Judging, show: Show): void {
     { a: "insulation.elementTableCreepage_m", b: "insulation.elementClearance_m" },
     n,
   );
+  fieldCase(j);
   insulationFindings(j, show, beyond);
+}
+
+/** A homogeneous field may be claimed only where a field solve shows it; along a column of bodies and leads it never holds. */
+function fieldCase(j: Judging): void {
+  if (j.design.geometry.fieldCase !== "homogeneous") return;
+  plainFinding(j, {
+    id: "clearance.fieldCase",
+    level: "stop",
+    what: "homogeneous field claimed",
+    reason:
+      "Case B of the clearance tables holds only where a field solve shows a homogeneous field. " +
+      "Bodies, leads and solder joints make the field along a string inhomogeneous: case A was used.",
+    source: insulationFormulas.clearance.source,
+    cure: {
+      label: "judge by the inhomogeneous case",
+      edits: [{ pointer: "/design/geometry/fieldCase", value: "inhomogeneous" }],
+    },
+  });
 }
 
 function insulationFindings(j: Judging, show: Show, beyond: boolean): void {

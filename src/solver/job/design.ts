@@ -66,6 +66,8 @@ export interface Geometry {
   readonly columnLength_m: number;
   readonly footHeight_m: number;
   readonly bandFraction: number;
+  /** Field case that clearances are judged by: A unless a field solve shows a homogeneous field. */
+  readonly fieldCase: "inhomogeneous" | "homogeneous";
   /** Body to body along the column. */
   readonly pitch_m: number;
   readonly electrode: Electrode;

@@ -4,11 +4,11 @@ import { capacitanceOf, protectorCapacitance } from "../checks/lvArm.ts";
 import type { Show } from "../checks/show.ts";
 import { dcSolution } from "../network/dcSolution.ts";
 import type { LadderNetwork } from "../network/ladderNetwork.ts";
-import { lvCapacitance } from "../network/lvCapacitance.ts";
 import { stepFigures } from "../network/stepFigures.ts";
 import { StepResponse } from "../network/stepResponse.ts";
 import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
 import { formatQuantity, formatShare } from "../quantities/format.ts";
+import { greatestDeviation, matches } from "./matches.ts";
 import type { FrequencyResponse, StepResponse as StepResponseShape } from "./proof.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
@@ -26,7 +26,8 @@ export function response(
   if (dc === null) throw new Error("a design's string passes dc");
   const predicted = j.sheet.number("scaleFactor.predicted") as number;
   const residual = Math.abs(dc.scaleFactor / predicted - 1);
-  lvCapacitances(j, network, residual);
+  matches(j, network, residual);
+  fittedCapacitance(j);
   const figures = stepFigures(network);
   const f3 = bandwidth(network);
   const inputs = {
@@ -44,16 +45,9 @@ export function response(
   return { frequency, step: stepTraces(network, figures?.settlingTime_s["1%"] ?? 0, figures?.overshoot ?? 0) };
 }
 
-/** LV capacitances by the three matches, what is fitted, their sum and the pole. Writes `lvArm.capacitance…_F`. */
-function lvCapacitances(j: Judging, network: LadderNetwork, residual: number): void {
+/** What is fitted, with cable and instrument, and the pole. Writes `lvArm.capacitanceFitted_F` and `lvArm.capacitanceTotal_F`. */
+function fittedCapacitance(j: Judging): void {
   const { sheet, design, instrument, document } = j;
-  const band = wantedBand(document.brief);
-  const matches = lvCapacitance(network, band);
-  const inputs = { C: "element.capacitance_F", C1: "hvArm.effectiveCapacitance_F", R1: "hvArm.resistance_ohm" };
-  const record = responseRecords.lvCapacitance;
-  sheet.solved("lvArm.capacitanceResponseTime_F", record, matches.responseTime_F, inputs, residual);
-  sheet.solved("lvArm.capacitanceHighFrequency_F", record, matches.highFrequency_F, inputs, residual);
-  sheet.solved("lvArm.capacitanceFlattest_F", record, matches.flattest_F, inputs, residual);
   sheet.given("/design/lvArm/branches/*/capacitance_F", design.lvArm.branches.map(capacitanceOf));
   sheet.derive("lvArm.capacitanceFitted_F", responseFormulas.fitted, { C: "/design/lvArm/branches/*/capacitance_F" });
   const at = document.instruments.indexOf(instrument);
@@ -126,12 +120,7 @@ function bandDeviation(
     j.sheet.solved("response.bandDeviation_dB", responseRecords.frequency, null, inputs, residual);
     return null;
   }
-  const solved = sweep(network, logarithmic(band[0], band[1], points))!;
-  let worst = 0;
-  for (let k = 0; k < points; k++) {
-    const dB = decibel(solved.real[k]!, solved.imaginary[k]!);
-    if (Math.abs(dB) > Math.abs(worst)) worst = dB;
-  }
+  const worst = greatestDeviation(network, band) ?? 0;
   j.sheet.solved("response.bandDeviation_dB", responseRecords.frequency, worst, inputs, residual);
   const error = Math.abs(10 ** (worst / 20) - 1);
   const wanted = j.document.brief.wantedUncertainty;

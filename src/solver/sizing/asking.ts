@@ -27,6 +27,7 @@ const bare: Design = {
     columnLength_m: 0.1,
     footHeight_m: 0.12,
     bandFraction: 0.4,
+    fieldCase: "inhomogeneous",
     pitch_m: 0.01,
     electrode: { kind: "none", radius_m: 0, tubeRadius_m: 0, thickness_m: 0, offset_m: 0 },
     shield: null,

@@ -74,6 +74,7 @@ export function columnGeometry(document: DividerDocument, shape: ColumnShape): G
     columnLength_m,
     footHeight_m,
     bandFraction: 0.4,
+    fieldCase: "inhomogeneous",
     pitch_m: columnLength_m / shape.elements,
     electrode: electrodeOf(shape),
     shield: null,

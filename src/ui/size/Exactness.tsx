@@ -110,6 +110,15 @@ export function CapacitanceChoice({ sheet, lvArm, onWhy }: Props & { readonly lv
           <th scope="col" className="number">
             fitted is
           </th>
+          <th scope="col" className="number">
+            at the edge
+          </th>
+          <th scope="col" className="number">
+            over the band
+          </th>
+          <th scope="col" className="number">
+            response time
+          </th>
           <th scope="col">what it costs</th>
         </tr>
       </thead>
@@ -127,6 +136,15 @@ export function CapacitanceChoice({ sheet, lvArm, onWhy }: Props & { readonly lv
                 <SheetFigure sheet={sheet} path={path} unit="F" onWhy={onWhy} />
               </td>
               <td className="number">{off === null ? "–" : `${signed(100 * off)}\u2009%`}</td>
+              <td className="number">
+                <SheetFigure sheet={sheet} path={`match.${by}.edgeError`} unit="%" digits={3} onWhy={onWhy} />
+              </td>
+              <td className="number">
+                <SheetFigure sheet={sheet} path={`match.${by}.bandDeviation_dB`} unit="dB" digits={2} onWhy={onWhy} />
+              </td>
+              <td className="number">
+                <SheetFigure sheet={sheet} path={`match.${by}.responseTime_s`} unit="s" digits={3} onWhy={onWhy} />
+              </td>
               <td className="reason">{costs}</td>
             </tr>
           );
@@ -137,7 +155,10 @@ export function CapacitanceChoice({ sheet, lvArm, onWhy }: Props & { readonly lv
             <SheetFigure sheet={sheet} path="lvArm.capacitanceFitted_F" unit="F" onWhy={onWhy} />
           </td>
           <td />
-          <td className="reason"></td>
+          <td />
+          <td />
+          <td />
+          <td className="reason" />
         </tr>
       </tbody>
     </table>

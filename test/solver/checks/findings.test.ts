@@ -209,3 +209,29 @@ describe("properties", () => {
     );
   });
 });
+
+describe("field case", () => {
+  it("a homogeneous field claimed for a string: a stop, and the inhomogeneous case is used", () => {
+    const claimed = proven({ ...meter, geometry: { fieldCase: "homogeneous" } });
+    expect(finding(claimed, "clearance.fieldCase")?.level).toBe("stop");
+    expect(figure(claimed, "insulation.tableClearance_m")).toBe(figure(proven(meter), "insulation.tableClearance_m"));
+  });
+});
+
+describe("three matches of the LV capacitance", () => {
+  it("each is best at what it is for", () => {
+    const proof = proven(scope);
+    const at = (match: string, key: string) => Math.abs(figure(proof, `match.${match}.${key}`));
+    expect(at("highFrequency", "edgeError")).toBeLessThan(1e-9);
+    expectRelative(
+      at("responseTime", "responseTime_s"),
+      0,
+      1e-9,
+      "zero by construction",
+      at("flattest", "responseTime_s"),
+    );
+    for (const other of ["responseTime", "highFrequency"]) {
+      expect(at("flattest", "bandDeviation_dB")).toBeLessThanOrEqual(at(other, "bandDeviation_dB") * (1 + 1e-6));
+    }
+  });
+});
