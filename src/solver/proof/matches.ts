@@ -19,6 +19,7 @@ export function matches(j: Judging, network: LadderNetwork, residual: number): v
   put("lvArm.capacitanceResponseTime_F", found.responseTime_F);
   put("lvArm.capacitanceHighFrequency_F", found.highFrequency_F);
   put("lvArm.capacitanceFlattest_F", found.flattest_F);
+  const unmatched = responseTime(withLvCapacitance(network, 0));
   for (const [name, C] of [
     ["responseTime", found.responseTime_F],
     ["highFrequency", found.highFrequency_F],
@@ -28,9 +29,13 @@ export function matches(j: Judging, network: LadderNetwork, residual: number): v
     const g = trial === null ? null : StepResponse.of(trial);
     put(`match.${name}.edgeError`, g === null ? null : g.initial - 1);
     put(`match.${name}.bandDeviation_dB`, trial === null ? null : greatestDeviation(trial, band));
-    put(`match.${name}.responseTime_s`, trial === null ? null : responseTime(trial));
+    put(`match.${name}.responseTime_s`, trial === null ? null : nearlyNought(responseTime(trial), unmatched));
   }
 }
+
+/** A match leaves rounding behind: a billionth of the response time without any LV capacitance counts as nought. */
+const nearlyNought = (value: number | null, scale: number | null): number | null =>
+  value !== null && scale !== null && Math.abs(value) < 1e-9 * Math.abs(scale) ? 0 : value;
 
 /** Greatest deviation from the dc scale factor over the band, dB, signed; null without a band. */
 export function greatestDeviation(network: LadderNetwork, band: readonly [number, number]): number | null {

@@ -90,7 +90,7 @@ function frequencyResponse(
   const solved = sweep(network, frequency_Hz)!;
   const magnitude_dB = frequency_Hz.map((_, i) => decibel(solved.real[i]!, solved.imaginary[i]!));
   const deviation = bandDeviation(j, network, band, residual, show);
-  const flat = deviation === null ? "" : `Within ${deviation.toFixed(3)} dB over the wanted band; `;
+  const flat = deviation === null ? "" : `Within ${Number(deviation.toPrecision(2))} dB over the wanted band; `;
   const edge = f3 === null ? "no −3 dB point up to 1 THz in this model." : `−3 dB at ${formatQuantity(f3, "Hz")}.`;
   return {
     frequency_Hz,
