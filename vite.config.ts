@@ -75,7 +75,10 @@ export default defineConfig(({ command, mode }) => {
     test: {
       reporters: ["default", new PlainCount()],
       projects: [
-        project("unit", ["test/{solver,work,file,cli,published,rules}/**/*.test.ts"], { environment: "node" }),
+        project("unit", ["test/{solver,work,file,cli,published,rules}/**/*.test.ts"], {
+          environment: "node",
+          testTimeout: 30_000,
+        }),
         project("page", ["test/{store,ui}/**/*.test.{ts,tsx}"], {
           environment: "happy-dom",
           setupFiles: ["test/support/page.ts"],

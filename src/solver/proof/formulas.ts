@@ -6,7 +6,7 @@ import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
-import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
+import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";

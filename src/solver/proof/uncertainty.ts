@@ -1,5 +1,5 @@
 import { type Judging, plainFinding } from "../checks/judging.ts";
-import { scaleFactorFormulas } from "../checks/scaleFactor.ts";
+import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import type { Show } from "../checks/show.ts";
 
 /** The predicted scale factor and its uncertainty against what was wanted. A calibration replaces the parts' terms. */
