@@ -1,7 +1,7 @@
 import type { Cable, Instrument, InstrumentFunction } from "../solver/index.ts";
 import { typicalInstruments } from "./instrumentDefaults.ts";
 import type { Raw } from "./shape.ts";
-import { choice, object, quantity, quantityOrNull, text } from "./shapes.ts";
+import { choice, namedAs, object, quantity, quantityOrNull, text } from "./shapes.ts";
 
 const typicalOf = (parent: Raw) =>
   Object.hasOwn(typicalInstruments, String(parent.function))
@@ -37,7 +37,7 @@ export const instrumentFunctions: Readonly<Record<InstrumentFunction, string>> =
 
 export const instrumentShape = object<Instrument>("An instrument on one range and function, with its cable.", {
   id: text("Name within this file.", "", 100),
-  name: text("Plain name.", ""),
+  name: text("Plain name.", namedAs("function", "id")),
   function: choice<InstrumentFunction>("What it is and how it is set.", instrumentFunctions, "meter dc", true),
   range_V: quantity("V", "Full scale of the range in use.", {
     aboveLeast: true,

@@ -14,6 +14,7 @@ import {
   choice,
   list,
   literal,
+  namedAs,
   object,
   optionalList,
   orNull,
@@ -33,7 +34,7 @@ export const origins: Readonly<Record<Origin, string>> = {
 /** Cautious stand-ins for a rating that a file does not give; marked *assumed*. */
 const base = {
   id: text("Name within this file.", "", 100),
-  name: text("Plain generic name.", ""),
+  name: text("Plain generic name.", namedAs("id")),
   origin: choice<Origin>("Where the ratings came from.", origins, "typed"),
   tolerance: quantity("1", "Relative half-width of the value.", {
     fallback: 0.1,

@@ -27,7 +27,7 @@ export function read(spec: Spec, value: unknown, place: Place, parent: Raw, read
     case "number":
       return readNumber(spec, value, place, parent, reading);
     case "text":
-      return readText(spec, value, place, reading);
+      return readText(spec, value, place, parent, reading);
     case "choice":
       return readChoice(spec, value, place, parent, reading);
     case "flag":
@@ -58,7 +58,7 @@ export function read(spec: Spec, value: unknown, place: Place, parent: Raw, read
   }
 }
 
-function readText(spec: TextSpec, value: unknown, place: Place, reading: Reading): string | null | Lost {
+function readText(spec: TextSpec, value: unknown, place: Place, parent: Raw, reading: Reading): string | null | Lost {
   if (typeof value === "string") {
     const clean = cleanedText(value, place.from, reading);
     if (clean.length <= spec.longest) return clean;
@@ -73,10 +73,11 @@ function readText(spec: TextSpec, value: unknown, place: Place, reading: Reading
   }
   const missing = value === undefined || value === null;
   if (value === null && spec.nullable) return null;
-  if (spec.fallback === undefined) return new Lost(place.from, "A text belongs here", value);
-  if (!missing) reading.repair(place.from, "replaced", "A text belongs here", nowText(spec.fallback), value);
+  const instead = fallbackOf(spec.fallback, parent, reading.root);
+  if (instead === undefined) return new Lost(place.from, "A text belongs here", value);
+  if (!missing) reading.repair(place.from, "replaced", "A text belongs here", nowText(instead), value);
   reading.fill(place, false);
-  return spec.fallback;
+  return instead;
 }
 
 const nowText = (text: string | null): string => (text === null ? "there is none now" : `it is “${text}” now`);

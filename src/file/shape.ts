@@ -33,7 +33,7 @@ export interface TextSpec {
   readonly about: string;
   readonly longest: number;
   readonly nullable: boolean;
-  readonly fallback: string | null | undefined;
+  readonly fallback: Fallback<string | null> | undefined;
 }
 export interface ChoiceSpec {
   readonly kind: "choice";

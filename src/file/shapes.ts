@@ -50,13 +50,19 @@ export const quantityOrNull = (
   options: NumberOptions = {},
 ): Shape<number | null, NumberSpec> => numberSpec(unit, about, true, options);
 
-export const text = (about: string, fallback?: string, longest = 500): Shape<string, TextSpec> => ({
+export const text = (about: string, fallback?: Fallback<string>, longest = 500): Shape<string, TextSpec> => ({
   kind: "text",
   about,
   longest,
   nullable: false,
   fallback,
 });
+
+/** The first of the neighbouring keys that holds a text, for a name that is missing. */
+export const namedAs =
+  (...keys: readonly string[]): Fallback<string> =>
+  (parent) =>
+    keys.map((key) => parent[key]).find((value): value is string => typeof value === "string") ?? "";
 
 export const textOrNull = (about: string, longest = 500): Shape<string | null, TextSpec> => ({
   kind: "text",

@@ -57,7 +57,7 @@ export function partsList(document: DividerDocument): Result<PartsList> {
   }
   const parts = new Map(document.parts.map((part) => [part.id, part]));
   const placed = [...hvParts(design), ...lvParts(design), ...protectorParts(design)];
-  const missing = placed.find((each) => !parts.has(each.part));
+  const missing = placed.find((each) => each.part !== "" && !parts.has(each.part));
   if (missing !== undefined) {
     return err({
       where: "/design",
@@ -146,20 +146,20 @@ function group(placed: readonly Placed[], parts: ReadonlyMap<string, Part>): Par
   }
   return [...groups.values()].map((members) => {
     const first = members[0]!;
-    const part = parts.get(first.part)!;
+    const part = parts.get(first.part);
     const spares = sparesFor(first.place, members.length);
     return {
       designators: members.map((each) => each.designator),
       quantity: members.length,
       spares,
       buy: members.length + spares,
-      part: part.id,
-      name: part.name,
+      part: first.part,
+      name: part?.name ?? "part not chosen yet",
       value: first.value,
       unit: first.unit,
       valueText: first.value === null ? "" : formatQuantity(first.value, first.unit as never, { digits: 3 }),
-      tolerance: part.tolerance > 0 ? part.tolerance : null,
-      rating: ratingOf(part),
+      tolerance: part !== undefined && part.tolerance > 0 ? part.tolerance : null,
+      rating: part === undefined ? "" : ratingOf(part),
       place: first.place,
       note: first.note,
     };

@@ -104,7 +104,9 @@ export function lvArmResistance(j: Judging): void {
 export function judgeLvArm(j: Judging): void {
   const { lvArm, hvArm } = j.design;
   const inHv = new Set(hvArm.elements.flatMap((element) => (element.capacitor === null ? [] : [element.capacitor])));
-  const inLv = lvArm.branches.flatMap((branch) => ("part" in branch && !("trimmer" in branch) ? [branch.part] : []));
+  const inLv = lvArm.branches.flatMap((branch) =>
+    "part" in branch && !("trimmer" in branch) && branch.part !== "" ? [branch.part] : [],
+  );
   for (const [arm, ids] of [
     ["HV arm", [...inHv]],
     ["LV arm", inLv],
@@ -134,6 +136,16 @@ export function judgeLvArm(j: Judging): void {
         "A lifted wiper or a turn to its end leaves no defined LV arm. Fit fixed resistors across it, and trim in one branch only.",
       source: practice("fixed resistors carry the LV arm, a trimmer adjusts it"),
       cure: { label: "size again", edits: [], sizeAgain: true },
+    });
+  }
+  const unchosen = lvArm.branches.filter((branch) => "part" in branch && branch.part === "");
+  if (unchosen.length > 0) {
+    plainFinding(j, {
+      id: "lvArm.partNotChosen",
+      level: "caution",
+      what: "LV capacitors without a part",
+      reason: `${unchosen.map((branch) => branch.name).join(", ")}: the value is counted, but its dielectric and rating are not known. Choose class 1 (C0G), film or mica.`,
+      source: practice("the dielectric decides what a capacitance is worth"),
     });
   }
   if (lvArm.stays === "withInstrument") {

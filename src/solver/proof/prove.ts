@@ -101,6 +101,8 @@ function missingPart(document: DividerDocument): Result<never> | null {
   design.lvArm.branches.forEach((branch, b) => {
     const at = `/design/lvArm/branches/${b}`;
     if (!("series" in branch)) {
+      // A capacitor of the LV arm may stand as a value before its part is chosen.
+      if (branch.part === "") return;
       named.push([`${at}/part`, branch.part, "trimmer" in branch ? "trimmer" : "capacitor"]);
       return;
     }
