@@ -38,7 +38,29 @@ describe("creepage, table F.5", () => {
   it("steps up between rows and refuses beyond the last", () => {
     expectRelative(value(creepage(volt(5500), 2, "IIIa")), 0.063, 1e-12, "the row of 6.3 kV");
     expect(creepage(volt(63001), 2, "I").ok).toBe(false);
-    expect(creepage(volt(800), 3, "IIIb").ok).toBe(false);
+    expectRelative(value(creepage(volt(0), 2, "I")), 0.0004, 1e-12, "the first row");
+  });
+  it("does not read pollution degree 3 above 10 kV, nor group IIIb there above 630 V", () => {
+    for (const group of ["I", "II", "IIIa"] as const) {
+      expect(creepage(volt(10_000), 3, group).ok).toBe(true);
+      const beyond = creepage(volt(10_001), 3, group);
+      expect(beyond.ok ? "" : beyond.error.why).toMatch(/to 10 kV only/);
+    }
+    expectRelative(value(creepage(volt(630), 3, "IIIb")), 0.01, 1e-12, "the column of group III");
+    const b = creepage(volt(631), 3, "IIIb");
+    expect(b.ok ? "" : b.error.why).toMatch(/IIIb is not recommended/);
+    expect(creepage(volt(63_000), 2, "IIIb").ok).toBe(true);
+  });
+  it("is near V/200, V/141, V/100 at degree 2 and V/80, V/70.7, V/62.5 at degree 3 from 200 V up (computed here)", () => {
+    const rule = { 2: { I: 200, II: 141, IIIa: 100 }, 3: { I: 80, II: 70.7, IIIa: 62.5 } } as const;
+    for (const degree of [2, 3] as const) {
+      for (const group of ["I", "II", "IIIa"] as const) {
+        for (const V of voltage_rms.filter((each) => each >= 200 && each <= (degree === 3 ? 1e4 : 63e3))) {
+          const mm = value(creepage(volt(V), degree, group))! * 1000;
+          expectRelative(mm, V / rule[degree][group], 0.051, `${V} V: printed figures are rounded numbers`);
+        }
+      }
+    }
   });
   it("never falls when voltage, pollution or group get worse", () => {
     let before = 0;

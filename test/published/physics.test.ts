@@ -35,6 +35,27 @@ describe("IEC 60115-1 (ed. 4:2008 / ed. 5:2020, from memory): the derating line,
   });
 });
 
+describe("critical resistance, IEC 60115-1 (ed. 4:2008 / ed. 5:2020, from memory): V²/P", () => {
+  it.each([
+    [250, 0.25, 250e3],
+    [3500, 0.5, 24.5e6],
+  ])("%f V and %f W cross at %f Ω", (Vlim, P, R) => {
+    expectRelative(stressFormulas.critical.compute({ dv: 1, Vlim, P }), R, 1e-12, "both limits reached together");
+    expectRelative(Math.sqrt(P * R), Vlim, 1e-12, "the voltage that dissipates P in it is the limit itself");
+  });
+  // Derated to 0.6 of the voltage and 0.5 of the dissipation; computed here.
+  it.each([
+    [350, 0.6, 147e3],
+    [3500, 1, 8.82e6],
+    [15e3, 2, 81e6],
+  ])("%f V and %f W cross at %f Ω when derated", (Vlim, P, R) => {
+    expectRelative(stressFormulas.critical.compute({ dv: 0.6, Vlim, P: 0.5 * P }), R, 1e-12, "closed form");
+  });
+  it("does not exist where no dissipation is left", () => {
+    expect(stressFormulas.critical.compute({ dv: 0.6, Vlim: 350, P: 0 })).toBeNull();
+  });
+});
+
 describe("stray capacitance", () => {
   // Kuffel, Zaengl, Kuffel, High Voltage Engineering, 2nd ed. (2000), ch. 3, from memory; values recomputed independently.
   it.each([
