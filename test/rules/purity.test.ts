@@ -10,12 +10,25 @@ const trap = (what: string) => () => {
   throw new Error(`the solver touched ${what}`);
 };
 
+/** Calling, constructing and reading it all throw. */
+const shut = (name: string) =>
+  vi.stubGlobal(name, new Proxy(class {}, { apply: trap(name), construct: trap(name), get: trap(name) }));
+
 describe("purity", () => {
+  it("is told by a trap that springs", () => {
+    expect(() => Math.random()).toThrow("Math.random");
+    expect(() => new Date()).toThrow("Date");
+    expect(() => Date.now()).toThrow("Date");
+    expect(() => performance.now()).toThrow("performance");
+  });
   beforeEach(() => {
     vi.spyOn(Math, "random").mockImplementation(trap("Math.random"));
-    vi.spyOn(Date, "now").mockImplementation(trap("the clock"));
+    for (const name of ["Date", "performance", "crypto", "fetch", "setTimeout", "queueMicrotask"]) shut(name);
   });
-  afterEach(() => vi.restoreAllMocks());
+  afterEach(() => {
+    vi.unstubAllGlobals();
+    vi.restoreAllMocks();
+  });
   it.each(demos)("of %s: sized, proved and listed, twice alike", (name) => {
     const restored = restoreDocument(readFileSync(new URL(name, folder), "utf8"));
     if (restored.kind === "refused") throw new Error(restored.refusal.why);
