@@ -26,6 +26,7 @@ export const chargeFormulas = {
   }),
 };
 
+/** Time to fall to an accessible voltage through the divider alone, from the source's capacitance and its own. */
 export function charge(j: Judging, show: Show): void {
   const { sheet } = j;
   sheet.given("/brief/source/capacitance_F", j.document.brief.source.capacitance_F);

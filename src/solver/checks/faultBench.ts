@@ -24,6 +24,7 @@ export interface FaultBench {
   readonly string: StringCapacitance;
 }
 
+/** What every fault is computed from, gathered once: needs the figures of string, LV arm and loading on the sheet. */
 export function faultBench(j: Judging, string: StringCapacitance): FaultBench {
   const { design, instrument, sheet } = j;
   const resistive = design.lvArm.branches.filter(isResistive);

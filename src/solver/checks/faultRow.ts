@@ -49,6 +49,7 @@ export const accessible: { dc_V: number; current_A: number; charge_C: number; so
 /** The larger of what the instrument sees at dc and on an edge. */
 export const seen = (row: FaultRow) => Math.max(Math.abs(row.output_V), Math.abs(row.fastOutput_V));
 
+/** The single fault that puts most on the instrument; a pulled plug leaves nothing to harm and does not count. */
 export function worstFault(rows: readonly FaultRow[]): FaultRow | null {
   return rows.reduce<FaultRow | null>(
     (worst, row) => (row.single && row.id !== "unplugged" && (worst === null || seen(row) > seen(worst)) ? row : worst),

@@ -17,6 +17,7 @@ export interface Judging {
   readonly findings: Finding[];
 }
 
+/** A judgement about to begin: an empty sheet, no findings. Throws where the document has no design. */
 export function judging(document: DividerDocument): Judging {
   const { design } = document;
   if (design === null) throw new Error("judging needs a design");
@@ -37,6 +38,7 @@ function partOf<K extends Part["kind"]>(
   return part as Extract<Part, { kind: K }>;
 }
 
+/** The part of that id in the document, of that kind; throws where there is none. */
 export const resistorOf = (j: Judging, id: string): ResistorFamily => partOf(j.parts, id, "resistor");
 export const capacitorOf = (j: Judging, id: string): CapacitorFamily => partOf(j.parts, id, "capacitor");
 export const trimmerOf = (j: Judging, id: string): TrimmerFamily => partOf(j.parts, id, "trimmer");

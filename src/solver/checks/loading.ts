@@ -48,6 +48,7 @@ export function loading(j: Judging): void {
 
 const sizeAgain: Cure = { label: "size again", edits: [], sizeAgain: true };
 
+/** Findings on what the divider takes from the source, and on what the instrument sees and can tell. */
 export function judgeLoading(j: Judging, show: Show): void {
   const { sheet, document, instrument } = j;
   const { source, policy, wantedUncertainty } = document.brief;

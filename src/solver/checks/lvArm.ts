@@ -35,9 +35,11 @@ export const lvArmFormulas = {
   }),
 };
 
+/** Fixed resistance of a branch, ohm. */
 export const fixedOf = (series: readonly LvSeriesItem[]): number =>
   series.reduce((sum, item) => sum + ("resistance_ohm" in item ? item.resistance_ohm : 0), 0);
 
+/** Resistance of a branch's rheostats as they are set, ohm. */
 export const trimOf = (series: readonly LvSeriesItem[]): number =>
   series.reduce((sum, item) => {
     if (!("rheostat" in item)) return sum;
@@ -46,6 +48,7 @@ export const trimOf = (series: readonly LvSeriesItem[]): number =>
   }, 0);
 
 export type ResistiveBranch = Extract<LvBranch, { series: unknown }>;
+/** Whether a branch carries dc. */
 export const isResistive = (branch: LvBranch): branch is ResistiveBranch => "series" in branch;
 
 /** Capacitance of a branch as it stands: fixed, a fitted link, a trimmer at its setting; 0 for a resistor branch. */
@@ -68,12 +71,14 @@ export function leakageConductance(j: Judging): number {
   }, 0);
 }
 
+/** Capacitance of the protectors at the divider or at the instrument, F. */
 export const protectorCapacitance = (j: Judging, at: "divider" | "instrument"): number =>
   j.design.protectors.reduce((sum, fitted) => {
     const part = protectorOf(j, fitted.part);
     return fitted.at === at && part.type !== "seriesResistor" ? sum + part.capacitance_F : sum;
   }, 0);
 
+/** Resistance of the series protectors between tap and instrument, ohm. */
 export const seriesResistance = (j: Judging): number =>
   j.design.protectors.reduce((sum, fitted) => {
     const part = protectorOf(j, fitted.part);

@@ -4,6 +4,7 @@ export interface Complex {
   readonly im: number;
 }
 
+/** Arithmetic of complex numbers. */
 export const complex = (re: number, im = 0): Complex => ({ re, im });
 export const add = (a: Complex, b: Complex): Complex => ({ re: a.re + b.re, im: a.im + b.im });
 export const subtract = (a: Complex, b: Complex): Complex => ({ re: a.re - b.re, im: a.im - b.im });

@@ -13,6 +13,7 @@ export interface Refusal {
   readonly cure: string;
 }
 
+/** The three ways to make a result. */
 export const ok = <T>(value: T): Result<T, never> => ({ ok: true, value });
 export const err = <E>(error: E): Result<never, E> => ({ ok: false, error });
 export const refuse = (where: string, why: string, cure: string): Result<never> => err({ where, why, cure });

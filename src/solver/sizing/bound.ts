@@ -27,7 +27,9 @@ const named: Record<Bound["id"], readonly [string, Bound["side"]]> = {
   lvPole: ["band of an LV arm without capacitors", "atMost"],
 };
 
+/** Where a bound's number stands on the sheet. */
 export const pathOf = (id: Bound["id"]) => `window.${id}_ohm`;
+/** Three digits in percent, for a sentence. */
 export const percent = (value: number) => `${Number((value * 100).toPrecision(3))} %`;
 
 /** A bound whose number stands on the sheet. */

@@ -19,6 +19,7 @@ import { type Fitted, geometryOf, unique, withCapacitors } from "./withCapacitor
 /** A build with LV arm, capacitors, geometry and parts: everything but its rank and the sheet's figures. */
 export type Drafted = Omit<Candidate, "rank">;
 
+/** Works out all that a build leaves open, and what was found on the way. */
 export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
   const { ask } = limits;
   const { family } = build.kind;

@@ -33,6 +33,7 @@ const ends_m = 0.004;
 /** Pitch with a capacitor beside each resistor, m. */
 export const pitchWith = (pitch_m: number, body_m: number): number => Math.max(pitch_m, body_m + ends_m);
 
+/** Stray capacitance of a column to earth by the formula for a vertical cylinder, F. */
 export const columnStray = (limits: Limits, length_m: number, diameter_m: number): number =>
   verticalCylinderCapacitance(metre(length_m), metre(diameter_m), metre(footHeightOf(limits.ask.j.document)));
 

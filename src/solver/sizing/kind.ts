@@ -54,6 +54,7 @@ export interface Kind {
   readonly greatestBy: "window" | "trim";
 }
 
+/** A family with what one of its elements may bear in this brief, and what a string of it can reach. */
 export function kindOf(family: ResistorFamily, limits: Limits, pool: Pool): Kind {
   const { policy, surroundings, waveform } = limits.ask.j.document.brief;
   const { working } = limits.ask;

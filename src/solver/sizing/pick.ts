@@ -14,6 +14,7 @@ export interface Picked {
 export const tooUncertain = (build: Build, limits: Limits): boolean =>
   build.uncertainty > limits.ask.j.document.brief.wantedUncertainty * (1 + 1e-12);
 
+/** One line for each family and number of strings that has any count to try. */
 export const linesOf = (kinds: readonly Kind[], limits: Limits): Line[] =>
   kinds.flatMap((kind) =>
     Array.from({ length: mostStrings }, (_, i) => new Line(kind, i + 1, limits)).filter(

@@ -13,6 +13,7 @@ export interface Pool {
   readonly trimmers: readonly TrimmerFamily[];
 }
 
+/** The document's parts, then those of the catalogue that it does not name. */
 export function poolOf(document: DividerDocument, catalogue: readonly Part[]): Pool {
   const own = new Set(document.parts.map((part) => part.id));
   const parts = [...document.parts, ...catalogue.filter((part) => !own.has(part.id))];

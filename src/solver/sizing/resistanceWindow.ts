@@ -44,6 +44,7 @@ function tightest(bounds: readonly Bound[], side: Bound["side"]): Bound | null {
   }, null);
 }
 
+/** Whether any resistance lies between the bounds. */
 export const isOpen = ({ least, greatest }: Pick<WindowFound, "least" | "greatest">): boolean =>
   greatest === null || (greatest.resistance_ohm as number) > (least?.resistance_ohm ?? 0);
 

@@ -4,6 +4,8 @@ import type { Result } from "../quantities/result.ts";
 import type { Sizing } from "./outcome.ts";
 import { sizeFrom } from "./sizeFrom.ts";
 
+const parts = [...catalogue.resistors, ...catalogue.capacitors, ...catalogue.trimmers];
+
 /**
  * From the brief to the resistance window, the ranked candidates and why every other family lost. Every resistor family in
  * every value sold, 1 to 4 strings and 1 to 5000 elements is decided; what is dropped is no better in anything than
@@ -12,7 +14,5 @@ import { sizeFrom } from "./sizeFrom.ts";
  * @param options.top how many candidates are listed, 1 or more
  * @example size(document, { top: 10 })
  */
-const parts = [...catalogue.resistors, ...catalogue.capacitors, ...catalogue.trimmers];
-
 export const size = (document: DividerDocument, options: { readonly top: number }): Result<Sizing> =>
   sizeFrom(document, parts, options.top);

@@ -83,6 +83,7 @@ function bandOf({ ask }: Limits): readonly [number, number] {
   return [low > 0 ? low : high * 1e-6, high];
 }
 
+/** Geometry of a column of that length and diameter, m, with the electrode that its greatest peak asks for. */
 export function geometryOf(limits: Limits, elements: number, length_m: number, diameter_m: number): Geometry {
   const { ask } = limits;
   const greatest_Vpeak = ask.working.greatest_Vpeak;
@@ -96,4 +97,5 @@ export function geometryOf(limits: Limits, elements: number, length_m: number, d
   });
 }
 
+/** Each part once, the last of its id. */
 export const unique = (parts: readonly Part[]): Part[] => [...new Map(parts.map((part) => [part.id, part])).values()];

@@ -46,6 +46,7 @@ export interface Finding {
   readonly element?: number;
 }
 
+/** Share of the limit that is left: 0 at the limit, negative past it, at most 1. */
 export function marginOf(sense: Finding["sense"], actual: number, limit: number): number {
   if (sense === "atLeast") return actual === 0 ? -1 : 1 - limit / actual;
   return limit === 0 ? (actual === 0 ? 0 : -1) : 1 - actual / limit;

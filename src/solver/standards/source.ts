@@ -17,6 +17,7 @@ export type SourceStatus =
   | "computed here"
   | "definition";
 
+/** Source of what follows from circuit algebra. */
 export const computedHere = (clause: string): Source => ({
   title: "Circuit algebra",
   edition: null,
@@ -24,6 +25,7 @@ export const computedHere = (clause: string): Source => ({
   status: "computed here",
 });
 
+/** Source of a rule that the trade keeps without a paper. */
 export const practice = (clause: string): Source => ({
   title: "Common practice",
   edition: null,
