@@ -1,7 +1,16 @@
 import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { restoreDocument } from "../../../src/file/restore.ts";
-import { figures, formulas, prove, recompute, size, solutions, why } from "../../../src/solver/index.ts";
+import {
+  figures,
+  formulas,
+  prove,
+  recompute,
+  type SheetData,
+  size,
+  solutions,
+  why,
+} from "../../../src/solver/index.ts";
 import { expectRelative } from "../../support/relative.ts";
 
 const folder = new URL("../../../demo/", import.meta.url);
@@ -40,13 +49,32 @@ describe("why", () => {
     }
   });
 
-  it.each(proofs)("keeps each solution's residual of $name within its bound", ({ proof }) => {
-    for (const [path, trace] of Object.entries(proof.sheet.traces)) {
+  it.each(proofs)("keeps each solution's residual of $name within its bound", ({ sheets }) => {
+    for (const [path, trace] of sheets.flatMap((sheet) => Object.entries(sheet.traces))) {
       const record = solutions.get(trace.formula);
-      if (record !== undefined) expect(trace.residual ?? 0, path).toBeLessThanOrEqual(record.residualBound);
-      else expect(formulas.has(trace.formula), `${path}: ${trace.formula}`).toBe(true);
+      if (record === undefined) expect(formulas.has(trace.formula), `${path}: ${trace.formula}`).toBe(true);
+      else {
+        expect(trace.residual, `${path} states its residual`).toBeGreaterThanOrEqual(0);
+        expect(trace.residual, path).toBeLessThanOrEqual(record.residualBound);
+      }
     }
   });
+
+  it.each(proofs)(
+    "lays out every trace of $name down to what was given, the same after a trip through a worker",
+    ({ proof, sheets }) => {
+      for (const sheet of sheets) {
+        const copy = structuredClone(sheet);
+        for (const path of Object.keys(sheet.traces)) {
+          const index = Array.isArray(sheet.values[path]) ? 0 : null;
+          const laid = why(path, sheet, proof.origins, index);
+          expect(laid, path).not.toBeNull();
+          expect(why(path, copy, proof.origins, index), path).toEqual(laid);
+          expect(ground(path, sheet, []), path).toBe(true);
+        }
+      }
+    },
+  );
 
   it.each(proofs)("lays out every figure that the screens of $name show", ({ proof }) => {
     for (const path of Object.keys(figures)) {
@@ -77,3 +105,11 @@ describe("why", () => {
     expect(why("nothing.like_this", proofs[0]!.proof.sheet)).toBeNull();
   });
 });
+
+/** Every input leads to givens; no figure stands on itself. */
+function ground(path: string, sheet: SheetData, above: readonly string[]): boolean {
+  if (above.includes(path)) throw new Error(`${[...above, path].join(" <- ")}: stands on itself`);
+  if (sheet.values[path] === undefined) throw new Error(`${[...above, path].join(" <- ")}: is not on the sheet`);
+  const inputs = Object.values(sheet.traces[path]?.inputs ?? {});
+  return inputs.every((from) => ground(from, sheet, [...above, path]));
+}
