@@ -42,7 +42,10 @@ export function response(
   j.sheet.solved("response.overshoot", stepRecord, figures?.overshoot ?? null, inputs, residual);
   j.sheet.solved("response.settlingTime_s", stepRecord, figures?.settlingTime_s["1%"] ?? null, inputs, residual);
   const frequency = frequencyResponse(j, network, f3, residual, show);
-  return { frequency, step: stepTraces(network, figures?.settlingTime_s["1%"] ?? 0, figures?.overshoot ?? 0) };
+  const pole = j.sheet.number("response.lvPole_Hz");
+  const handover_s = pole === null ? 0 : 1 / (2 * Math.PI * pole);
+  const step = stepTraces(network, figures?.settlingTime_s["1%"] ?? 0, handover_s, figures?.overshoot ?? 0);
+  return { frequency, step };
 }
 
 /** What is fitted, with cable and instrument, and the pole. Writes `lvArm.capacitanceFitted_F` and `lvArm.capacitanceTotal_F`. */
@@ -150,13 +153,19 @@ function bandDeviation(
   return Math.abs(worst);
 }
 
-function stepTraces(network: LadderNetwork, settling_s: number, overshoot: number): StepResponseShape {
+/** The slow trace runs to a decade past settling and past the time where the capacitors hand over to the resistors. */
+function stepTraces(
+  network: LadderNetwork,
+  settling_s: number,
+  handover_s: number,
+  overshoot: number,
+): StepResponseShape {
   const g = StepResponse.of(network)!;
   const trace = (from: number, to: number) => {
     const time_s = logarithmic(from, to, 151);
     return { time_s, value: time_s.map((t) => g.at(t)) };
   };
-  const end = Math.min(Math.max(10 ** Math.ceil(Math.log10(Math.max(settling_s, 1e-5)) + 1), 1e-3), 1e5);
+  const end = Math.min(Math.max(10 ** Math.ceil(Math.log10(Math.max(settling_s, handover_s, 1e-5)) + 1), 1e-3), 1e5);
   const over = overshoot > 0 ? `overshoot ${formatShare(overshoot)}` : "no overshoot";
   const settled =
     settling_s === 0 ? "within 1 % from the start" : `within 1 % after ${formatQuantity(settling_s, "s")}`;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { bank, fault, figure, finding, fixed, proven, type Sketch } from "../../support/builders.ts";
+import { bank, fault, figure, figureOf, finding, fixed, proven, type Sketch } from "../../support/builders.ts";
 import { expectRelative } from "../../support/relative.ts";
 
 // Invented scenario, computed independently: 48 kV pulse, scope 1 MΩ ‖ 18 pF, 1.2 m of 95 pF/m, 24 × (12 MΩ ‖ 470 pF).
@@ -55,6 +55,38 @@ describe("a pulse into a scope", () => {
     expectRelative(figure(proof, "lvArm.capacitanceHighFrequency_F") + parallel, 17.727e-9, 1e-3, capacitive);
     expectRelative(figure(proof, "lvArm.capacitanceResponseTime_F") + parallel, 17.597e-9, 1e-3, capacitive);
     expectRelative(figure(proof, "lvArm.capacitanceFlattest_F") + parallel, 17.685e-9, 2e-3, "given as 'about'");
+  });
+  it("has 0.906386 of its string's capacitance left, and 0.998077 with half as much stray to the electrode", () => {
+    const left = (each: typeof proof) =>
+      figure(each, "hvArm.effectiveCapacitance_F") / figure(each, "hvArm.capacitance_F");
+    expectRelative(left(proof), 0.906386, 1e-6, "six digits given");
+    const each = figure(proof, "strays.toEarth_F") / 24;
+    const balanced = proven({
+      ...pulse,
+      strays: { from: "typed", toEarth_F: new Array(23).fill(each), toElectrode_F: new Array(23).fill(each / 2) },
+    });
+    expectRelative(left(balanced), 0.998077, 1e-6, "six digits given");
+  });
+  it("would dissipate 8.0 W at dc, and 1998 V stand on each element", () => {
+    const steady = proven({
+      ...pulse,
+      waveform: { kind: "dc", nominal_V: 48000, greatest_Vpeak: 48000 },
+      instrument: { ...pulse.instrument, function: "scope 1 MΩ" },
+    });
+    expectRelative(figure(steady, "input.dissipation_W"), 8.0, 2e-3, "two digits given");
+    expectRelative(figureOf(steady, "element.voltage_Vdc"), 1998, 1e-4, "four digits given");
+  });
+  it("is a quarter of a percent low near its slowest time constant even where the edge is right", () => {
+    const parallel = 132e-12;
+    const edge = figure(proof, "lvArm.capacitanceHighFrequency_F") + parallel;
+    expectRelative(edge, 17.727e-9, 1e-4, "five digits given");
+    const matched = proven({ ...pulse, branches: [...pulse.branches!.slice(0, 3), bank("C2", edge - parallel)] });
+    const { time_s, value } = matched.step.slow;
+    const lowest = Math.min(...value);
+    expectRelative(1 - lowest, 0.002482, 3e-3, "modal sum of the same network; at the nearest drawn time");
+    const when = time_s[value.indexOf(lowest)]!;
+    expect(when).toBeGreaterThan(1e-3);
+    expect(when).toBeLessThan(20e-3);
   });
   it("has its pole where the arms hand over", () => {
     expectRelative(figure(proof, "response.lvPole_Hz"), 31.13, 5e-3, "given for the matched arm");
