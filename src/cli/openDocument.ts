@@ -8,7 +8,7 @@ export const refusalText = ({ where, why, cure }: Refusal): string => `${where}:
 export function openDocument(file: string, outside: Outside): DividerDocument {
   const restored = restoreDocument(readText(file, outside));
   if (restored.kind === "refused") throw new Unusable(refusalText(restored.refusal));
-  for (const repair of restored.repairs) outside.say(`repaired ${repair.pointer}: ${repair.what}`);
+  for (const repair of restored.repairs) outside.say(`repaired ${repair.pointer}: ${repair.why}`);
   return restored.document;
 }
 

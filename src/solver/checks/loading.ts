@@ -3,6 +3,7 @@ import { practice } from "../standards/source.ts";
 import { type Judging, judgeLimit, plainFinding } from "./judging.ts";
 import { loadingFormulas } from "./loadingFormulas.ts";
 import type { Show } from "./show.ts";
+import { wantedOf } from "./wanted.ts";
 
 /** What the instrument shows of the waveform: dc, rms, or the peak on a scope. */
 export function readingBasis(j: Judging): "working.dc_V" | "working.rms_V" | "working.peak_V" {
@@ -51,8 +52,10 @@ const sizeAgain: Cure = { label: "size again", edits: [], sizeAgain: true };
 /** Findings on what the divider takes from the source, and on what the instrument sees and can tell. */
 export function judgeLoading(j: Judging, show: Show): void {
   const { sheet, document, instrument } = j;
-  const { source, policy, wantedUncertainty } = document.brief;
-  sheet.given("/brief/policy/allowedSag", policy.allowedSag ?? wantedUncertainty);
+  const { source, policy } = document.brief;
+  const wanted = wantedOf(document.brief);
+  const allowed = policy.allowedSag ?? wanted;
+  sheet.given("/brief/policy/allowedSag", allowed);
   const sagging = sheet.number("source.sag") ?? 0;
   judgeLimit(
     j,
@@ -67,7 +70,7 @@ export function judgeLoading(j: Judging, show: Show): void {
       reason: (actual, limit) =>
         `The divider pulls the source down by ${actual}; ${limit} is accepted. ` +
         (sagging > 0.5
-          ? `More than half is lost: it cannot be read. Raise R1 above ${show(source.resistance_ohm * (1 / (policy.allowedSag ?? wantedUncertainty) - 1), "ohm")}.`
+          ? `More than half is lost: it cannot be read. Raise R1 above ${show(source.resistance_ohm * (1 / (allowed ?? 1) - 1), "ohm")}.`
           : "More HV arm resistance lowers it, or correct for it with the two-load method."),
       source: loadingFormulas.sag.source,
       cure: sizeAgain,
@@ -145,17 +148,26 @@ export function judgeLoading(j: Judging, show: Show): void {
       source: practice("a measurement is no better than its instrument"),
     });
   }
-  if (instrument.readingAccuracy > wantedUncertainty) {
+  if (wanted === null) {
+    plainFinding(j, {
+      id: "uncertainty.notStated",
+      level: "caution",
+      what: "wanted uncertainty not stated",
+      reason:
+        "0 would be a claim of perfection: it counts as not stated, and nothing is judged by it. Type it, e.g. 3 %.",
+      source: practice("a measurement is no better than its instrument"),
+    });
+  } else if (instrument.readingAccuracy > wanted) {
     plainFinding(j, {
       id: "instrument.accuracy",
       level: "stop",
       what: "wanted uncertainty against the instrument's own",
       actual: instrument.readingAccuracy,
-      limit: wantedUncertainty,
+      limit: wanted,
       unit: "1",
       sense: "atMost",
-      margin: 1 - instrument.readingAccuracy / wantedUncertainty,
-      reason: `${instrument.name} reads within ${show(instrument.readingAccuracy, "1")}, ${show(wantedUncertainty, "1")} is wanted: no divider can repair that.`,
+      margin: 1 - instrument.readingAccuracy / wanted,
+      reason: `${instrument.name} reads within ${show(instrument.readingAccuracy, "1")}, ${show(wanted, "1")} is wanted: no divider can repair that.`,
       source: practice("a measurement is no better than its instrument"),
     });
   }

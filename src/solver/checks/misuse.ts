@@ -12,8 +12,15 @@ const iec60664: Source = {
 
 /** Uses of a divider that no choice of parts repairs, and inputs that contradict each other. */
 export function misuse(j: Judging, show: Show): void {
+  briefMisuse(j, show);
+  existence(j, show);
+}
+
+/** The same as far as the brief alone tells, whatever the design. Needs `working.*`. */
+export function briefMisuse(j: Judging, show: Show): void {
   earth(j);
-  instrumentFit(j, show);
+  fiftyOhm(j, show);
+  wrongFunction(j);
   voltages(j, show);
   surroundings(j, show);
 }
@@ -33,8 +40,8 @@ function earth(j: Judging): void {
   });
 }
 
-function instrumentFit(j: Judging, show: Show): void {
-  const { instrument, document, sheet } = j;
+function fiftyOhm(j: Judging, show: Show): void {
+  const { instrument, document } = j;
   if (instrument.resistance_ohm <= 100) {
     const at = document.instruments.indexOf(instrument);
     plainFinding(j, {
@@ -56,7 +63,10 @@ function instrumentFit(j: Judging, show: Show): void {
       },
     });
   }
-  wrongFunction(j);
+}
+
+function existence(j: Judging, show: Show): void {
+  const { instrument, document, sheet } = j;
   if (sheet.number("lvArm.wanted_ohm") === null) {
     const R1 = sheet.number("hvArm.resistance_ohm") as number;
     const alone = 1 + R1 / instrument.resistance_ohm;
@@ -148,6 +158,16 @@ function voltages(j: Judging, show: Show): void {
     });
   }
   const stated = Math.abs(waveform.nominal_V);
+  if (stated === 0) {
+    plainFinding(j, {
+      id: "voltage.none",
+      level: "stop",
+      what: "no voltage is given",
+      reason: "0 V is nothing to divide, and meets every limit. Type the voltage to be measured, e.g. 6 kV.",
+      source: practice("a limit is met at a voltage"),
+    });
+    return;
+  }
   const peak = j.sheet.number("working.peak_V") as number;
   if (peak * 1.25 <= instrument.greatestInput_Vpeak) {
     const edits: Edit[] = [{ pointer: "/brief/waveform/nominal_V", value: waveform.nominal_V * 1000 }];

@@ -2,6 +2,7 @@ import { formula } from "../standards/formula.ts";
 import { computedHere, practice } from "../standards/source.ts";
 import { type Judging, plainFinding, protectorOf } from "./judging.ts";
 import type { Show } from "./show.ts";
+import { wantedOf } from "./wanted.ts";
 
 export const protectorFormulas = {
   leakageError: formula({
@@ -45,11 +46,13 @@ export function judgeProtectors(j: Judging, show: Show): void {
     G: "/design/protectors:leakage_S",
     R2p: "lvArm.withInstrument_ohm",
   });
-  const share = document.brief.wantedUncertainty / 5;
-  if (error !== null && error > share) {
+  const wanted = wantedOf(document.brief);
+  if (error === null || wanted === null) return;
+  const share = wanted / 5;
+  if (error > share) {
     plainFinding(j, {
       id: "protector.leakage",
-      level: error > document.brief.wantedUncertainty ? "stop" : "caution",
+      level: error > wanted ? "stop" : "caution",
       what: "leakage of the protectors",
       actual: error,
       limit: share,

@@ -1,4 +1,4 @@
-import { givenPerElement, type Judging, judgeLimit } from "./judging.ts";
+import { givenPerElement, type Judging, judgeLimit, plainFinding, resistorOf } from "./judging.ts";
 import type { Show } from "./show.ts";
 import { iec60115, resistanceAbove, stressFormulas } from "./stressFormulas.ts";
 import type { WorkingVoltages } from "./workingVoltage.ts";
@@ -52,6 +52,7 @@ export function judgeStress(j: Judging, working: WorkingVoltages, show: Show): v
   );
   sheet.deriveEach("element.criticalResistance_ohm", f.critical, { dv: d, Vlim, P: "element.dissipationLimit_W" }, n);
   stressFindings(j, working, show);
+  unrated(j);
 }
 
 /** Potentials from the electrode downwards: the resistance above each upper end, summed from the top. */
@@ -133,6 +134,22 @@ function stressFindings(j: Judging, working: WorkingVoltages, show: Show): void 
     },
     show,
   );
+}
+
+/** An element whose part states no limiting voltage: no figure to judge it by, so no limit is shown to be met. */
+function unrated(j: Judging): void {
+  const { elements } = j.design.hvArm;
+  const at = elements.findIndex((element) => resistorOf(j, element.part).limitingVoltage_V === null);
+  if (at < 0) return;
+  const part = resistorOf(j, elements[at]!.part);
+  plainFinding(j, {
+    id: "element.voltage.notStated",
+    level: "stop",
+    what: "limiting element voltage not stated",
+    reason: `${part.name} states no limiting element voltage, so the voltage on element ${at + 1} cannot be judged. Type it from the data sheet.`,
+    source: iec60115,
+    element: at + 1,
+  });
 }
 
 /** Whether voltage or dissipation rules this value, and where the two cross. */

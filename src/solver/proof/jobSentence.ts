@@ -1,3 +1,4 @@
+import { wantedOf } from "../checks/wanted.ts";
 import type { Brief } from "../job/brief.ts";
 import type { Instrument } from "../job/instrument.ts";
 import { formatQuantity } from "../quantities/format.ts";
@@ -19,5 +20,6 @@ export function jobSentence(brief: Brief, instrument: Instrument | undefined): s
     recorded: `${sign}${V} peak of a recorded waveform`,
   }[w.kind];
   const into = instrument === undefined ? "" : `, into ${instrument.name}`;
-  return `${what}${into}, within ${Number((brief.wantedUncertainty * 100).toPrecision(3))} %`;
+  const wanted = wantedOf(brief);
+  return `${what}${into}${wanted === null ? "" : `, within ${Number((wanted * 100).toPrecision(3))} %`}`;
 }

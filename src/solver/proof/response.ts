@@ -2,6 +2,7 @@ import { wantedBand } from "../checks/band.ts";
 import { type Judging, plainFinding } from "../checks/judging.ts";
 import { capacitanceOf, protectorCapacitance } from "../checks/lvArm.ts";
 import type { Show } from "../checks/show.ts";
+import { wantedOf } from "../checks/wanted.ts";
 import { dcSolution } from "../network/dcSolution.ts";
 import type { LadderNetwork } from "../network/ladderNetwork.ts";
 import { stepFigures } from "../network/stepFigures.ts";
@@ -126,7 +127,8 @@ function bandDeviation(
   const worst = greatestDeviation(network, band) ?? 0;
   j.sheet.solved("response.bandDeviation_dB", responseRecords.frequency, worst, inputs, residual);
   const error = Math.abs(10 ** (worst / 20) - 1);
-  const wanted = j.document.brief.wantedUncertainty;
+  const wanted = wantedOf(j.document.brief);
+  if (wanted === null) return Math.abs(worst);
   plainFinding(j, {
     id: "response.band",
     level: error > wanted ? "stop" : error > wanted / 2 ? "caution" : "clear",

@@ -1,10 +1,12 @@
 import { type Judging, plainFinding } from "../checks/judging.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import type { Show } from "../checks/show.ts";
+import { wantedOf } from "../checks/wanted.ts";
 
 /** The predicted scale factor and its uncertainty against what was wanted. A calibration replaces the parts' terms. */
 export function judgeUncertainty(j: Judging, show: Show): void {
-  const { wantedUncertainty } = j.document.brief;
+  const wantedUncertainty = wantedOf(j.document.brief);
+  if (wantedUncertainty === null) return;
   const U = j.sheet.number("scaleFactor.uncertainty");
   const deviation = j.sheet.number("scaleFactor.deviation");
   if (U !== null) {
@@ -16,7 +18,7 @@ export function judgeUncertainty(j: Judging, show: Show): void {
       limit: wantedUncertainty,
       unit: "1",
       sense: "atMost",
-      margin: wantedUncertainty > 0 ? 1 - U / wantedUncertainty : -1,
+      margin: 1 - U / wantedUncertainty,
       reason:
         U <= wantedUncertainty
           ? `The parts alone leave ${show(U, "1")}; ${show(wantedUncertainty, "1")} is wanted.`

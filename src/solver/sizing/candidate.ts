@@ -1,3 +1,5 @@
+import { readingBasis } from "../checks/loading.ts";
+import { briefMisuse } from "../checks/misuse.ts";
 import { show } from "../checks/show.ts";
 import type { Design } from "../job/design.ts";
 import type { Part } from "../job/part.ts";
@@ -24,6 +26,7 @@ export function drafted(build: Build, limits: Limits, pool: Pool): Drafted {
   const { ask } = limits;
   const { family } = build.kind;
   const findings: Finding[] = [
+    ...briefStops(limits),
     ...inputFindings(limits),
     ...insulationFindings(limits),
     ...uncertaintyFindings(build, limits),
@@ -114,6 +117,37 @@ function differentParts({ hvArm, lvArm }: Design): number {
 
 const protectorParts = ({ ask }: Limits): Part[] =>
   ask.j.design.protectors.flatMap((fitted) => ask.j.parts.get(fitted.part) ?? []);
+
+/** What stands in the way of every build alike: said with each, so that none passes for clear. */
+function briefStops({ ask }: Limits): Finding[] {
+  const j = { ...ask.j, findings: [] as Finding[] };
+  briefMisuse(j, show);
+  const stops = j.findings.filter((each) => each.level === "stop");
+  const { instrument, document, sheet } = j;
+  const reading = (sheet.number(readingBasis(j)) as number) / document.brief.scaleFactor;
+  if (reading > instrument.range_V * (1 + 1e-9)) {
+    stops.push(
+      found("instrument.range", "stop", "reading within the locked range", {
+        actual: reading,
+        limit: instrument.range_V,
+        unit: "V",
+        sense: "atMost",
+        reason: `The reading at working voltage is ${show(reading, "V")} on the ${show(instrument.range_V, "V")} range. Take a larger scale factor or another range.`,
+      }),
+    );
+  }
+  if (instrument.readingAccuracy > document.brief.wantedUncertainty) {
+    stops.push(
+      found("instrument.accuracy", "stop", "wanted uncertainty against the instrument's own", {
+        actual: instrument.readingAccuracy,
+        limit: document.brief.wantedUncertainty,
+        sense: "atMost",
+        reason: `${instrument.name} reads within ${formatShare(instrument.readingAccuracy)}, ${formatShare(document.brief.wantedUncertainty)} is wanted: no divider can repair that.`,
+      }),
+    );
+  }
+  return stops;
+}
 
 /** What the instrument sees at the greatest peak, whatever the string: a larger scale factor is the only cure. */
 function inputFindings({ ask }: Limits): Finding[] {
