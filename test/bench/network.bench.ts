@@ -110,6 +110,13 @@ export const networkBenchmarks: readonly Benchmark[] = [
     bar: 12,
   },
   {
+    name: "sweep, 400 frequencies × 4000 elements, against records",
+    run: () => sweep(n4000, frequencies),
+    referenceName: plain,
+    reference: () => plainSweep(n4000),
+    bar: 0.7,
+  },
+  {
     name: "sweep, 400 frequencies × 60 elements, dense",
     run: () => sweep(n60, frequencies),
     referenceName: "dense complex elimination",
@@ -139,3 +146,4 @@ export const networkBenchmarks: readonly Benchmark[] = [
   },
 ];
 export const frameReference = { name: "sweep on records, 400 × 400", run: () => plainSweep(n400) };
+export const denseReference = { name: "dense complex elimination, 400 × 60", run: () => denseSweep(n60) };
