@@ -2,6 +2,7 @@ import { type Judging, plainFinding } from "../checks/judging.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import type { Show } from "../checks/show.ts";
 import { wantedOf } from "../checks/wanted.ts";
+import { formatShare } from "../quantities/format.ts";
 
 /** The predicted scale factor and its uncertainty against what was wanted. A calibration replaces the parts' terms. */
 export function judgeUncertainty(j: Judging, show: Show): void {
@@ -37,7 +38,7 @@ export function judgeUncertainty(j: Judging, show: Show): void {
       unit: "1",
       sense: "atMost",
       margin: 1 - Math.abs(deviation) / wantedUncertainty,
-      reason: `The fitted LV arm gives a scale factor ${show(Math.abs(deviation), "1")} off the one wanted. Trim it, or change the LV arm.`,
+      reason: `The fitted LV arm gives a scale factor ${formatShare(Math.abs(deviation))} off the one wanted. Trim it, or change the LV arm.`,
       source: scaleFactorFormulas.deviation.source,
       path: "scaleFactor.deviation",
       cure: { label: "size again", edits: [], sizeAgain: true },

@@ -35,3 +35,8 @@ describe("what is not stated is not met", () => {
     expect(finding(proof, "source.sag")?.level).toBe("stop");
   });
 });
+
+it("a scale factor far off is told as a share, not as a bare number", () => {
+  const proof = proven({ ...meter, brief: { scaleFactor: 100 }, elements: 10 });
+  expect(finding(proof, "scaleFactor.deviation")?.reason).toMatch(/gives a scale factor \d{3}\s% off the one wanted/);
+});
