@@ -18,13 +18,6 @@ const hits = (from: typeof source, pattern: RegExp) =>
   from.flatMap(({ file, text }) => (pattern.exec(text) === null ? [] : [`${file}: ${pattern.exec(text)![0]}`]));
 
 describe("manners", () => {
-  it("call the scale factor by its one name", () => {
-    const code = source.map(({ file, text }) => ({
-      file,
-      text: text.replace(/\/\*[\s\S]*?\*\/|\/\/.*$|"[^"\n]*"|`[^`]*`/gm, ""),
-    }));
-    expect(hits(code, /\b\w*([aA]ttenuat|Gain\b|Ratio\b)\w*/)).toEqual([]);
-  });
   it("compare numbers with a stated relative tolerance only, and skip nothing", () => {
     expect(hits(tests, /toBeCloseTo\(|\.(skip|only|todo)\(/)).toEqual([]);
   });

@@ -24,10 +24,14 @@ const words = (identifier: string) =>
     .toLowerCase()
     .split(/[\s_$]+/);
 
+/** Keys of the raw network's published form, where a fault is compared with the undisturbed divider. */
+const keysOfTheForm = ["outputRatio", "greatestElementRatio"];
+
 describe("identifiers", () => {
   it("say scale factor, never attenuation, gain or ratio; share for a part of a whole", () => {
     const wrong = code.flatMap(({ file, text }) =>
       [...new Set(bare(text).match(/[A-Za-z_$][\w$]*/g) ?? [])]
+        .filter((each) => !(file.startsWith("src/solver/network/") && keysOfTheForm.includes(each)))
         .filter((each) => words(each).some((word) => /^(attenuat|gain|ratio)(s|or|ors|ion|ions)?$/.test(word)))
         .map((each) => `${file}: ${each}`),
     );
