@@ -80,7 +80,7 @@ describe("the page", () => {
   });
 
   it("steps through the column with the keyboard and opens an element's slip", async () => {
-    const column = page.locator(".column-drawing");
+    const column = page.locator(".column-picture");
     await column.focus();
     await page.keyboard.press("End");
     expect(await column.getAttribute("aria-valuetext")).toMatch(/element 12 of 12, 6\.00/);
