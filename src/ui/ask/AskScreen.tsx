@@ -1,6 +1,7 @@
 import { useDocument } from "../frame/session.ts";
 import { Assumed } from "./Assumed.tsx";
 import { Instruments } from "./Instruments.tsx";
+import { NameField } from "./NameField.tsx";
 import { Policy } from "./Policy.tsx";
 import { SourceAsked } from "./SourceAsked.tsx";
 import { Surroundings } from "./Surroundings.tsx";
@@ -13,6 +14,7 @@ export function AskScreen() {
   const { brief } = useDocument();
   return (
     <>
+      <NameField />
       <Assumed />
       <Waveform brief={brief} />
       <Wanted brief={brief} />

@@ -1,6 +1,13 @@
 import type { Brief } from "../../solver/index.ts";
 import { ChoiceField } from "../inputs/ChoiceField.tsx";
 import { QuantityField } from "../inputs/QuantityField.tsx";
+import { AskSection } from "./AskSection.tsx";
+
+const follows = [
+  { label: "an element may stand, dc or rms", path: "element.voltageLimit_V", index: 0 },
+  { label: "an element may dissipate", path: "element.dissipationLimit_W", index: 0 },
+  { label: "critical resistance, derated", path: "element.criticalResistance_ohm", index: 0 },
+] as const;
 
 const series = (["E3", "E6", "E12", "E24", "E48", "E96", "E192"] as const).map((name) => [name, name] as const);
 const compensations = [
@@ -14,8 +21,7 @@ export function Policy({ brief }: { readonly brief: Brief }) {
   const at = "/brief/policy";
   const p = brief.policy;
   return (
-    <section className="sheet" aria-labelledby="policy-heading">
-      <h2 id="policy-heading">how cautious</h2>
+    <AskSection heading="how cautious" follows={follows}>
       <div className="fields">
         <QuantityField
           label="use of the limiting voltage"
@@ -48,7 +54,7 @@ export function Policy({ brief }: { readonly brief: Brief }) {
           unit="1"
           value={p.allowedSag}
           share
-          blank="the uncertainty wanted"
+          blank="as wanted"
           greatest={1}
         />
         <QuantityField
@@ -82,6 +88,6 @@ export function Policy({ brief }: { readonly brief: Brief }) {
           blank="no bound"
         />
       </div>
-    </section>
+    </AskSection>
   );
 }

@@ -1,6 +1,13 @@
 import type { Brief } from "../../solver/index.ts";
 import { ChoiceField } from "../inputs/ChoiceField.tsx";
 import { QuantityField } from "../inputs/QuantityField.tsx";
+import { AskSection } from "./AskSection.tsx";
+
+const follows = [
+  { label: "divider draws", path: "input.current_A" },
+  { label: "source sags by", path: "source.sag" },
+  { label: "falls to 60 V through the divider in", path: "charge.waitTime_s" },
+] as const;
 
 const earths = [
   ["oneSide", "one side is earthed"],
@@ -13,8 +20,7 @@ export function SourceAsked({ brief }: { readonly brief: Brief }) {
   const at = "/brief/source";
   const { source } = brief;
   return (
-    <section className="sheet" aria-labelledby="source-heading">
-      <h2 id="source-heading">source</h2>
+    <AskSection heading="source" follows={follows}>
       <div className="fields">
         <ChoiceField label="which point is earth" pointer={`${at}/earth`} value={source.earth} options={earths} />
         <QuantityField
@@ -46,7 +52,7 @@ export function SourceAsked({ brief }: { readonly brief: Brief }) {
           options={yesNo}
         />
       </div>
-    </section>
+    </AskSection>
   );
 }
 

@@ -1,6 +1,12 @@
 import type { Brief } from "../../solver/index.ts";
 import { ChoiceField } from "../inputs/ChoiceField.tsx";
 import { QuantityField } from "../inputs/QuantityField.tsx";
+import { AskSection } from "./AskSection.tsx";
+
+const follows = [
+  { label: "creepage along the column", path: "insulation.creepage_m" },
+  { label: "clearance along the column", path: "insulation.clearance_m" },
+] as const;
 
 const degrees = [
   [1, "1, clean and dry"],
@@ -19,8 +25,7 @@ export function Surroundings({ brief }: { readonly brief: Brief }) {
   const at = "/brief/surroundings";
   const s = brief.surroundings;
   return (
-    <section className="sheet" aria-labelledby="surroundings-heading">
-      <h2 id="surroundings-heading">surroundings</h2>
+    <AskSection heading="surroundings" follows={follows}>
       <div className="fields">
         <QuantityField
           label="altitude"
@@ -71,6 +76,6 @@ export function Surroundings({ brief }: { readonly brief: Brief }) {
           greatest={1000}
         />
       </div>
-    </section>
+    </AskSection>
   );
 }

@@ -1,11 +1,18 @@
 import type { Brief } from "../../solver/index.ts";
 import { QuantityField } from "../inputs/QuantityField.tsx";
+import { AskSection } from "./AskSection.tsx";
+
+const follows = [
+  { label: "scale factor, predicted", path: "scaleFactor.predicted", digits: 6 },
+  { label: "off the one wanted", path: "scaleFactor.deviation" },
+  { label: "uncertainty from parts, k = 2", path: "scaleFactor.uncertainty", digits: 2 },
+  { label: "greatest deviation over the band", path: "response.bandDeviation_dB" },
+] as const;
 
 /** Scale factor, uncertainty and band that are wanted. */
 export function Wanted({ brief }: { readonly brief: Brief }) {
   return (
-    <section className="sheet" aria-labelledby="wanted-heading">
-      <h2 id="wanted-heading">what is wanted</h2>
+    <AskSection heading="what is wanted" follows={follows}>
       <div className="fields">
         <QuantityField
           label="scale factor"
@@ -33,6 +40,6 @@ export function Wanted({ brief }: { readonly brief: Brief }) {
         />
         <QuantityField label="band to" pointer="/brief/band_Hz/1" unit="Hz" value={brief.band_Hz[1]} greatest={1e10} />
       </div>
-    </section>
+    </AskSection>
   );
 }

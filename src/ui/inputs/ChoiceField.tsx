@@ -1,6 +1,7 @@
 import { useId } from "react";
 import { useDocument, useInputs } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
+import { FieldFinding } from "./FieldFinding.tsx";
 import { originAt } from "./originAt.ts";
 import "./inputs.css";
 
@@ -23,6 +24,7 @@ export function ChoiceField<T extends string | number | boolean>({ label, pointe
       <div className="line">
         <select
           id={id}
+          data-pointer={pointer}
           value={String(value)}
           disabled={locked}
           onChange={(event) => {
@@ -37,6 +39,9 @@ export function ChoiceField<T extends string | number | boolean>({ label, pointe
           ))}
         </select>
         <span className="origin">{origin}</span>
+      </div>
+      <div className="said">
+        <FieldFinding pointer={pointer} />
       </div>
     </div>
   );
