@@ -27,7 +27,7 @@ export function App() {
       <Header onDrawer={() => setDrawer(!drawer)} />
       <Strip />
       <aside className={drawer ? "side open" : "side"} aria-label="column">
-        <div className="sticky">
+        <div className="column-sheet">
           {drawer ? (
             <button type="button" className="plain-button drawer-button" onClick={() => setDrawer(false)}>
               close
@@ -43,11 +43,10 @@ export function App() {
         </Suspense>
       </main>
       <aside className="right" aria-label="what it comes to">
-        {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable with the keyboard */}
-        <section className="sticky" tabIndex={0} aria-label="in short and findings">
+        <div className="pinned">
           <InShort />
           <Findings />
-        </section>
+        </div>
       </aside>
       <Why />
     </div>

@@ -25,6 +25,7 @@ async function start(): Promise<void> {
     looking: newLooking(),
     runner: createRunner(startWorker),
     keeper: null,
+    handle: null,
   };
   await recover(session);
   createRoot(document.getElementById("page")!).render(

@@ -14,5 +14,5 @@ export function inventedSession(): Session {
     throw new Error("no worker in this session");
   };
   const runner = { check: { ask: asked }, long: { ask: asked } } as unknown as Session["runner"];
-  return { store, judged, looking: newLooking(), runner, keeper: null };
+  return { store, judged, looking: newLooking(), runner, keeper: null, handle: null };
 }

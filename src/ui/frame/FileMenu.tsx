@@ -1,5 +1,14 @@
 import { useEffect, useRef, useState } from "react";
-import { exampleDocument, exampleNames, inNewSlot, openText, plainName, saveDocument } from "./files.ts";
+import {
+  exampleDocument,
+  exampleNames,
+  inNewSlot,
+  openByDialog,
+  openText,
+  plainName,
+  saveACopy,
+  saveDocument,
+} from "./files.ts";
 import { StartDialog } from "./StartDialog.tsx";
 import { useSession } from "./session.ts";
 
@@ -10,7 +19,7 @@ export function FileMenu() {
   const [starting, setStarting] = useState(false);
   const box = useRef<HTMLDivElement>(null);
   const file = useRef<HTMLInputElement>(null);
-  useShortcuts(() => file.current?.click());
+  useShortcuts(() => void openByDialog(session, () => file.current?.click()));
   useEffect(() => {
     if (!open) return;
     const outside = (event: Event) => {
@@ -23,10 +32,7 @@ export function FileMenu() {
     setOpen(false);
     void what();
   };
-  const copy = () => {
-    session.store.getState().workOnACopy();
-    return saveDocument(session);
-  };
+  const openFile = () => openByDialog(session, () => file.current?.click());
   const example = (name: string) => async () => {
     const document_ = await exampleDocument(name);
     await inNewSlot(session, () => session.store.getState().openDocument(document_, { example: true }));
@@ -47,9 +53,9 @@ export function FileMenu() {
       {open ? (
         <ul aria-label="file">
           <Item text="New, from my own voltage …" onPress={act(() => setStarting(true))} />
-          <Item text="Open …" keys="Ctrl O" onPress={act(() => file.current?.click())} />
+          <Item text="Open …" keys="Ctrl O" onPress={act(openFile)} />
           <Item text="Save" keys="Ctrl S" onPress={act(() => saveDocument(session))} />
-          <Item text="Save a copy …" onPress={act(copy)} />
+          <Item text="Save a copy …" onPress={act(() => saveACopy(session))} />
           <li className="heading">examples</li>
           {exampleNames.map((name) => (
             <Item key={name} text={plainName(name)} onPress={act(example(name))} />

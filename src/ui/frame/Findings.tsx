@@ -1,33 +1,34 @@
 import { useState } from "react";
-import type { Cure, Finding } from "../../solver/index.ts";
+import { type Cure, citation, type Finding } from "../../solver/index.ts";
 import { LevelMark } from "../prove/LevelMark.tsx";
 import { numberText } from "./figureText.ts";
 import { openWhy, useInputs, useJudged, useSession } from "./session.ts";
 import { useApply } from "./useApply.ts";
 
-/** The findings, worst first: one line each, with its cure as a button; what is clear is counted and opened on request. */
+/** The findings, worst first: one line each, its reason on request, its cure as a button; what is clear is counted. */
 export function Findings() {
   const findings = useJudged((state) => state.proof?.findings);
   const stale = useJudged((state) => state.stale);
   const [all, setAll] = useState(false);
   if (findings === undefined) return null;
-  const open = findings.filter((each) => each.level !== "clear");
-  const clear = findings.filter((each) => each.level === "clear");
   const count = (level: string) => findings.filter((each) => each.level === level).length;
+  const shown = all ? findings : findings.filter((each) => each.level !== "clear");
   return (
-    <section aria-label="findings" className={stale ? "stale" : ""}>
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable with the keyboard
+    <section aria-label="findings" className={stale ? "findings-sheet stale" : "findings-sheet"} tabIndex={0}>
       <h2>
-        FINDINGS · {count("stop")} stop · {count("caution")} caution
+        FINDINGS <span className="counts">{tally(count("stop"), count("caution"))}</span>
       </h2>
       <ul className="finding-lines">
-        {(all ? findings : open).map((each) => (
-          <Line key={`${each.id} ${each.what}`} finding={each} />
+        {shown.map((each, i) => (
+          // biome-ignore lint/suspicious/noArrayIndexKey: one check may speak of several elements
+          <Line key={`${each.id} ${each.what} ${i}`} finding={each} />
         ))}
-        {all || clear.length === 0 ? null : (
+        {all || count("clear") === 0 ? null : (
           <li>
             <LevelMark level="clear" word={false} />
             <button type="button" className="figure-button" onClick={() => setAll(true)}>
-              {clear.length} clear: limits met with margin
+              {count("clear")} clear
             </button>
           </li>
         )}
@@ -41,37 +42,54 @@ export function Findings() {
   );
 }
 
+const tally = (stops: number, cautions: number): string =>
+  [stops > 0 ? `${stops} stop` : "", cautions > 0 ? `${cautions} caution` : ""]
+    .filter((each) => each !== "")
+    .join(", ") || "none open";
+
 function Line({ finding }: { readonly finding: Finding }) {
-  const session = useSession();
-  const { actual, limit, unit, path } = finding;
+  const [open, setOpen] = useState(false);
   return (
-    <li>
+    <li className={`is-${finding.level}`}>
       <LevelMark level={finding.level} word={false} />
       <div>
-        <span className={finding.level === "stop" ? "stop-line" : ""}>{finding.what}</span>
-        {actual === null ? null : (
-          <>
-            {" "}
-            <button
-              type="button"
-              className="figure-button"
-              disabled={path === null}
-              onClick={() =>
-                path !== null && openWhy(session, path, finding.element === undefined ? null : finding.element - 1)
-              }
-            >
-              {numberText(actual, unit)}
-            </button>
-            {limit === null ? null : <span className="of"> of {numberText(limit, unit)}</span>}
-          </>
-        )}
+        <button type="button" className="said-button" aria-expanded={open} onClick={() => setOpen(!open)}>
+          {finding.what}
+        </button>{" "}
+        <Numbers finding={finding} />
+        {open ? (
+          <p className="reason">
+            {finding.reason} <span className="quiet">{citation(finding.source)}</span>
+          </p>
+        ) : null}
       </div>
       {finding.cure === null ? null : <CureButton cure={finding.cure} what={finding.what} />}
     </li>
   );
 }
 
-function CureButton({ cure, what }: { readonly cure: Cure; readonly what: string }) {
+function Numbers({ finding }: { readonly finding: Finding }) {
+  const session = useSession();
+  const { actual, limit, unit, path, element } = finding;
+  if (actual === null) return null;
+  const place = element === undefined ? null : element - 1;
+  const text = numberText(actual, unit);
+  return (
+    <span className="numbers">
+      {path === null ? (
+        text
+      ) : (
+        <button type="button" className="figure-button" onClick={() => openWhy(session, path, place)}>
+          {text}
+        </button>
+      )}
+      {limit === null ? null : <span className="of"> of {numberText(limit, unit)}</span>}
+    </span>
+  );
+}
+
+/** Makes the cure's edits as one step of undo. */
+export function CureButton({ cure, what }: { readonly cure: Cure; readonly what: string }) {
   const apply = useApply();
   const locked = useInputs((state) => state.file.readOnly !== null);
   return (

@@ -1,5 +1,6 @@
 import { redoNames, undoNames } from "../../store/history.ts";
 import { FileMenu } from "./FileMenu.tsx";
+import { HelpButton } from "./Help.tsx";
 import { useDocument, useInputs, useJudged, useLooking, useSession } from "./session.ts";
 import { ThemeButton } from "./ThemeButton.tsx";
 
@@ -39,6 +40,7 @@ export function Header({ onDrawer }: { readonly onDrawer: () => void }) {
         </button>
         <FileMenu />
         <ThemeButton />
+        <HelpButton />
       </nav>
     </header>
   );

@@ -8,7 +8,7 @@ export function InShort() {
   const proof = useJudged((state) => state.proof);
   const refusal = useJudged((state) => state.refusal);
   return (
-    <section aria-label="in short" aria-busy={stale}>
+    <section aria-label="in short" className="in-short-sheet" aria-busy={stale}>
       <h2>IN SHORT</h2>
       {refusal === null ? null : (
         <div className="notice bad" role="status">

@@ -53,6 +53,7 @@ export function Notices() {
   );
 
   function copyOf(of: typeof session): void {
+    of.handle = null;
     const slot = crypto.randomUUID();
     sessionStorage.setItem("slot", slot);
     if (of.keeper === null) of.store.getState().workOnACopy();

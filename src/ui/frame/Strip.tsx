@@ -34,8 +34,10 @@ export function Strip() {
           aria-current={current === name ? "page" : undefined}
           onClick={() => session.looking.setState({ screen: name })}
         >
-          <span className="name">{title}</span>
-          <State state={stateOf(name, findings)} />
+          <span className="top">
+            <span className="name">{title}</span>
+            <State state={stateOf(name, findings)} />
+          </span>
           <span className="line">{line}</span>
         </button>
       ))}

@@ -22,6 +22,7 @@ export function ThemeButton() {
     <button
       type="button"
       title="light, dark, or as the system has it"
+      aria-label={`theme: ${theme}`}
       onClick={() => {
         const chosen = next[theme];
         localStorage.setItem("theme", chosen);
@@ -29,7 +30,7 @@ export function ThemeButton() {
         setTheme(chosen);
       }}
     >
-      {theme === "system" ? "light or dark" : theme}
+      theme: {theme}
     </button>
   );
 }

@@ -1,48 +1,53 @@
-import { useEffect, useRef } from "react";
-import { citation, filled, type SheetValue, type WhyInput, type Why as WhyOf, why } from "../../solver/index.ts";
-import { numberText } from "./figureText.ts";
-import { useJudged, useLooking, useSession } from "./session.ts";
-import { Typeset } from "./Typeset.tsx";
+import { useEffect, useLayoutEffect, useRef, useState } from "react";
+import { why } from "../../solver/index.ts";
+import { type Session, useJudged, useLooking, useSession, type WhyAsked } from "./session.ts";
+import { WhyGiven } from "./WhyGiven.tsx";
+import { WhyLaid } from "./WhyLaid.tsx";
 
 /** The why of a number, opened in place: formula, the same with its numbers, result, origins, source. */
 export function Why() {
-  const session = useSession();
   const asked = useLooking((state) => state.why);
+  if (asked === null) return null;
+  return <Opened key={`${asked.at.left} ${asked.at.top}`} asked={asked} />;
+}
+
+function Opened({ asked }: { readonly asked: WhyAsked }) {
+  const session = useSession();
   const proof = useJudged((state) => state.proof);
   const sizing = useJudged((state) => state.sizing);
-  const box = useRef<HTMLElement>(null);
-  const back = useRef<Element | null>(null);
-  const open = asked !== null;
-  const path = asked?.path;
-  useEffect(() => {
-    if (!open) return;
-    back.current = document.activeElement;
-    return () => (back.current as HTMLElement | null)?.focus?.();
-  }, [open]);
-  useEffect(() => {
-    if (path !== undefined) box.current?.focus();
-  }, [path]);
-  if (asked === null) return null;
+  const box = useFocus(asked.path);
+  const place = usePlace(box, asked);
   const sheet = asked.from === "sizing" ? sizing?.sheet : proof?.sheet;
-  const close = () => session.looking.setState({ why: null });
   const found = sheet === undefined ? null : why(asked.path, sheet, proof?.origins ?? {}, asked.index);
-  const go = (path: string) => session.looking.setState({ why: { ...asked, path } });
+  const go = (path: string) =>
+    session.looking.setState({ why: { ...asked, path, trail: [...asked.trail, asked.path] } });
   return (
     <section
       ref={box}
       className="why"
       aria-label="why this number"
       tabIndex={-1}
-      style={{ left: asked.left, top: asked.top }}
+      style={place}
       onKeyDown={(event) => {
         if (event.key !== "Escape") return;
         event.stopPropagation();
-        close();
+        close(session);
       }}
     >
-      {found === null ? <p>This number has no trace here.</p> : <Laid found={found} onGo={go} />}
+      {found === null ? (
+        <p>This number has no trace here.</p>
+      ) : found.kind === "given" ? (
+        <WhyGiven found={found} />
+      ) : (
+        <WhyLaid found={found} onGo={go} />
+      )}
       <p className="end">
-        <button type="button" className="plain-button" onClick={close}>
+        {asked.trail.length === 0 ? null : (
+          <button type="button" className="plain-button" onClick={() => back(session, asked)}>
+            back
+          </button>
+        )}
+        <button type="button" className="plain-button" onClick={() => close(session)}>
           close
         </button>
       </p>
@@ -50,74 +55,42 @@ export function Why() {
   );
 }
 
-function Laid({ found, onGo }: { readonly found: WhyOf; readonly onGo: (path: string) => void }) {
-  if (found.kind === "given") {
-    return (
-      <>
-        <h2>{found.path}</h2>
-        <p>
-          {valueText(found.value, "1")}, {found.origin}
-        </p>
-      </>
-    );
-  }
-  const symbols = Object.fromEntries(found.inputs.map((input) => [input.name, input.symbol]));
-  const numbers = Object.fromEntries(found.inputs.map((input) => [input.name, inputText(input)]));
-  const result = valueText(found.value, found.unit);
-  const formula = found.kind === "formula";
-  return (
-    <>
-      <h2>
-        {found.title}
-        {found.index === null ? "" : `, element ${found.index + 1}`}
-      </h2>
-      <p className="statement">
-        <Typeset text={filled(found.statement, { ...symbols, "=": found.symbol })} />
-      </p>
-      {formula ? <p className="numbers">{filled(found.statement, { ...numbers, "=": result })}</p> : null}
-      <p>
-        <strong>{result}</strong> {found.meaning}
-      </p>
-      <table>
-        <tbody>
-          {found.inputs.map((input) => (
-            <tr key={input.name}>
-              <td>
-                <Typeset text={input.symbol} />
-              </td>
-              <td>
-                {input.origin === null ? (
-                  <button type="button" className="figure-button" onClick={() => onGo(input.path)}>
-                    {inputText(input)}
-                  </button>
-                ) : (
-                  inputText(input)
-                )}
-              </td>
-              <td>{input.meaning}</td>
-              <td className="quiet">{input.origin ?? "computed"}</td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-      {found.method === null ? null : (
-        <p>
-          {found.method} Residual {found.residual?.toExponential(1)}, bound {found.residualBound?.toExponential(0)}.
-        </p>
-      )}
-      <p className="quiet">Holds: {found.holds}</p>
-      <p className="quiet">{citation(found.source)}</p>
-    </>
-  );
+const close = (session: Session) => session.looking.setState({ why: null });
+
+function back(session: Session, asked: WhyAsked): void {
+  const path = asked.trail.at(-1);
+  if (path !== undefined) session.looking.setState({ why: { ...asked, path, trail: asked.trail.slice(0, -1) } });
 }
 
-const inputText = (input: WhyInput): string => valueText(input.value, input.unit);
+/** The focus goes into what opened, and back to the number pressed when it closes. */
+function useFocus(path: string) {
+  const box = useRef<HTMLElement>(null);
+  const pressed = useRef<Element | null>(null);
+  useEffect(() => {
+    pressed.current = document.activeElement;
+    return () => {
+      const from = pressed.current as HTMLElement | null;
+      if (document.activeElement === document.body || document.activeElement === null) from?.focus?.();
+    };
+  }, []);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: each further figure takes the focus anew
+  useEffect(() => box.current?.focus({ preventScroll: true }), [path]);
+  return box;
+}
 
-function valueText(value: SheetValue, unit: string): string {
-  if (value === null) return "–";
-  if (typeof value === "number") return numberText(value, unit, 6, false);
-  const list = value as readonly (number | null)[];
-  const first = list[0];
-  const same = typeof first === "number" && list.every((each) => each === first);
-  return same ? `${list.length} × ${numberText(first, unit, 5, false)}` : `${list.length} values`;
+/** Under the number pressed; above it where there is no room under it; always within the window. */
+function usePlace(box: React.RefObject<HTMLElement | null>, { at }: WhyAsked) {
+  const [place, setPlace] = useState({ left: at.left, top: at.bottom + 6 });
+  useLayoutEffect(() => {
+    const { offsetWidth: wide, offsetHeight: tall } = box.current!;
+    const { scrollX, scrollY, innerHeight } = window;
+    const right = scrollX + document.documentElement.clientWidth - wide - 8;
+    const under = at.bottom + 6;
+    const over = at.top - 6 - tall;
+    const fits = under + tall <= scrollY + innerHeight - 8;
+    const top =
+      fits || over < scrollY ? Math.min(under, Math.max(scrollY + 8, scrollY + innerHeight - tall - 8)) : over;
+    setPlace({ left: Math.max(scrollX + 8, Math.min(at.left, right)), top });
+  }, [box, at]);
+  return place;
 }

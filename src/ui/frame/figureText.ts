@@ -25,3 +25,22 @@ export function numberText(value: number, unit: string, digits = 3, trailing = t
   if (unit === "1" && value !== 0 && Math.abs(value) < 0.1) return formatShare(value, digits);
   return formatQuantity(value, unit in units ? (unit as UnitName) : "1", { digits, trailing });
 }
+
+/** A figure or an input with all its digits that say something; a list as what its members have in common. */
+export function valueText(value: SheetValue | readonly (number | null)[], unit: string): string {
+  if (value === null) return "–";
+  if (typeof value === "number") return numberText(value, unit, 6, false);
+  const list = value as readonly (number | null)[];
+  const first = list[0];
+  const same = typeof first === "number" && list.every((each) => each === first);
+  return same ? `${list.length} × ${numberText(first, unit, 5, false)}` : `${list.length} values`;
+}
+
+/** Unit of an input by its key: `/brief/band_Hz/1` is in Hz, `…/capacitance_F_per_m` in F/m. */
+export function pointerUnit(pointer: string): string {
+  const key = pointer.replace(/\/\d+$/, "");
+  const per = /_([A-Za-z]+)_per_([A-Za-z]+)$/.exec(key);
+  if (per !== null) return `${per[1]}/${per[2]}`;
+  const perOne = /_per_([A-Za-z]+)$/.exec(key);
+  return perOne === null ? unitOf(key) : `1/${perOne[1]}`;
+}

@@ -2,6 +2,7 @@ import { encodeDocument } from "../../file/encode.ts";
 import { restoreDocument } from "../../file/restore.ts";
 import type { DividerDocument } from "../../solver/index.ts";
 import { IndexedDbShelf } from "../../store/indexedDbShelf.ts";
+import { canPick, downloadText, type FileHandle, pickToOpen, pickToSave, writeText } from "./fileHandles.ts";
 import type { Session } from "./session.ts";
 
 /** Solved jobs that ship with the program, each fetched when it is opened. */
@@ -25,6 +26,7 @@ export const firstExample = (): Promise<DividerDocument> => exampleDocument(firs
 
 /** A slot of its own for each design in the browser copy; the tab remembers which it has. */
 export async function inNewSlot(session: Session, put: () => void): Promise<void> {
+  session.handle = null;
   if (session.keeper !== null) {
     const slot = crypto.randomUUID();
     sessionStorage.setItem("slot", slot);
@@ -41,8 +43,24 @@ export async function lastSlot(): Promise<string | null> {
   return newest?.slot ?? null;
 }
 
+/** Opens a file by the browser's own dialog, so that Save writes back into it; by `other` where there is no such dialog. */
+export async function openByDialog(session: Session, other: () => void): Promise<void> {
+  if (!canPick()) return other();
+  try {
+    const handle = await pickToOpen();
+    if (handle !== null) await openText(session, await (await handle.getFile()).text(), handle.name, handle);
+  } catch (error) {
+    session.looking.setState({ notice: { text: `Not opened: ${(error as Error).message}`, bad: true } });
+  }
+}
+
 /** Opens the text of a file in place of what is open; what is broken is said and replaces nothing. */
-export async function openText(session: Session, text: string, name: string): Promise<void> {
+export async function openText(
+  session: Session,
+  text: string,
+  name: string,
+  handle: FileHandle | null = null,
+): Promise<void> {
   const restored = restoreDocument(text);
   if (restored.kind === "refused") {
     const { where, why, cure } = restored.refusal;
@@ -56,6 +74,7 @@ export async function openText(session: Session, text: string, name: string): Pr
       readOnly: restored.readOnly ? "newer version" : null,
     });
   });
+  session.handle = restored.readOnly ? null : handle;
   const { repairs } = restored;
   session.looking.setState({
     notice:
@@ -69,46 +88,42 @@ export async function openText(session: Session, text: string, name: string): Pr
   });
 }
 
-const type = { description: "Stringwright design", accept: { "application/json": [".json"] as const } };
-
-interface Pickers {
-  showSaveFilePicker?: (options: object) => Promise<{
-    name: string;
-    createWritable(): Promise<{ write(text: string): Promise<void>; close(): Promise<void> }>;
-  }>;
+/** Saves into the file that is open; asks for a place where there is none yet, or hands it over as a download. */
+export function saveDocument(session: Session): Promise<void> {
+  return written(session, async (text, suggestedName, document_) => {
+    const handle = session.handle ?? (await pickToSave(suggestedName));
+    if (handle === null) return;
+    if (handle === undefined) downloadText(suggestedName, text);
+    else await writeText(handle, text);
+    session.handle = handle ?? null;
+    session.store.getState().fileSaved(document_, handle?.name ?? suggestedName);
+  });
 }
 
-/** Saves by the browser's own dialog where it has one, else as a download. */
-export async function saveDocument(session: Session): Promise<void> {
+/** Writes a copy elsewhere; what is open stays what it is, in its own file. */
+export function saveACopy(session: Session): Promise<void> {
+  return written(session, async (text, suggestedName) => {
+    const name = suggestedName.replace(/(\.stringwright\.json)$/, "-copy$1");
+    const handle = await pickToSave(name);
+    if (handle === null) return;
+    if (handle === undefined) downloadText(name, text);
+    else await writeText(handle, text);
+    session.looking.setState({ notice: { text: `A copy is saved as ${handle?.name ?? name}.`, bad: false } });
+  });
+}
+
+async function written(
+  session: Session,
+  write: (text: string, suggestedName: string, document_: DividerDocument) => Promise<void>,
+): Promise<void> {
   const { document: document_ } = session.store.getState();
-  const text = encodeDocument(document_);
-  const suggestedName = `${fileStem(document_.name)}.stringwright.json`;
-  const picker = (window as unknown as Pickers).showSaveFilePicker;
   try {
-    if (picker !== undefined) {
-      const handle = await picker({ suggestedName, types: [type] });
-      const writable = await handle.createWritable();
-      await writable.write(text);
-      await writable.close();
-      session.store.getState().fileSaved(document_, handle.name);
-      return;
-    }
-    downloadText(suggestedName, text);
-    session.store.getState().fileSaved(document_, suggestedName);
+    await write(encodeDocument(document_), `${fileStem(document_.name)}.stringwright.json`, document_);
   } catch (error) {
-    if ((error as Error).name === "AbortError") return;
     session.looking.setState({
       notice: { text: `Not saved: ${(error as Error).message} The copy in this browser stands.`, bad: true },
     });
   }
-}
-
-function downloadText(name: string, text: string): void {
-  const link = document.createElement("a");
-  link.href = URL.createObjectURL(new Blob([text], { type: "application/json" }));
-  link.download = name;
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(link.href), 10_000);
 }
 
 const fileStem = (name: string): string =>

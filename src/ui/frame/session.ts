@@ -6,6 +6,7 @@ import type { Keeper } from "../../store/keeper.ts";
 import type { Store } from "../../store/state.ts";
 import type { DividerStore } from "../../store/store.ts";
 import type { Runner } from "../../work/runner.ts";
+import type { FileHandle } from "./fileHandles.ts";
 
 /** The last answer of the solver. While a newer one is awaited it stands, marked as stale, never mixed with new inputs. */
 export interface Judged {
@@ -36,8 +37,10 @@ export interface WhyAsked {
   readonly path: string;
   readonly index: number | null;
   readonly from: "proof" | "sizing";
-  readonly left: number;
-  readonly top: number;
+  /** Figures gone through to come here, the first one pressed first. */
+  readonly trail: readonly string[];
+  /** Where the number stands that was pressed, px on the page. */
+  readonly at: { readonly left: number; readonly top: number; readonly bottom: number };
 }
 
 export interface Notice {
@@ -53,6 +56,8 @@ export interface Session {
   readonly runner: Runner;
   /** null until the browser copy is open, or where there is none. */
   keeper: Keeper | null;
+  /** The file that Save writes into; null: none yet, or the browser hands out none. */
+  handle: FileHandle | null;
 }
 
 export const SessionContext = createContext<Session | null>(null);
@@ -139,9 +144,24 @@ export function openWhy(
   from: WhyAsked["from"] = "proof",
 ): void {
   const box = document.activeElement?.getBoundingClientRect();
-  const width = 440;
-  const left = Math.max(8, Math.min(box?.left ?? 80, window.innerWidth - width - 8)) + window.scrollX;
-  const below = (box?.bottom ?? 80) + 6;
-  const top = (below > window.innerHeight * 0.6 ? Math.max(8, (box?.top ?? 0) - 360) : below) + window.scrollY;
-  session.looking.setState({ why: { path, index, from, left, top } });
+  const { scrollX, scrollY } = window;
+  const at = {
+    left: (box?.left ?? 80) + scrollX,
+    top: (box?.top ?? 80) + scrollY,
+    bottom: (box?.bottom ?? 80) + scrollY,
+  };
+  session.looking.setState({ why: { path, index, from, trail: [], at } });
+}
+
+/** Opens the field of an input: its screen, and the caret in it. */
+export function goToField(session: Session, pointer: string): void {
+  const element = /^\/design\/hvArm\/elements\/(\d+)\//.exec(pointer)?.[1];
+  session.looking.setState(
+    element === undefined ? { screen: "ask", why: null } : { element: Number(element) + 1, why: null },
+  );
+  requestAnimationFrame(() => {
+    const field = document.querySelector<HTMLElement>(`[data-pointer="${CSS.escape(pointer)}"]`);
+    field?.focus();
+    field?.scrollIntoView({ block: "center" });
+  });
 }
