@@ -1,7 +1,7 @@
 import { valueAt } from "../../file/pointer.ts";
 import { plainPointer } from "../../solver/index.ts";
 import { pointerUnit, valueText } from "../frame/figureText.ts";
-import { goToField, useInputs, useJudged, useSession } from "../frame/session.ts";
+import { goToField, hasField, useInputs, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
 
 /** Everything that is assumed, counted in one place; each accepted as it stands, or typed in its field. */
@@ -37,9 +37,11 @@ function Row({ pointer }: { readonly pointer: string }) {
       <th scope="row">{name}</th>
       <td className="assumed-value">{textOf(value, pointer)}</td>
       <td>
-        <button type="button" className="figure-button" onClick={() => goToField(session, pointer)}>
-          type<span className="unseen"> {name}</span>
-        </button>
+        {hasField(pointer) ? (
+          <button type="button" className="figure-button" onClick={() => goToField(session, pointer)}>
+            type<span className="unseen"> {name}</span>
+          </button>
+        ) : null}
       </td>
       <td>
         <button

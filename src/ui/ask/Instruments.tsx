@@ -1,6 +1,6 @@
-import { useMemo, useState } from "react";
+import { useEffect, useMemo, useState } from "react";
 import { catalogue, formatQuantity, formatShare, type Instrument, type InstrumentRow } from "../../solver/index.ts";
-import { useDocument, useInputs, useJudged } from "../frame/session.ts";
+import { useDocument, useInputs, useJudged, useLooking } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
 import { InstrumentFields } from "./InstrumentFields.tsx";
 
@@ -9,6 +9,11 @@ export function Instruments() {
   const { instruments, principal } = useDocument();
   const rows = useJudged((state) => state.proof?.instruments);
   const [open, setOpen] = useState<string | null>(null);
+  const asked = useLooking((state) => /^\/instruments\/(\d+)\//.exec(state.field ?? "")?.[1]);
+  const wanted = asked === undefined ? undefined : instruments[Number(asked)]?.id;
+  useEffect(() => {
+    if (wanted !== undefined) setOpen(wanted);
+  }, [wanted]);
   const shown = instruments.findIndex((each) => each.id === open);
   const one = instruments[shown];
   return (

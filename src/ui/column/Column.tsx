@@ -2,6 +2,7 @@ import { useMemo, useState } from "react";
 import { useDocument, useJudged, useLooking } from "../frame/session.ts";
 import { columnScale, middleOf } from "./columnScale.ts";
 import { Drawing, height } from "./Drawing.tsx";
+import { GeometryFields } from "./GeometryFields.tsx";
 import { type Layer, type LayerView, layers, layerView } from "./layers.ts";
 import { Slip } from "./Slip.tsx";
 import "./column.css";
@@ -42,6 +43,7 @@ export function Column() {
         ))}
       </fieldset>
       <InkScale view={view} />
+      <GeometryFields design={design} />
     </section>
   );
 }

@@ -115,15 +115,25 @@ function Bodies({ document: document_, design, scale, view }: BodiesProps) {
     <g>
       <line className="lead" x1={axis} x2={axis} y1={scale.y(scale.top_m)} y2={scale.y(scale.foot_m)} />
       {shades.map(({ ink, d }) => (
-        <path key={ink ?? "none"} className={ink === null ? "resistor plain" : "resistor"} d={d} style={inked(ink)} />
+        <path
+          key={ink ?? "none"}
+          className={ink === null ? "resistor plain" : "resistor"}
+          d={d}
+          style={inked(ink, scale.pitch_px)}
+        />
       ))}
-      {capacitors === "" ? null : <path className="capacitor" d={capacitors} />}
+      {capacitors === "" ? null : (
+        <path className="capacitor" d={capacitors} style={{ strokeWidth: Math.min(0.8, scale.pitch_px / 6) }} />
+      )}
     </g>
   );
 }
 
-const inked = (ink: number | null) =>
-  ink === null ? undefined : { fill: `color-mix(in oklab, var(--potential-high) ${ink * 100}%, var(--potential-low))` };
+/** Outlines thin with the pitch, so that many bodies keep their ink. */
+const inked = (ink: number | null, pitch_px: number) => ({
+  strokeWidth: Math.min(0.5, pitch_px / 12),
+  ...(ink === null ? {} : { fill: `color-mix(in oklab, var(--potential-high) ${ink * 100}%, var(--potential-low))` }),
+});
 
 function Chosen({ scale, element }: { readonly scale: ColumnScale; readonly element: number }) {
   const tall = Math.max(scale.pitch_px, 6);

@@ -60,6 +60,12 @@ export function Slip({ at }: { readonly at: number }) {
   );
 }
 
+function used(value: number | null, most: number | null): string {
+  if (value === null || most === null || most === 0) return "–";
+  const share = Math.abs(value) / most;
+  return share < 1e-4 ? "< 0.01\u2009%" : formatShare(share, 2);
+}
+
 function Bases({ i }: { readonly i: number }) {
   const values = useJudged((state) => state.proof?.sheet.values);
   const number = (path: string): number | null => {
@@ -91,7 +97,7 @@ function Bases({ i }: { readonly i: number }) {
               <Figure path={limit} index={i} label={`${name}, may stand`} />
             </td>
             <td>
-              {value === null || most === null || most === 0 ? "–" : formatShare(Math.abs(value) / most, 2)}
+              {used(value, most)}
               {value !== null && most !== null && Math.abs(value) > most ? (
                 <LevelMark level="stop" word={false} />
               ) : null}

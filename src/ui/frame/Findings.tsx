@@ -73,7 +73,8 @@ function Numbers({ finding }: { readonly finding: Finding }) {
   const { actual, limit, unit, path, element } = finding;
   if (actual === null) return null;
   const place = element === undefined ? null : element - 1;
-  const text = numberText(actual, unit);
+  const as = unit === "1" && limit !== null && Math.abs(limit) < 0.1 ? "share" : unit;
+  const text = numberText(actual, as);
   return (
     <span className="numbers">
       {path === null ? (
@@ -83,7 +84,7 @@ function Numbers({ finding }: { readonly finding: Finding }) {
           {text}
         </button>
       )}
-      {limit === null ? null : <span className="of"> of {numberText(limit, unit)}</span>}
+      {limit === null ? null : <span className="of"> of {numberText(limit, as)}</span>}
     </span>
   );
 }

@@ -16,6 +16,7 @@ export function Header({ onDrawer }: { readonly onDrawer: () => void }) {
     <header className="head">
       <h1 className="mark">Stringwright</h1>
       {example ? <span className="example">example</span> : null}
+      <span className="on-paper">{document_.name}</span>
       <span className="job">{job ?? document_.name}</span>
       <Saved />
       <nav aria-label="document">

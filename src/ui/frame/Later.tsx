@@ -1,4 +1,5 @@
 import { LevelMark } from "../prove/LevelMark.tsx";
+import { CureButton } from "./Findings.tsx";
 import { type ScreenName, useJudged } from "./session.ts";
 
 const will: Partial<Record<ScreenName, string>> = {
@@ -12,11 +13,13 @@ export function Later({ name }: { readonly name: ScreenName }) {
   const findings = useJudged((state) => state.proof?.findings ?? []);
   const mine = name === "route" ? findings.filter((each) => /^(source\.earth|voltage\.low)/.test(each.id)) : [];
   return (
-    <section>
+    <section className="sheet" aria-labelledby="later-heading">
+      <h2 id="later-heading">{name}</h2>
       <p className="quiet">Not in this release. {will[name]}</p>
       {mine.map((each) => (
         <p key={each.id}>
-          <LevelMark level={each.level} /> {each.reason}
+          <LevelMark level={each.level} /> <b>{each.what}</b>. {each.reason}{" "}
+          {each.cure === null ? null : <CureButton cure={each.cure} what={each.what} />}
         </p>
       ))}
     </section>

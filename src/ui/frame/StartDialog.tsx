@@ -1,15 +1,16 @@
 import { useEffect, useId, useRef, useState } from "react";
 import { startDocument } from "../../file/defaults.ts";
 import { catalogue, parseQuantity, type UnitName } from "../../solver/index.ts";
+import { textOf } from "../inputs/reading.ts";
 import { inNewSlot } from "./files.ts";
 import { useSession } from "./session.ts";
 
 const kinds = [
-  ["dc", "dc", "dc"],
-  ["sine rms", "sine", "rms"],
-  ["sine peak", "sine", "peak"],
-  ["pulse peak", "pulse", "peak"],
-  ["square peak", "square", "peak"],
+  ["dc", "dc", "dc", "dc"],
+  ["sine rms", "sine", "rms", "sine, stated as rms"],
+  ["sine peak", "sine", "peak", "sine, stated as peak"],
+  ["pulse peak", "pulse", "peak", "pulse, peak"],
+  ["square peak", "square", "peak", "square wave, peak"],
 ] as const;
 
 /** Three things asked: how many volts and of what kind, what will read it, how good. All else is assumed and counted. */
@@ -52,7 +53,12 @@ export function StartDialog({ onClose }: { readonly onClose: () => void }) {
         <h2 id="start-heading">Start from my own voltage</h2>
         <div className="row">
           <Text label="how many volts" value={volts} unit="V" onChange={setVolts} example="48 kV" />
-          <Select label="of what kind" value={kind} onChange={setKind} options={kinds.map(([name]) => [name, name])} />
+          <Select
+            label="of what kind"
+            value={kind}
+            onChange={setKind}
+            options={kinds.map(([name, , , said]) => [name, said])}
+          />
         </div>
         <div className="row">
           <Select
@@ -90,6 +96,10 @@ interface TextProps {
 function Text({ label, value, unit, example, onChange }: TextProps) {
   const id = useId();
   const parsed = value.trim() === "" ? null : parseQuantity(value, unit, { signed: true });
+  const understoodText = (of: number) => {
+    const text = textOf(of, unit, unit === "1");
+    return text.replaceAll(" ", "") === value.replaceAll(" ", "") ? "" : `→ ${text}`;
+  };
   return (
     <div className="field">
       <label htmlFor={id}>{label}</label>
@@ -105,12 +115,12 @@ function Text({ label, value, unit, example, onChange }: TextProps) {
         />
       </div>
       <div className="said">
-        {parsed?.kind === "value" ? (
-          <span className="quiet">
-            → {unit === "1" ? `${Number((parsed.value * 100).toPrecision(6))} %` : parsed.understood}
+        {parsed?.kind === "value" ? <span className="quiet">{understoodText(parsed.value)}</span> : null}
+        {parsed?.kind === "refused" ? (
+          <span className="wrong">
+            {parsed.why} {parsed.cure}
           </span>
         ) : null}
-        {parsed?.kind === "refused" ? <span className="wrong">{parsed.why}</span> : null}
         {parsed?.kind === "ambiguous" ? <span className="wrong">{parsed.why}</span> : null}
       </div>
     </div>

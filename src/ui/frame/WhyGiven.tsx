@@ -1,6 +1,6 @@
 import { plainPointer, type Why as WhyOf } from "../../solver/index.ts";
 import { pointerUnit, valueText } from "./figureText.ts";
-import { goToField, useDocument, useSession } from "./session.ts";
+import { goToField, hasField, useDocument, useSession } from "./session.ts";
 
 type Given = Extract<WhyOf, { readonly kind: "given" }>;
 
@@ -17,7 +17,6 @@ export function WhyGiven({ found }: { readonly found: Given }) {
   const { typed } = useDocument();
   const pointer = found.path.replace(/:.*$/, "");
   const text = typed[pointer];
-  const editable = /^\/(brief|instruments)\/|^\/design\/hvArm\/elements\/\d+\/resistance_ohm$/.test(pointer);
   return (
     <>
       <h2>{plainPointer(pointer)}</h2>
@@ -26,7 +25,7 @@ export function WhyGiven({ found }: { readonly found: Given }) {
         {text === undefined ? "" : `, written “${text}”`}
       </p>
       <p className="quiet">An input: {told[found.origin]}.</p>
-      {editable ? (
+      {hasField(pointer) ? (
         <button type="button" className="figure-button" onClick={() => goToField(session, pointer)}>
           go to its field
         </button>

@@ -29,6 +29,8 @@ export interface Looking {
   /** Selected element, 1 next to the tap; null: none. */
   readonly element: number | null;
   readonly why: WhyAsked | null;
+  /** Pointer of the field that was last asked for; what holds it opens. */
+  readonly field: string | null;
   readonly notice: Notice | null;
   readonly offline: boolean;
 }
@@ -134,7 +136,14 @@ export const newJudged = (): StoreApi<Judged> =>
   }));
 
 export const newLooking = (): StoreApi<Looking> =>
-  createStore<Looking>()(() => ({ screen: "ask", element: null, why: null, notice: null, offline: false }));
+  createStore<Looking>()(() => ({
+    screen: "ask",
+    element: null,
+    why: null,
+    field: null,
+    notice: null,
+    offline: false,
+  }));
 
 /** Opens the why of a figure beside the number that was pressed. */
 export function openWhy(
@@ -153,15 +162,27 @@ export function openWhy(
   session.looking.setState({ why: { path, index, from, trail: [], at } });
 }
 
-/** Opens the field of an input: its screen, and the caret in it. */
-export function goToField(session: Session, pointer: string): void {
-  const element = /^\/design\/hvArm\/elements\/(\d+)\//.exec(pointer)?.[1];
-  session.looking.setState(
-    element === undefined ? { screen: "ask", why: null } : { element: Number(element) + 1, why: null },
+/** Whether the page has a field for an input. */
+export const hasField = (pointer: string): boolean =>
+  /^\/(brief|instruments)\/|^\/design\/(geometry\/(footHeight|columnLength|columnDiameter|electrode)|hvArm\/elements\/\d+\/resistance_ohm$)/.test(
+    pointer,
   );
-  requestAnimationFrame(() => {
+
+/** Goes to the field of an input: opens what holds it, and puts the caret into it. */
+export function goToField(session: Session, pointer: string): void {
+  const { looking, store } = session;
+  const element = /^\/design\/hvArm\/elements\/(\d+)\//.exec(pointer)?.[1];
+  const inColumn = pointer.startsWith("/design/geometry");
+  looking.setState({ why: null, field: pointer });
+  if (element !== undefined) looking.setState({ element: Number(element) + 1 });
+  else if (!inColumn) looking.setState({ screen: "ask" });
+  const focus = () => {
+    if (looking.getState().field !== pointer) return;
     const field = document.querySelector<HTMLElement>(`[data-pointer="${CSS.escape(pointer)}"]`);
     field?.focus();
     field?.scrollIntoView({ block: "center" });
-  });
+    looking.setState({ field: null });
+  };
+  if (store.getState().document.design === null && inColumn) return;
+  setTimeout(focus, 60);
 }
