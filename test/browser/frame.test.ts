@@ -1,5 +1,3 @@
-import { readFileSync } from "node:fs";
-import { createRequire } from "node:module";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { freshPage, goTo, type Heard, type Served, servePage, settled, startBrowser } from "../support/browser.ts";
@@ -8,7 +6,6 @@ let served: Served;
 let browser: Browser;
 let page: Page;
 let heard: Heard;
-const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
 
 beforeAll(async () => {
   served = await servePage(4310);
@@ -90,6 +87,60 @@ describe("the page", () => {
     await page.keyboard.press("Escape");
   });
 
+  it("opens the field of an assumed value from the list of them", async () => {
+    const summary = page.locator(".assumed-count summary");
+    const before = Number(/\d+/.exec(await summary.innerText())![0]);
+    await summary.click();
+    await page.getByRole("button", { name: "type source capacitance" }).click();
+    const field = page.getByLabel("source capacitance");
+    await expect.poll(() => field.evaluate((each) => each === document.activeElement)).toBe(true);
+    await page.getByRole("button", { name: "accept source capacitance" }).click();
+    await settled(page);
+    await expect.poll(() => summary.innerText()).toContain(`assumed: ${before - 1}`);
+    await page.keyboard.press("Control+Z");
+    await settled(page);
+    await expect.poll(() => summary.innerText()).toContain(`assumed: ${before}`);
+  });
+
+  it("keeps the theme chosen over a reload", async () => {
+    const button = page.getByRole("button", { name: /^theme/ });
+    const paper = () => page.evaluate(() => getComputedStyle(document.body).backgroundColor);
+    await button.click();
+    await button.click();
+    expect(await button.innerText()).toBe("theme: dark");
+    expect(await paper()).toBe("rgb(20, 24, 30)");
+    await page.reload();
+    await page.locator(".in-short dd").first().waitFor();
+    expect(await paper()).toBe("rgb(20, 24, 30)");
+    await button.click();
+    expect(await paper()).toBe("rgb(250, 248, 244)");
+  });
+
+  it("writes into the file that is open, and asks for a place only once", async () => {
+    await page.evaluate(() => {
+      const kept = { asked: 0, texts: [] as string[] };
+      const handle = {
+        name: "mine.stringwright.json",
+        createWritable: async () => ({
+          write: async (text: string) => void kept.texts.push(text),
+          close: async () => {},
+        }),
+      };
+      const showSaveFilePicker = async () => {
+        kept.asked++;
+        return handle;
+      };
+      Object.assign(window, { kept, showSaveFilePicker });
+    });
+    await page.keyboard.press("Control+S");
+    await page.keyboard.press("Control+S");
+    const kept = () => page.evaluate(() => (window as unknown as { kept: { asked: number; texts: string[] } }).kept);
+    await expect.poll(async () => (await kept()).texts.length).toBe(2);
+    expect((await kept()).asked).toBe(1);
+    expect(JSON.parse((await kept()).texts[0]!)).toMatchObject({ format: "stringwright", version: 1 });
+    await expect.poll(() => page.locator(".head [role=status]").innerText()).toMatch(/file saved/);
+  });
+
   it("starts from the engineer's own voltage with three answers", async () => {
     await page.getByRole("button", { name: "file", exact: true }).click();
     await page.getByText("New, from my own voltage").click();
@@ -117,22 +168,6 @@ describe("the page", () => {
     await expect.poll(() => page.locator(".notice.bad").innerText()).toMatch(/broken\.json was not opened/);
     expect(await page.getByLabel("working voltage").inputValue()).toBe("15 kV");
     await page.getByRole("button", { name: "noted" }).click();
-  });
-
-  it.each(["light", "dark"] as const)("has no axe violation on any screen, %s", async (scheme) => {
-    await page.emulateMedia({ colorScheme: scheme });
-    for (const screen of ["Ask", "Route", "Size", "Prove", "Build", "Calibrate", "Use"]) {
-      await goTo(page, screen);
-      await page.waitForTimeout(screen === "Prove" ? 1500 : 400);
-      await page.evaluate(axe);
-      const found = await page.evaluate(async () => {
-        const run = (
-          window as unknown as { axe: { run(): Promise<{ violations: { id: string; nodes: { html: string }[] }[] }> } }
-        ).axe;
-        return (await run.run()).violations.map((each) => `${each.id}: ${each.nodes[0]?.html.slice(0, 160)}`);
-      });
-      expect(found, `${screen}, ${scheme}`).toEqual([]);
-    }
   });
 
   it("said nothing on the console and asked no other origin for anything", () => {
