@@ -24,6 +24,9 @@ export function App() {
   const dropping = useDrop((text, name) => openText(session, text, name));
   return (
     <div className={dropping ? "frame dropping" : "frame"}>
+      <a className="skip" href="#screen">
+        skip to the screen in hand
+      </a>
       <Header onDrawer={() => setDrawer(!drawer)} />
       <Strip />
       <aside className={drawer ? "side open" : "side"} aria-label="column">
@@ -36,7 +39,7 @@ export function App() {
           <Column />
         </div>
       </aside>
-      <main className="middle" aria-label={screen}>
+      <main id="screen" className="middle" aria-label={screen} tabIndex={-1}>
         <Notices />
         <Suspense fallback={<p className="quiet">Opening …</p>}>
           <Screen name={screen} />

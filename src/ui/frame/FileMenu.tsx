@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from "react";
+import { type KeyboardEvent, useEffect, useRef, useState } from "react";
 import {
   exampleDocument,
   exampleNames,
@@ -44,10 +44,10 @@ export function FileMenu() {
       className="menu"
       ref={box}
       onKeyDown={(event) => {
-        if (event.key === "Escape") setOpen(false);
+        if (open) moveInMenu(event, box.current, () => setOpen(false));
       }}
     >
-      <button type="button" aria-haspopup="true" aria-expanded={open} onClick={() => setOpen(!open)}>
+      <button type="button" aria-expanded={open} onClick={() => setOpen(!open)}>
         file
       </button>
       {open ? (
@@ -97,11 +97,24 @@ function Item({
   );
 }
 
+/** ↓ ↑ through the entries, Escape back to the button that opened them. */
+function moveInMenu(event: KeyboardEvent, menu: HTMLElement | null, close: () => void): void {
+  const [opener, ...entries] = [...(menu?.querySelectorAll<HTMLElement>(":scope > button, li button") ?? [])];
+  const at = entries.indexOf(document.activeElement as HTMLElement);
+  if (event.key === "ArrowDown") entries[Math.min(at + 1, entries.length - 1)]?.focus();
+  else if (event.key === "ArrowUp") (at <= 0 ? opener : entries[at - 1])?.focus();
+  else if (event.key === "Escape") {
+    close();
+    opener?.focus();
+  } else return;
+  event.preventDefault();
+}
+
 /** Ctrl+S, Ctrl+O, Ctrl+Z, Ctrl+Shift+Z; a text field keeps its own undo while it has the focus. */
 function useShortcuts(openFile: () => void): void {
   const session = useSession();
   useEffect(() => {
-    const onKey = (event: KeyboardEvent) => {
+    const onKey = (event: globalThis.KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
       const key = event.key.toLowerCase();
       const inField = event.target instanceof HTMLInputElement && event.target.type === "text";

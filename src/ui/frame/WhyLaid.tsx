@@ -1,4 +1,12 @@
-import { citation, filled, type WhyInput, type Why as WhyOf } from "../../solver/index.ts";
+import {
+  citation,
+  type FigurePath,
+  figures,
+  filled,
+  plainPointer,
+  type WhyInput,
+  type Why as WhyOf,
+} from "../../solver/index.ts";
 import { valueText } from "./figureText.ts";
 import { Typeset } from "./Typeset.tsx";
 
@@ -27,7 +35,7 @@ export function WhyLaid({ found, onGo }: Props) {
         <p className="numbers">{filled(found.statement, { ...numbers, "=": result })}</p>
       ) : null}
       <p>
-        <strong>{result}</strong> {found.meaning}
+        <strong>{result}</strong> {found.kind === "formula" ? found.meaning : nameOf(found.path)}
       </p>
       {found.inputs.length === 0 ? null : <Inputs inputs={found.inputs} onGo={onGo} />}
       {found.method === null ? null : (
@@ -48,14 +56,14 @@ function Inputs({ inputs, onGo }: { readonly inputs: readonly WhyInput[]; readon
         {inputs.map((input) => (
           <tr key={input.name}>
             <th scope="row">
-              <Typeset text={input.symbol} />
+              <Typeset text={input.symbol.replace(/^(\p{L})(\d)/u, "$1_$2")} />
             </th>
             <td className="number">
               <button type="button" className="figure-button" onClick={() => onGo(input.path)}>
                 {inputText(input)}
               </button>
             </td>
-            <td>{input.meaning}</td>
+            <td>{input.meaning === input.path ? nameOf(input.path) : input.meaning}</td>
             <td className={input.origin === "assumed" ? "quiet assumed" : "quiet"}>{input.origin ?? "computed"}</td>
           </tr>
         ))}
@@ -65,5 +73,11 @@ function Inputs({ inputs, onGo }: { readonly inputs: readonly WhyInput[]; readon
 }
 
 const inputText = (input: WhyInput): string => valueText(input.value, input.unit);
+/** A figure or an input in words: what a solution starts from has no other name. */
+function nameOf(path: string): string {
+  if (path.startsWith("/")) return plainPointer(path.replaceAll("/*", "")).replace(/^hv arm /, "HV arm, ");
+  return path in figures ? figures[path as FigurePath] : plainPointer(`//${path.replaceAll(".", "/")}`);
+}
+
 const exponential = (value: number | null, digits: number): string =>
-  value === null ? "–" : value.toExponential(digits).replaceAll("-", "\u2212");
+  value === null ? "–" : value === 0 ? "0" : value.toExponential(digits).replaceAll("-", "\u2212");
