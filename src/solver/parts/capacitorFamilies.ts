@@ -1,4 +1,5 @@
 import type { CapacitorFamily, DielectricClass } from "../job/part.ts";
+import type { Refusal } from "../quantities/result.ts";
 
 /** Generic capacitor families: every figure typical of its kind, from memory; the data sheet of the part bought decides. */
 type Row = readonly [
@@ -103,7 +104,29 @@ export const capacitorFamilies: readonly CapacitorFamily[] = rows.map(
   }),
 );
 
-/** Where a capacitor may stand. A class 2 or electrolytic dielectric spoils the scale factor in either arm; decoupling a rail is fine. */
-export function dielectricFits(family: CapacitorFamily, place: "hvArm" | "lvArm" | "decoupling"): boolean {
-  return place === "decoupling" || (family.dielectricClass !== "class2" && family.dielectricClass !== "electrolytic");
+export type CapacitorPlace = "hvArm" | "lvArm" | "decoupling";
+
+const spoilt: Partial<Record<DielectricClass, string>> = {
+  class2:
+    "A class 2 ceramic loses 20 to 60 % of its capacitance at its rated voltage, drifts with temperature and answers to shock",
+  electrolytic: "An electrolytic leaks, is polarised and is known to some tens of percent only",
+};
+
+/**
+ * Why a capacitor may not stand in a place, with what to do; null where it may. Either arm must hold its capacitance over
+ * voltage and temperature, or the scale factor goes with it; decoupling a rail is no part of the scale factor.
+ * Common practice, no source.
+ */
+export function dielectricRefusal(family: CapacitorFamily, place: CapacitorPlace): Refusal | null {
+  const why = spoilt[family.dielectricClass];
+  if (place === "decoupling" || why === undefined) return null;
+  return {
+    where: place === "hvArm" ? "HV arm" : "LV arm",
+    why: `${why}: it would spoil the scale factor.`,
+    cure: "Take a class 1 ceramic (C0G), polypropylene or mica; decoupling a protector's rail is fine.",
+  };
 }
+
+/** Whether a capacitor may stand in a place. */
+export const dielectricFits = (family: CapacitorFamily, place: CapacitorPlace): boolean =>
+  dielectricRefusal(family, place) === null;

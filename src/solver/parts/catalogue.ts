@@ -1,5 +1,6 @@
+import { cables } from "./cables.ts";
 import { capacitorFamilies } from "./capacitorFamilies.ts";
-import { cables, instruments } from "./instruments.ts";
+import { instruments } from "./instruments.ts";
 import { protectors } from "./protectors.ts";
 import { resistorFamilies } from "./resistorFamilies.ts";
 import { trimmers } from "./trimmers.ts";
@@ -13,3 +14,13 @@ export const catalogue = {
   instruments,
   cables,
 } as const;
+
+type Catalogue = typeof catalogue;
+type Listed = Exclude<keyof Catalogue, "cables">;
+
+/**
+ * The catalogue's record of that id; undefined where there is none.
+ * @example catalogued("resistors", "film-06")?.limitingVoltage_V // 350
+ */
+export const catalogued = <K extends Listed>(kind: K, id: string): Catalogue[K][number] | undefined =>
+  (catalogue[kind] as readonly Catalogue[K][number][]).find((each) => each.id === id);

@@ -1,11 +1,5 @@
-import type { Cable, Instrument, InstrumentFunction } from "../job/instrument.ts";
-
-/** Generic cables: capacitance and impedance by the metre, from memory. */
-export const cables: Readonly<Record<"coax50" | "coax75" | "leads", Omit<Cable, "length_m">>> = {
-  coax50: { capacitance_F_per_m: 100e-12, impedance_ohm: 50 },
-  coax75: { capacitance_F_per_m: 67e-12, impedance_ohm: 75 },
-  leads: { capacitance_F_per_m: 40e-12, impedance_ohm: 150 },
-};
+import type { Instrument, InstrumentFunction } from "../job/instrument.ts";
+import { type CableName, cables } from "./cables.ts";
 
 type Row = readonly [
   id: string,
@@ -20,7 +14,7 @@ type Row = readonly [
   accuracy: number,
   resolution_V: number,
   bandwidth_Hz: number | null,
-  cable: keyof typeof cables,
+  cable: CableName,
 ];
 
 const scope = 200e6;

@@ -21,6 +21,8 @@ type Row = readonly [
   self_pF: number,
   thermal_K_per_W: number,
   use?: ResistorFamily["use"],
+  /** Default 155 °C; bodies that run hotter at their rated dissipation say so. */
+  zero_degC?: number,
 ];
 
 const rows: readonly Row[] = [
@@ -42,7 +44,7 @@ const rows: readonly Row[] = [
     300,
   ],
   ["film-06", "metal film, 0.6 W, axial", 0.01, 1, 1e7, "E24", null, 0.6, 350, 50, -0.5, 6.5, 2.5, 0.25, 140],
-  ["film-1w", "metal film, 1 W, axial", 0.01, 10, 1e7, "E24", null, 1, 500, 50, -0.5, 11, 4, 0.3, 100],
+  ["film-1w", "metal film, 1 W, axial", 0.01, 10, 1e7, "E24", null, 1, 500, 50, -0.5, 11, 4, 0.3, 85],
   ["chip-0805", "thick film chip, 0805", 0.01, 10, 1e7, "E24", null, 0.125, 150, 100, -20, 2, 1.25, 0.05, 250],
   ["chip-1206", "thick film chip, 1206", 0.01, 10, 1e7, "E24", null, 0.25, 200, 100, -20, 3.2, 1.6, 0.05, 180],
   ["chip-2512", "thick film chip, 2512", 0.01, 10, 1e7, "E24", null, 1, 500, 100, -20, 6.3, 3.2, 0.08, 70],
@@ -95,7 +97,7 @@ const rows: readonly Row[] = [
     14,
     4.5,
     0.3,
-    90,
+    85,
   ],
   [
     "hv-film-1kv",
@@ -131,7 +133,7 @@ const rows: readonly Row[] = [
     52,
     8,
     0.4,
-    45,
+    42,
   ],
   [
     "hv-body-1",
@@ -166,6 +168,8 @@ const rows: readonly Row[] = [
     9.5,
     0.5,
     24,
+    "divider",
+    225,
   ],
   [
     "hv-body-10",
@@ -183,6 +187,8 @@ const rows: readonly Row[] = [
     9.5,
     0.5,
     14,
+    "divider",
+    225,
   ],
   ["glass-sealed", "glass-sealed high value", 0.05, 1e9, 1e12, "E3", null, 0.25, 1000, 1000, -50, 38, 6.5, 0.5, 250],
   [
@@ -202,6 +208,7 @@ const rows: readonly Row[] = [
     1,
     10,
     "damping",
+    225,
   ],
 ];
 
@@ -223,6 +230,7 @@ export const resistorFamilies: readonly ResistorFamily[] = rows.map((row) => {
     pF,
     thermal,
     use,
+    zero_degC,
   ] = row;
   const chip = id.includes("chip");
   return {
@@ -239,7 +247,7 @@ export const resistorFamilies: readonly ResistorFamily[] = rows.map((row) => {
     seriesAbove,
     ratedDissipation_W: W,
     deratingFrom_degC: 70,
-    zeroDissipation_degC: 155,
+    zeroDissipation_degC: zero_degC ?? 155,
     limitingVoltage_V: V,
     temperatureCoefficient_per_K: tcr * 1e-6,
     voltageCoefficient_per_V: vcr * 1e-6,
