@@ -49,7 +49,7 @@ const rows: readonly Row[] = [
     6,
     8,
   ],
-  ["class2-chip", "class 2 ceramic chip, 50 V", "X7R", "class2", 0.1, 1e-10, 1e-5, "E6", 50, 5000, 0.025, 2, 1.25, 0.6],
+  ["class2-chip", "class 2 ceramic chip, 50 V", "X7R", "class2", 0.1, 1e-10, 1e-6, "E6", 50, 5000, 0.025, 2, 1.25, 0.6],
   [
     "air-plates",
     "home-made plates or coaxial, air",
