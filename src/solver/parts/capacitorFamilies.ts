@@ -68,6 +68,9 @@ const rows: readonly Row[] = [
   ],
 ];
 
+/** The double nearest to the decimal as written. */
+const decimal = (value: number, power: number): number => Number(`${value}e${power}`);
+
 export const capacitorFamilies: readonly CapacitorFamily[] = rows.map(
   ([
     id,
@@ -90,17 +93,17 @@ export const capacitorFamilies: readonly CapacitorFamily[] = rows.map(
     name,
     origin: "catalogue",
     tolerance,
-    bodyLength_m: length / 1000,
-    bodyDiameter_m: diameter / 1000,
+    bodyLength_m: decimal(length, -3),
+    bodyDiameter_m: decimal(diameter, -3),
     least_F,
     greatest_F,
     series,
     dielectric,
     dielectricClass,
     ratedVoltage_V: V,
-    temperatureCoefficient_per_K: tc * 1e-6,
+    temperatureCoefficient_per_K: decimal(tc, -6),
     dissipationFactor: tan,
-    leadInductance_H: nH * 1e-9,
+    leadInductance_H: decimal(nH, -9),
   }),
 );
 

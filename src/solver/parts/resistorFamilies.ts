@@ -212,6 +212,9 @@ const rows: readonly Row[] = [
   ],
 ];
 
+/** The double nearest to the decimal as written: 50 ppm is 0.00005, not a bit less. */
+const decimal = (value: number, power: number): number => Number(`${value}e${power}`);
+
 export const resistorFamilies: readonly ResistorFamily[] = rows.map((row) => {
   const [
     id,
@@ -239,8 +242,8 @@ export const resistorFamilies: readonly ResistorFamily[] = rows.map((row) => {
     name,
     origin: "catalogue",
     tolerance,
-    bodyLength_m: length / 1000,
-    bodyDiameter_m: diameter / 1000,
+    bodyLength_m: decimal(length, -3),
+    bodyDiameter_m: decimal(diameter, -3),
     least_ohm,
     greatest_ohm,
     series,
@@ -249,10 +252,10 @@ export const resistorFamilies: readonly ResistorFamily[] = rows.map((row) => {
     deratingFrom_degC: 70,
     zeroDissipation_degC: zero_degC ?? 155,
     limitingVoltage_V: V,
-    temperatureCoefficient_per_K: tcr * 1e-6,
-    voltageCoefficient_per_V: vcr * 1e-6,
+    temperatureCoefficient_per_K: decimal(tcr, -6),
+    voltageCoefficient_per_V: decimal(vcr, -6),
     thermalResistance_K_per_W: thermal,
-    selfCapacitance_F: pF * 1e-12,
+    selfCapacitance_F: decimal(pF, -12),
     leadSpace_m: chip ? 0.001 : length > 20 ? 0.012 : 0.004,
     use: use ?? "divider",
   };

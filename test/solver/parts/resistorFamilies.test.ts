@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { ResistorFamily } from "../../../src/solver/job/part.ts";
+import { capacitorFamilies } from "../../../src/solver/parts/capacitorFamilies.ts";
 import { catalogued } from "../../../src/solver/parts/catalogue.ts";
 import { resistorFamilies } from "../../../src/solver/parts/resistorFamilies.ts";
 
@@ -20,6 +21,12 @@ describe("resistor families of the catalogue", () => {
   ])("%s keeps its ratings to the digit", (id, limitingVoltage_V, ratedDissipation_W, greatest_ohm, tolerance, kv) => {
     const exact = { limitingVoltage_V, ratedDissipation_W, greatest_ohm, tolerance, voltageCoefficient_per_V: kv };
     expect(named(id)).toMatchObject(exact);
+  });
+  it("and of capacitors hold the decimals as written, to the last bit", () => {
+    const figures = [...resistorFamilies, ...capacitorFamilies].flatMap((each) =>
+      Object.entries(each).filter(([, value]) => typeof value === "number"),
+    );
+    expect(figures.filter(([, value]) => value !== Number((value as number).toPrecision(4)))).toEqual([]);
   });
   it("hold one of 1 kV and 1 % that reaches 100 MΩ", () => {
     const found = resistorFamilies.filter((each) => each.limitingVoltage_V === 1000 && each.tolerance === 0.01);
