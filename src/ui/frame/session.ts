@@ -90,9 +90,8 @@ export function judgeEveryChange(session: Session): () => void {
       if (answer.kind === "refused") judged.setState({ sizing: null, searching: false });
     });
   };
-  const ask = (document: DividerDocument) => {
-    if (document === settled) return;
-    judged.setState({ stale: true });
+  /** The best candidate is chosen again, taken over into the document, and judged. */
+  const choose = (document: DividerDocument) =>
     runner.check.ask({ kind: "follow", document, top: 1 }, (answer) => {
       if (answer.kind === "refused") {
         judged.setState({ document, refusal: answer.refusal, stale: false, proof: null });
@@ -105,6 +104,30 @@ export function judgeEveryChange(session: Session): () => void {
       store.getState().adopt(document, outcome.document);
       settled = store.getState().document;
       judged.setState({ document: settled });
+    });
+  const ask = (document: DividerDocument) => {
+    if (document === settled) return;
+    judged.setState({ stale: true });
+    const { design } = document;
+    if (design === null) {
+      choose(document);
+      return;
+    }
+    // The design that stands is judged first, within a frame; a search takes longer and comes after it.
+    runner.check.ask({ kind: "prove", document }, (answer) => {
+      if (answer.kind !== "done" && answer.kind !== "refused") return;
+      if (design.follows) {
+        if (answer.kind === "done")
+          judged.setState({ proof: answer.outcome.proof, document, refusal: null, took_ms: answer.took_ms });
+        choose(document);
+        return;
+      }
+      settled = document;
+      const refusal = answer.kind === "refused" ? answer.refusal : null;
+      const proof = answer.kind === "done" ? answer.outcome.proof : null;
+      judged.setState({ proof, document, refusal, stale: false });
+      if (answer.kind === "done") judged.setState({ took_ms: answer.took_ms });
+      if (!sameQuestion(searched, document)) search(document);
     });
   };
   ask(store.getState().document);
