@@ -21,6 +21,8 @@ export interface Sketch {
   strays?: Record<string, unknown>;
   stays?: string;
   protectors?: readonly unknown[];
+  /** Parts beside the resistor family and the two capacitor families. */
+  parts?: readonly Record<string, unknown>[];
   origins?: Record<string, string>;
 }
 
@@ -81,6 +83,23 @@ export const instrument = (more: Record<string, unknown> = {}) => ({
   cable: { length_m: 1, capacitance_F_per_m: 0, impedance_ohm: 50 },
   ...more,
 });
+/** A protector that conducts from `leastStrike_V`. */
+export const protector = (more: Record<string, unknown> = {}) => ({
+  id: "p",
+  kind: "protector",
+  name: "invented protector",
+  origin: "typed",
+  tolerance: 0.2,
+  bodyLength_m: 0.008,
+  bodyDiameter_m: 0.006,
+  type: "gasTube",
+  leastStrike_V: 72,
+  letThrough_V: 700,
+  leakage_A: 0,
+  capacitance_F: 0,
+  resistance_ohm: null,
+  ...more,
+});
 export const fixed = (name: string, resistance_ohm: number) => ({ name, series: [{ part: "r", resistance_ohm }] });
 export const bank = (name: string, capacitance_F: number, part = "c") => ({ name, part, capacitance_F });
 
@@ -117,7 +136,7 @@ export function invented(s: Sketch): DividerDocument {
       },
       policy: { voltageDerating: 0.6, powerDerating: 0.5, series: "E24", partsInHandOnly: false, ...s.policy },
     },
-    parts: [{ ...family, ...s.family }, capacitor("c", "class1"), capacitor("c2", "class2")],
+    parts: [{ ...family, ...s.family }, capacitor("c", "class1"), capacitor("c2", "class2"), ...(s.parts ?? [])],
     instruments: [instrument(s.instrument), ...(s.others ?? [])],
     principal: "m",
     design: {
