@@ -1,14 +1,6 @@
 import { type CapacitiveTwoPort, capacitiveLadder } from "./capacitiveLadder.ts";
 import type { Judging } from "./judging.ts";
-import {
-  capacitanceOf,
-  fixedOf,
-  isResistive,
-  leakageConductance,
-  protectorCapacitance,
-  seriesResistance,
-  trimOf,
-} from "./lvArm.ts";
+import { capacitanceOf, fixedOf, isResistive, protectorCapacitance, seriesResistance, trimOf } from "./lvArm.ts";
 import type { StringCapacitance } from "./stringCapacitance.ts";
 
 /** What the faults of one design are computed from, gathered once. */
@@ -42,7 +34,10 @@ export function faultBench(j: Judging, string: StringCapacitance): FaultBench {
   };
 }
 
-/** dc at the instrument with these LV branches left; `unplugged` takes the instrument away and looks at the tap. */
+/**
+ * dc at the instrument with these LV branches left; `unplugged` takes the instrument away and looks at the tap.
+ * Leakage of the protectors is left out: stated as the most there may be, it would hold down a voltage that nothing holds.
+ */
 export function dcOutput(
   j: Judging,
   bench: FaultBench,
@@ -52,7 +47,7 @@ export function dcOutput(
 ): number {
   const Rs = seriesResistance(j);
   const Rm = j.instrument.resistance_ohm;
-  const G = branches.reduce((sum, R) => sum + 1 / R, leakageConductance(j)) + (unplugged ? 0 : 1 / (Rs + Rm));
+  const G = branches.reduce((sum, R) => sum + 1 / R, 0) + (unplugged ? 0 : 1 / (Rs + Rm));
   if (G === 0) return bench.V;
   const tap = bench.V / (1 + R1 * G);
   return unplugged ? tap : (tap * Rm) / (Rs + Rm);

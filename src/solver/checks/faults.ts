@@ -31,6 +31,10 @@ export function faults(j: Judging, string: StringCapacitance, show: Show): Fault
   return rows;
 }
 
+/** Resistance of `strings` equal strings, joined at their ends only, when one of them is `gone` Ω short. */
+const withoutOne = (string_ohm: number, gone: number, strings: number): number =>
+  1 / (1 / (string_ohm - gone) + (strings - 1) / string_ohm);
+
 function elementFaults(j: Judging, bench: FaultBench): Raw[] {
   const { elements, strings } = j.design.hvArm;
   const largest = elements.reduce(
@@ -50,7 +54,12 @@ function elementFaults(j: Judging, bench: FaultBench): Raw[] {
     name: `element ${largest + 1} shorted`,
     element: largest + 1,
     single: true,
-    output_V: dcOutput(j, bench, bench.branches_ohm, bench.R1 - elements[largest]!.resistance_ohm / strings),
+    output_V: dcOutput(
+      j,
+      bench,
+      bench.branches_ohm,
+      withoutOne(bench.R1 * strings, elements[largest]!.resistance_ohm, strings),
+    ),
     fastOutput_V: fastOutput(j, bench, bench.capacitors_F, shorted),
     greatestElementVoltage_V: greatestElement(j, bench, largest),
   };

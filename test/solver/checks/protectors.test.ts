@@ -64,4 +64,11 @@ describe("a lost LV arm behind a protector", () => {
     expectRelative(lost(meter), 49.587, 1e-4, "five digits given"));
   it("is never shown lower because a tube could strike above it", () =>
     expectRelative(lost(guarded({})), 49.587, 1e-4, "72 V is not reached"));
+  it("is not held down by leakage, which is stated as the most there may be", () => {
+    const alone = { ...guarded({ leastStrike_V: 26, leakage_A: 2e-6 }), branches: [fixed("a", 1.2e6)] };
+    const proof = proven({ ...alone, instrument: { resistance_ohm: 1e10 } });
+    expectRelative(fault(proof, "lvOpen").output_V, 6000 / (1 + 1.2e9 / 1e10), 1e-9, "closed form");
+    expect(fault(proof, "lvOpen").level).toBe("stop");
+    expect(proof.level).toBe("stop");
+  });
 });
