@@ -1,6 +1,7 @@
 import type { Edit } from "../standards/finding.ts";
 import { computedHere, practice, type Source } from "../standards/source.ts";
 import { type Judging, plainFinding } from "./judging.ts";
+import { pulseTrain } from "./pulseTrain.ts";
 import type { Show } from "./show.ts";
 
 const iec60664: Source = {
@@ -22,6 +23,7 @@ export function briefMisuse(j: Judging, show: Show): void {
   fiftyOhm(j, show);
   wrongFunction(j);
   voltages(j, show);
+  pulseTrain(j);
   surroundings(j, show);
 }
 

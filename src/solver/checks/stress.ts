@@ -1,4 +1,5 @@
 import { givenPerElement, type Judging, judgeLimit, plainFinding, resistorOf } from "./judging.ts";
+import { dutyStated } from "./pulseTrain.ts";
 import type { Show } from "./show.ts";
 import { iec60115, resistanceAbove, stressFormulas } from "./stressFormulas.ts";
 import type { WorkingVoltages } from "./workingVoltage.ts";
@@ -118,6 +119,7 @@ function stressFindings(j: Judging, working: WorkingVoltages, show: Show): void 
     },
     show,
   );
+  if (!dutyStated(j.document.brief.waveform)) return;
   judgeLimit(
     j,
     {
