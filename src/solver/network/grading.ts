@@ -4,7 +4,7 @@ import type { LadderNetwork } from "./ladderNetwork.ts";
 /**
  * Element capacitances that make the capacitive sharing equal to the resistive at every node, tap offset included:
  * C_i (V_i − V_(i−1)) = C_1 (V_1 − V_0) + Σ_(j<i) Cg_j V_j − Σ_(j<i) Ch_j (V_n − V_j), V the dc node voltages.
- * @param first_F the capacitance of element 1, F. null where negative, or where dc does not pass.
+ * @param first_F the capacitance of element 1, F. null where negative, and where no dc current flows or passes.
  */
 export function grading(network: LadderNetwork, first_F: number): (number | null)[] {
   const dc = dcSolution(network, 1);
@@ -21,6 +21,6 @@ export function grading(network: LadderNetwork, first_F: number): (number | null
       charge += network.toEarth_F[i - 1]! * node - network.toElectrode_F[i - 1]! * above[i]!;
     }
     const C = charge / V[i]!;
-    return C >= 0 ? C : null;
+    return C >= 0 && C < Number.POSITIVE_INFINITY ? C : null;
   });
 }

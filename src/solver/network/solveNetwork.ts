@@ -52,7 +52,12 @@ function dcAnswer(network: LadderNetwork, voltage: number): DcAnswer {
       lvPower_W: null,
     };
   }
-  return { ...dc, scaleFactorFromSource: dc.scaleFactor, electrodeVoltage_V: voltage };
+  return {
+    ...dc,
+    inputResistance_ohm: finite(dc.inputResistance_ohm),
+    scaleFactorFromSource: dc.scaleFactor,
+    electrodeVoltage_V: voltage,
+  };
 }
 
 function frequencyAnswer(network: LadderNetwork, frequencies: readonly number[]) {
