@@ -24,9 +24,9 @@ export const strayFormulas = {
     result: { symbol: "C_e", unit: "F", meaning: "whole column to earth" },
     inputs: { l: m("l", "column length"), d: m("d", "column diameter"), h: m("h", "height of its foot") },
     holds:
-      "A bare graded column, length over diameter 10 to 30; too high by 10 to 95 % under a top electrode. Walls add to it.",
+      "A bare graded column, length over diameter 10 to 30; too high by 10 to 95 % under a top electrode. Walls add to it. None where it is not longer than wide.",
     source: kuffel,
-    compute: ({ l, d, h }) => verticalCylinderCapacitance(metre(l), metre(d), metre(h)),
+    compute: ({ l, d, h }) => (l > d ? verticalCylinderCapacitance(metre(l), metre(d), metre(h)) : null),
   }),
   toElectrode: formula({
     id: "strays.toElectrode",
@@ -50,7 +50,7 @@ export interface ColumnStrays {
   readonly electrodeToTap_F: number;
 }
 
-/** Writes `strays.*` on the sheet and returns what each inner node carries. */
+/** Writes `strays.*` on the sheet and returns what each inner node carries; 0 where the formula gives none. */
 export function columnStrays(geometry: Geometry, n: number, sheet: Sheet): ColumnStrays {
   sheet.given("/design/geometry/columnLength_m", geometry.columnLength_m);
   sheet.given("/design/geometry/columnDiameter_m", geometry.columnDiameter_m);

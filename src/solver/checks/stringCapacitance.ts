@@ -1,8 +1,8 @@
 import { formula } from "../standards/formula.ts";
 import { computedHere } from "../standards/source.ts";
 import { type CapacitiveTwoPort, capacitiveLadder, capacitiveLadderRecord } from "./capacitiveLadder.ts";
-import { type ColumnStrays, columnStrays } from "./columnStrays.ts";
-import { givenPerElement, type Judging } from "./judging.ts";
+import { type ColumnStrays, columnStrays, strayFormulas } from "./columnStrays.ts";
+import { givenPerElement, type Judging, plainFinding } from "./judging.ts";
 
 const F = (symbol: string, meaning: string) => ({ symbol, unit: "F", meaning });
 
@@ -69,8 +69,19 @@ export function stringCapacitance(j: Judging): StringCapacitance {
 
 function straysOf(j: Judging, n: number): ColumnStrays {
   const { strays, geometry } = j.design;
-  if (strays.from !== "typed") return columnStrays(geometry, n, j.sheet);
-  const padded = (list: readonly number[]) => Array.from({ length: Math.max(n - 1, 0) }, (_, i) => list[i] ?? 0);
+  if (strays.from !== "typed") {
+    const found = columnStrays(geometry, n, j.sheet);
+    if (j.sheet.number("strays.toEarth_F") === null) notLonger(j);
+    return found;
+  }
+  const inner = Math.max(n - 1, 0);
+  const padded = (list: readonly number[]) => Array.from({ length: inner }, (_, i) => list[i] ?? 0);
+  for (const [list, of] of [
+    [strays.toEarth_F, "earth"],
+    [strays.toElectrode_F, "the top electrode"],
+  ] as const) {
+    if (list.length !== 0 && list.length !== inner) otherCount(j, list.length, inner, of);
+  }
   const toEarth_F = padded(strays.toEarth_F);
   j.sheet.given("/design/strays/toEarth_F", toEarth_F);
   j.sheet.given(
@@ -78,4 +89,28 @@ function straysOf(j: Judging, n: number): ColumnStrays {
     toEarth_F.reduce((sum, c) => sum + c, 0),
   );
   return { toEarth_F, toElectrode_F: padded(strays.toElectrode_F), electrodeToTap_F: strays.electrodeToTap_F };
+}
+
+function notLonger(j: Judging): void {
+  plainFinding(j, {
+    id: "strays.formula",
+    level: "caution",
+    what: "stray capacitance of the column",
+    reason:
+      "The column is not longer than it is wide: the formula for its strays does not hold, and none were counted. Correct its length or diameter, or type the strays.",
+    source: strayFormulas.toEarth.source,
+  });
+}
+
+function otherCount(j: Judging, given: number, inner: number, of: string): void {
+  plainFinding(j, {
+    id: "strays.count",
+    level: "caution",
+    what: `stray capacitances typed to ${of}`,
+    actual: given,
+    limit: inner,
+    unit: "1",
+    reason: `${given} typed, the string has ${inner} inner nodes: from the tap up, those missing count as zero and those too many are left out. Type one a node.`,
+    source: computedHere("one value an inner node"),
+  });
 }
