@@ -19,13 +19,14 @@ import { ok, type Result, refuse } from "../quantities/result.ts";
 import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
 import { jobSentence } from "./jobSentence.ts";
+import { noResistance } from "./noResistance.ts";
 import type { Proof } from "./proof.ts";
 import { response } from "./response.ts";
 import { judgeUncertainty } from "./uncertainty.ts";
 
 /**
  * Judges a document's design: every figure with its trace, the responses, the fault table, the findings and the cautions.
- * Refuses a document without a design, with a part or a principal instrument that it does not hold. Pure.
+ * Refuses a document without a design, with a part or a principal instrument that it does not hold, with a wire for a resistor. Pure.
  */
 export function prove(document: DividerDocument): Result<Proof> {
   const refused = unusable(document);
@@ -85,7 +86,7 @@ function unusable(document: DividerDocument): Result<never> | null {
       `Name one of: ${document.instruments.map((each) => each.id).join(", ") || "(none: add one)"}.`,
     );
   }
-  return missingPart(document);
+  return missingPart(document) ?? noResistance(design);
 }
 
 /** Every part that the design names must be held by the document, and be of the right kind. */
