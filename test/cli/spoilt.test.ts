@@ -66,4 +66,28 @@ describe("a demo with odd values in it", () => {
       { numRuns: words[0] === "size" ? 12 : 40 },
     );
   });
+
+  const judged = [
+    "element.voltage.peak",
+    "element.dissipation",
+    "clearance.column",
+    "creepage.column",
+    "creepage.element",
+    "instrument.input",
+    "instrument.range",
+  ];
+  it("is never without a stop while a check was left out", async () => {
+    await fc.assert(
+      fc.asyncProperty(spoilt, async ({ name, changes }) => {
+        const document = changes.reduce((each, [path, value]) => put(each, path, value), demos[name]!);
+        const { code, out } = await shell(["prove", "file"], document);
+        if (code !== 0) return;
+        const proof = JSON.parse(out);
+        const ids: string[] = proof.findings.map((each: { id: string }) => each.id.replace(/\.notStated$/, ""));
+        for (const id of judged) expect(ids).toContain(id);
+        expect(proof.scaleFactor.predicted).toBeGreaterThan(1);
+      }),
+      { numRuns: 40 },
+    );
+  });
 });
