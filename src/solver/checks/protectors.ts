@@ -28,6 +28,7 @@ export function judgeProtectors(j: Judging, show: Show): void {
   const greatest = Math.abs(sheet.number("reading.atGreatest_Vpeak") as number);
   for (const fitted of limiting) {
     const part = protectorOf(j, fitted.part);
+    if (part.leastStrike_V === null) strikeNotStated(j, part.name);
     if (part.leastStrike_V === null || part.leastStrike_V >= 1.25 * greatest) continue;
     plainFinding(j, {
       id: "protector.strike",
@@ -64,4 +65,16 @@ export function judgeProtectors(j: Judging, show: Show): void {
       path: "protector.leakageError",
     });
   }
+}
+
+/** Without its strike voltage neither conduction in normal use nor leakage at the tap can be judged. */
+function strikeNotStated(j: Judging, name: string): void {
+  plainFinding(j, {
+    id: "protector.strike.notStated",
+    level: "caution",
+    what: `${name}: strike voltage not stated`,
+    reason:
+      "Without the lowest voltage at which it may conduct, neither its conduction in normal use nor its leakage is judged. Type it from the data sheet.",
+    source: practice("the lowest strike at least 1.25 times the greatest reading"),
+  });
 }

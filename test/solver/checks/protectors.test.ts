@@ -43,6 +43,12 @@ describe("a protector across the LV arm", () => {
   ])("that leaks %f A against a wish of 3 %%: %s", (leakage_A, expected) =>
     expect(level(guarded({ leakage_A }), "protector.leakage")).toBe(expected),
   );
+  it.each([null, 0])("that states %s as its strike voltage is not judged, and that is said", (leastStrike_V) => {
+    const proof = proven(guarded({ leastStrike_V, leakage_A: 1e-3 }));
+    expect(finding(proof, "protector.strike.notStated")?.level).toBe("caution");
+    expect(finding(proof, "protector.strike")).toBeUndefined();
+    expectRelative(figure(proof, "scaleFactor.predicted"), 1000, 1e-6, "leakage without a voltage is not counted");
+  });
   it("is not judged against a wish that is not stated", () =>
     expect(
       level({ ...guarded({ leakage_A: 3e-6 }), brief: { wantedUncertainty: 0 } }, "protector.leakage"),
