@@ -3,7 +3,7 @@ import { capacitiveLadder } from "./capacitiveLadder.ts";
 import { dcOutput, type FaultBench, fastOutput, faultBench, greatestElement, shortedLadder } from "./faultBench.ts";
 import { faultFindings } from "./faultFindings.ts";
 import { accessible, type FaultRow, faultRecord, seen, worstFault } from "./faultRow.ts";
-import type { Judging } from "./judging.ts";
+import { type Judging, plainFinding } from "./judging.ts";
 import type { Show } from "./show.ts";
 import type { StringCapacitance } from "./stringCapacitance.ts";
 
@@ -28,7 +28,27 @@ export function faults(j: Judging, string: StringCapacitance, show: Show): Fault
     0,
   );
   faultFindings(j, rows, worst, show);
+  edgeInUse(j, fastOutput(j, bench, bench.capacitors_F), show);
   return rows;
+}
+
+/** An edge as high as the greatest peak, with nothing broken: too little LV capacitance puts it on the instrument. */
+function edgeInUse(j: Judging, edge: number, show: Show): void {
+  const limit = j.instrument.greatestInput_Vpeak;
+  if (edge <= limit) return;
+  plainFinding(j, {
+    id: "instrument.edge",
+    level: "stop",
+    what: "voltage at the instrument on an edge",
+    actual: edge,
+    limit,
+    unit: "V",
+    sense: "atMost",
+    margin: 1 - edge / limit,
+    reason: `With nothing broken, an edge of the greatest peak puts ${show(edge, "V")} on ${j.instrument.name}, which may see ${show(limit, "V")}: the LV capacitance is too small for the string's. Switching on, a flash-over or a touched lead is such an edge.`,
+    source: faultRecord.source,
+    cure: { label: "size again", edits: [], sizeAgain: true },
+  });
 }
 
 /** Resistance of `strings` equal strings, joined at their ends only, when one of them is `gone` Ω short. */

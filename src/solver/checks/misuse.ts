@@ -1,6 +1,7 @@
 import type { Edit } from "../standards/finding.ts";
 import { computedHere, practice, type Source } from "../standards/source.ts";
 import { type Judging, plainFinding } from "./judging.ts";
+import { mains } from "./mains.ts";
 import { pulseTrain } from "./pulseTrain.ts";
 import type { Show } from "./show.ts";
 
@@ -20,6 +21,7 @@ export function misuse(j: Judging, show: Show): void {
 /** The same as far as the brief alone tells, whatever the design. Needs `working.*`. */
 export function briefMisuse(j: Judging, show: Show): void {
   earth(j);
+  mains(j);
   fiftyOhm(j, show);
   wrongFunction(j);
   voltages(j, show);

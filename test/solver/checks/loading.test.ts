@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { figure, finding, fixed, instrument, proven, type Sketch } from "../../support/builders.ts";
+import { bank, figure, finding, fixed, instrument, proven, type Sketch } from "../../support/builders.ts";
 import { expectRelative } from "../../support/relative.ts";
 
 // Invented scenario, computed independently: 6 kV on 12 × 100 MΩ into a 10 MΩ meter, scale factor 1000: 4.995 µA, 6.000 V.
@@ -25,6 +25,15 @@ describe("what the source gives", () => {
     [40e6, "stop"],
   ])("%f Ω inside against a wish of 3 %%: %s", (resistance_ohm, expected) =>
     expect(level({ ...meter, source: { resistance_ohm } }, "source.sag")).toBe(expected),
+  );
+});
+
+describe("a source on the mains", () => {
+  it.each([
+    [false, undefined],
+    [true, "caution"],
+  ])("without isolation %s: %s", (mainsConnected, expected) =>
+    expect(level({ ...meter, source: { mainsConnected } }, "source.mainsConnected")).toBe(expected),
   );
 });
 
@@ -63,6 +72,26 @@ describe("what the instrument sees: 6.000 V", () => {
     const row = proof.instruments.find((each) => each.id === "weak")!;
     expect(row.readingAtGreatest_Vpeak).toBeGreaterThan(row.greatestInput_Vpeak);
     expectRelative(row.readingAtGreatest_Vpeak, 6.8173, 1e-4, "five digits given");
+  });
+});
+
+describe("an edge with nothing broken", () => {
+  // 12 × 120 pF in series are 10 pF, against 50 pF of the meter: a sixth of the voltage, less what is fitted beside it.
+  const edge = (fitted_F: number): Sketch => ({
+    ...meter,
+    capacitance_F: 120e-12,
+    strays: { from: "typed" },
+    instrument: { capacitance_F: 50e-12 },
+    branches: [...meter.branches!, ...(fitted_F > 0 ? [bank("C", fitted_F)] : [])],
+  });
+  it("of 6 kV puts 1 kV on a bare meter: a stop where it may see less, none where it may see more or C is fitted", () => {
+    const under = { ...edge(0), instrument: { capacitance_F: 50e-12, greatestInput_Vpeak: 1001 } };
+    expect(level(under, "instrument.edge")).toBeUndefined();
+    const over = { ...edge(0), instrument: { capacitance_F: 50e-12, greatestInput_Vpeak: 999 } };
+    const found = finding(proven(over), "instrument.edge")!;
+    expect(found.level).toBe("stop");
+    expectRelative(found.actual, 1000, 1e-9, "capacitive divider of 10 and 50 pF");
+    expect(level({ ...over, branches: edge(1e-9).branches! }, "instrument.edge")).toBeUndefined();
   });
 });
 
