@@ -85,6 +85,12 @@ export const seriesResistance = (j: Judging): number =>
     return part.type === "seriesResistor" ? sum + (part.resistance_ohm ?? 0) : sum;
   }, 0);
 
+/** Where the series protectors stand: at the divider, with the cable behind them, as soon as one of them does; that is the slower case. */
+export const seriesAt = (j: Judging): "divider" | "instrument" =>
+  j.design.protectors.some((fitted) => fitted.at === "divider" && protectorOf(j, fitted.part).type === "seriesResistor")
+    ? "divider"
+    : "instrument";
+
 /** Writes `lvArm.branch_ohm` and `lvArm.fitted_ohm`. */
 export function lvArmResistance(j: Judging): void {
   const branches = j.design.lvArm.branches.filter(isResistive);

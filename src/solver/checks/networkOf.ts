@@ -6,6 +6,7 @@ import {
   isResistive,
   leakageConductance,
   protectorCapacitance,
+  seriesAt,
   seriesResistance,
   trimOf,
 } from "./lvArm.ts";
@@ -44,6 +45,6 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
         capacitance_F: protectorCapacitance(j, "instrument"),
       },
     },
-    seriesProtector: { resistance_ohm: seriesResistance(j), at: "instrument" },
+    seriesProtector: { resistance_ohm: seriesResistance(j), at: seriesAt(j) },
   };
 }

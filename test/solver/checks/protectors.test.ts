@@ -64,6 +64,21 @@ describe("a protector across the LV arm", () => {
   });
 });
 
+describe("a series resistor of 100 kΩ and a cable of 1 nF", () => {
+  const cable = { length_m: 1, capacitance_F_per_m: 1e-9, impedance_ohm: 50 };
+  const series = { type: "seriesResistor", leastStrike_V: null, letThrough_V: null, resistance_ohm: 1e5 };
+  const tap = 1 / (1 / 1.2e9 + 1 / 1.3651875e6);
+  const parallel = (a: number, b: number) => 1 / (1 / a + 1 / b);
+  it.each([
+    ["divider", parallel(tap + 1e5, 10e6)],
+    ["instrument", parallel(tap, 10.1e6)],
+  ])("at the %s", (at, R) => {
+    const s = { ...guarded(series, at), strays: { from: "typed" }, instrument: { cable } };
+    const pole = 1 / (2 * Math.PI * R * 1e-9);
+    expectRelative(figure(proven(s), "response.bandwidth_Hz"), pole, 1e-6, "one pole, closed form");
+  });
+});
+
 describe("a lost LV arm behind a protector", () => {
   const lost = (s: Sketch) => fault(proven(s), "lvArmLost").output_V;
   it("stands at what 10 MΩ makes of 6 kV without one", () =>
