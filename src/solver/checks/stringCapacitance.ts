@@ -72,6 +72,7 @@ function straysOf(j: Judging, n: number): ColumnStrays {
   if (strays.from !== "typed") {
     const found = columnStrays(geometry, n, j.sheet);
     if (j.sheet.number("strays.toEarth_F") === null) notLonger(j);
+    if (strays.from === "field") notSolved(j);
     return found;
   }
   const inner = Math.max(n - 1, 0);
@@ -98,6 +99,17 @@ function notLonger(j: Judging): void {
     what: "stray capacitance of the column",
     reason:
       "The column is not longer than it is wide: the formula for its strays does not hold, and none were counted. Correct its length or diameter, or type the strays.",
+    source: strayFormulas.toEarth.source,
+  });
+}
+
+function notSolved(j: Judging): void {
+  plainFinding(j, {
+    id: "strays.field",
+    level: "caution",
+    what: "stray capacitance by the field solve",
+    reason:
+      "The field of the drawing is not solved here: the closed formula of a column was used instead, and knows no ring, wall or screen. Type the strays where you know them.",
     source: strayFormulas.toEarth.source,
   });
 }

@@ -35,6 +35,22 @@ describe("strays typed", () => {
     expectRelative(figure(proven(typed([1e-12])), "strays.toEarth_F"), 1e-12, 1e-12, "sum"));
 });
 
+describe("strays by the field solve", () => {
+  it.each([
+    ["field", true],
+    ["formula", false],
+  ] as const)("asked from the %s: the closed formula stands in, said: %s", (from, said) => {
+    const proof = proven({ ...meter, strays: { from } });
+    expect(finding(proof, "strays.field")?.level).toBe(said ? "caution" : undefined);
+    expectRelative(
+      figure(proof, "strays.toEarth_F"),
+      figure(proven({ ...meter, strays: { from: "formula" } }), "strays.toEarth_F"),
+      1e-15,
+      "the same formula",
+    );
+  });
+});
+
 describe("strays by the formula", () => {
   it.each([
     [0.66, 0.04, true],
