@@ -1,7 +1,7 @@
 import type { LadderNetwork } from "../../src/solver/network/ladderNetwork.ts";
 import { stepFigures } from "../../src/solver/network/stepFigures.ts";
-import { stepResponse } from "../../src/solver/network/stepResponse.ts";
 import { sweep } from "../../src/solver/network/sweep.ts";
+import { stepResponse } from "../../src/solver/network/timeResponse.ts";
 import { add, type Complex, complex, divide, multiply } from "../../src/solver/quantities/complex.ts";
 import { sketch } from "../solver/network/invented.ts";
 import type { Benchmark } from "./benchmark.ts";

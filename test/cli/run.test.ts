@@ -177,13 +177,10 @@ describe("the raw network", () => {
   it.each([
     [{ ...attenuator, elements: [] }, /elements: There are 0/],
     [{ ...attenuator, elements: [{ resistance_ohm: -1 }] }, /elements\/0\/resistance_ohm/],
-    [
-      { ...attenuator, lvArm: { resistance_ohm: 1e6, inductance_H: 1e-9 } },
-      /inductance_H: The program does not count this yet/,
-    ],
+    [{ ...attenuator, lvArm: { resistance_ohm: 1e6, inductance_H: -1e-9 } }, /lvArm\/inductance_H/],
     [{ ...attenuator, ask: { faults: true } }, /ask\/faults: The program does not compute this yet/],
-    [{ ...attenuator, source: { resistance_ohm: 10 } }, /source\/resistance_ohm/],
-    [{ ...attenuator, cable: { delay_s: 1e-9 } }, /cable\/delay_s/],
+    [{ ...attenuator, source: { resistance_ohm: -10 } }, /source\/resistance_ohm/],
+    [{ ...attenuator, cable: { delay_s: 1e-9 } }, /cable\/impedance_ohm: A line needs it/],
     [{ ...attenuator, surprise: 1 }, /surprise: This key is not known/],
     [{ ...attenuator, strays: { toEarth_F: [1e-12] } }, /inner nodes/],
     [{ ...attenuator, ask: { times_s: [-1] } }, /times_s\/0/],

@@ -1,4 +1,4 @@
-import type { LadderNetwork } from "../network/ladderNetwork.ts";
+import { idealSource, type LadderNetwork } from "../network/ladderNetwork.ts";
 import type { Judging } from "./judging.ts";
 import {
   capacitanceOf,
@@ -31,12 +31,13 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
     lv: {
       resistance_ohm: conductance === 0 ? Number.POSITIVE_INFINITY : 1 / conductance,
       capacitance_F: branches.reduce((sum, branch) => sum + capacitanceOf(branch), 0),
+      inductance_H: 0,
     },
     protector: {
       resistance_ohm: leakage === 0 ? Number.POSITIVE_INFINITY : 1 / leakage,
       capacitance_F: protectorCapacitance(j, "divider"),
     },
-    cable: { capacitance_F: instrument.cable.length_m * instrument.cable.capacitance_F_per_m },
+    cable: { capacitance_F: instrument.cable.length_m * instrument.cable.capacitance_F_per_m, line: null },
     instrument: {
       resistance_ohm: instrument.resistance_ohm,
       capacitance_F: instrument.capacitance_F,
@@ -46,5 +47,6 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
       },
     },
     seriesProtector: { resistance_ohm: seriesResistance(j), at: seriesAt(j) },
+    source: idealSource,
   };
 }

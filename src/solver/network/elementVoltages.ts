@@ -1,54 +1,51 @@
-import type { LadderNetwork } from "./ladderNetwork.ts";
+import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
+import { lvSide } from "./lvSide.ts";
 import { angular } from "./sweep.ts";
-import { conductances, tapTwoPort, transfer } from "./tapTwoPort.ts";
+import { conductances, tapTwoPort } from "./tapTwoPort.ts";
+import { electrodeShare, transferOf } from "./transfer.ts";
 
-/** Amplitude of each element's voltage and of the tap's at each frequency, for a peak at the electrode, V. */
+/** Amplitude of each element's voltage and of the tap's at each frequency, V. */
 export interface ElementVoltages {
   readonly elementVoltage_V: number[][];
   readonly tapVoltage_V: number[];
 }
 
 /**
- * Back-substitution from the tap upward with the difference formed directly: with E to earth and H to the electrode of node i
- * (all above it eliminated), v_i − v_(i−1) = (H (V − v_(i−1)) − E v_(i−1)) / (E + H + y).
+ * Back-substitution from the tap upward without a difference of equals: with E to earth and H to the electrode of node i (all above it
+ * eliminated), v_i − v_(i−1) = (H d_(i−1) − E v_(i−1))/S and d_i = V − v_i = (E V + y d_(i−1))/S, S = E + H + y.
+ * @param peak_V amplitude at the reference input
  */
 export function elementVoltages(
   network: LadderNetwork,
   frequencies_Hz: readonly number[],
   peak_V: number,
+  reference: Reference = "electrode",
 ): ElementVoltages {
   const { n } = network;
+  const sim = angular(frequencies_Hz);
+  const sre = new Float64Array(sim.length);
+  const port = tapTwoPort(network, sre, sim);
+  const side = lvSide(network, sre, sim);
+  const share = electrodeShare(network, transferOf(network, port, sre, sim), sre, sim);
+  const steps = { er: new Float64Array(n), ei: new Float64Array(n), hr: new Float64Array(n), hi: new Float64Array(n) };
   const elementVoltage_V: number[][] = [];
   const tapVoltage_V: number[] = [];
-  const steps = { er: new Float64Array(n), ei: new Float64Array(n), hr: new Float64Array(n), hi: new Float64Array(n) };
-  for (const f of frequencies_Hz) {
-    const sim = angular([f]);
-    const sre = new Float64Array(1);
-    const bare = { ...network, seriesProtector: { ...network.seriesProtector } };
-    const port = tapTwoPort(bare, sre, sim);
-    const tap = tapOf(network, port, sre, sim);
-    descend(network, sim[0]!, steps);
-    elementVoltage_V.push(climb(network, sim[0]!, steps, tap, peak_V));
-    tapVoltage_V.push(Math.hypot(tap.re, tap.im) * peak_V);
+  for (let k = 0; k < sim.length; k++) {
+    const peak = reference === "source" ? peak_V * Math.hypot(share.re[k]!, share.im[k]!) : peak_V;
+    const below = { re: side.Lre[k]! + port.Ere[k]!, im: side.Lim[k]! + port.Eim[k]! };
+    const H = { re: port.Hre[k]!, im: port.Him[k]! };
+    const S = { re: below.re + H.re, im: below.im + H.im };
+    const tap = { v: quotient(H.re, H.im, S.re, S.im), d: quotient(below.re, below.im, S.re, S.im) };
+    descend(network, sim[k]!, steps);
+    elementVoltage_V.push(climb(network, sim[k]!, steps, tap, peak));
+    tapVoltage_V.push(Math.hypot(tap.v.re, tap.v.im) * peak);
   }
   return { elementVoltage_V, tapVoltage_V };
 }
 
-/** v_tap over V: the transfer with the output taken at the tap, i.e. with the series part counted as load only. */
-function tapOf(network: LadderNetwork, port: ReturnType<typeof tapTwoPort>, sre: Float64Array, sim: Float64Array) {
-  const H = transfer(network, port, sre, sim);
-  const Rs = network.seriesProtector.resistance_ohm;
-  if (Rs === 0) return { re: H.re[0]!, im: H.im[0]! };
-  const { instrument, cable, seriesProtector } = network;
-  const g = (R: number) => (R === Number.POSITIVE_INFINITY ? 0 : 1 / R);
-  const G = g(instrument.resistance_ohm) + g(instrument.protector.resistance_ohm);
-  const C =
-    instrument.capacitance_F +
-    instrument.protector.capacitance_F +
-    (seriesProtector.at === "divider" ? cable.capacitance_F : 0);
-  const dr = 1 + Rs * G;
-  const di = Rs * C * sim[0]!;
-  return { re: H.re[0]! * dr - H.im[0]! * di, im: H.re[0]! * di + H.im[0]! * dr };
+function quotient(ar: number, ai: number, br: number, bi: number): { re: number; im: number } {
+  const d = br * br + bi * bi;
+  return d === 0 ? { re: 0, im: 0 } : { re: (ar * br + ai * bi) / d, im: (ai * br - ar * bi) / d };
 }
 
 interface Steps {
@@ -84,39 +81,52 @@ function descend(network: LadderNetwork, w: number, { er, ei, hr, hi }: Steps): 
     }
     const qr = (yr * Sr + yi * Si) / d;
     const qi = (yi * Sr - yr * Si) / d;
-    [e, f] = [qr * e - qi * f, qr * f + qi * e];
-    [a, b] = [qr * a - qi * b, qr * b + qi * a];
+    const er2 = qr * e - qi * f;
+    f = qr * f + qi * e;
+    e = er2;
+    const hr2 = qr * a - qi * b;
+    b = qr * b + qi * a;
+    a = hr2;
   }
 }
 
-function climb(
-  network: LadderNetwork,
-  w: number,
-  steps: Steps,
-  tap: { re: number; im: number },
-  peak: number,
-): number[] {
+interface Tap {
+  readonly v: { readonly re: number; readonly im: number };
+  readonly d: { readonly re: number; readonly im: number };
+}
+
+function climb(network: LadderNetwork, w: number, steps: Steps, tap: Tap, peak: number): number[] {
   const { n, capacitance_F: C } = network;
   const G = conductances(network);
-  let vr = tap.re;
-  let vi = tap.im;
-  const out: number[] = [];
+  let { re: vr, im: vi } = tap.v;
+  let { re: dr, im: di } = tap.d;
+  const out = new Array<number>(n);
   for (let i = 1; i < n; i++) {
     const er = steps.er[i]!;
     const ei = steps.ei[i]!;
     const hr = steps.hr[i]!;
     const hi = steps.hi[i]!;
-    const Sr = er + hr + G[i - 1]!;
-    const Si = ei + hi + w * C[i - 1]!;
-    const nr = hr * (1 - vr) + hi * vi - er * vr + ei * vi;
-    const ni = hi * (1 - vr) - hr * vi - er * vi - ei * vr;
-    const d = Sr * Sr + Si * Si;
-    const ur = d === 0 ? 0 : (nr * Sr + ni * Si) / d;
-    const ui = d === 0 ? 0 : (ni * Sr - nr * Si) / d;
-    out.push(Math.hypot(ur, ui) * peak);
+    const yr = G[i - 1]!;
+    const yi = w * C[i - 1]!;
+    const Sr = er + hr + yr;
+    const Si = ei + hi + yi;
+    const scale = Sr * Sr + Si * Si;
+    if (scale === 0) {
+      out[i - 1] = 0;
+      continue;
+    }
+    const nr = hr * dr - hi * di - er * vr + ei * vi;
+    const ni = hr * di + hi * dr - er * vi - ei * vr;
+    const ur = (nr * Sr + ni * Si) / scale;
+    const ui = (ni * Sr - nr * Si) / scale;
+    out[i - 1] = Math.hypot(ur, ui) * peak;
+    const mr = er + yr * dr - yi * di;
+    const mi = ei + yr * di + yi * dr;
     vr += ur;
     vi += ui;
+    dr = (mr * Sr + mi * Si) / scale;
+    di = (mi * Sr - mr * Si) / scale;
   }
-  out.push(Math.hypot(1 - vr, vi) * peak);
+  out[n - 1] = Math.hypot(dr, di) * peak;
   return out;
 }

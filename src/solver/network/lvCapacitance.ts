@@ -1,8 +1,9 @@
-import { dcSolution } from "./dcSolution.ts";
-import { type LadderNetwork, withLvCapacitance } from "./ladderNetwork.ts";
+import { scaleFactorOf } from "./dcSolution.ts";
+import { type LadderNetwork, type Reference, withLvCapacitance } from "./ladderNetwork.ts";
 import { responseTime } from "./stepFigures.ts";
 import { angular, decibel } from "./sweep.ts";
-import { tapTwoPort, transfer } from "./tapTwoPort.ts";
+import { tapTwoPort } from "./tapTwoPort.ts";
+import { transfer, transferOf } from "./transfer.ts";
 
 /** The LV capacitance to be fitted, all else held, by each of the three matches, F; null where it is negative or does not exist. */
 export interface LvCapacitance {
@@ -15,14 +16,20 @@ export interface LvCapacitance {
   readonly flattest_dB: number | null;
 }
 
-export function lvCapacitance(network: LadderNetwork, band_Hz: readonly [number, number]): LvCapacitance {
+export function lvCapacitance(
+  network: LadderNetwork,
+  band_Hz: readonly [number, number],
+  reference: Reference = "electrode",
+): LvCapacitance {
   const bare = withLvCapacitance(network, 0);
-  const dc = dcSolution(bare, 1);
-  if (dc === null) return { responseTime_F: null, highFrequency_F: null, flattest_F: null, flattest_dB: null };
-  const highFrequency = byHighFrequency(bare, dc.scaleFactor);
-  const flattest = byFlatness(bare, dc.scaleFactor, band_Hz, highFrequency);
+  const scaleFactor = scaleFactorOf(bare, reference);
+  if (scaleFactor === null) return { responseTime_F: null, highFrequency_F: null, flattest_F: null, flattest_dB: null };
+  const highFrequency = byHighFrequency(bare, scaleFactor, reference);
+  const responseTime = byResponseTime(bare, reference);
+  const start = [highFrequency, responseTime].find((each) => each !== null && each > 0) ?? 1e-8;
+  const flattest = byFlatness(bare, scaleFactor, band_Hz, start, reference);
   return {
-    responseTime_F: positive(byResponseTime(bare)),
+    responseTime_F: positive(responseTime),
     highFrequency_F: positive(highFrequency),
     flattest_F: flattest.capacitance,
     flattest_dB: flattest.deviation,
@@ -31,36 +38,41 @@ export function lvCapacitance(network: LadderNetwork, band_Hz: readonly [number,
 
 const positive = (value: number | null): number | null => (value === null || value < 0 ? null : value);
 
-/** T is linear in the LV capacitance (its slope is the tap's source resistance): two values give the root. */
-function byResponseTime(bare: LadderNetwork): number | null {
-  const T0 = responseTime(bare);
-  if (T0 === null) return null;
-  const trial = 1e-9;
-  const T1 = responseTime(withLvCapacitance(bare, trial)) as number;
-  const slope = (T1 - T0) / trial;
-  return slope === 0 ? null : -T0 / slope;
+/** T is linear in the LV capacitance (its slope is the tap's source resistance): two values give the root, a third its last digits. */
+function byResponseTime(bare: LadderNetwork, reference: Reference): number | null {
+  const at = (C: number) => responseTime(withLvCapacitance(bare, C), reference) as number;
+  const T0 = at(0);
+  const slope = (at(1e-9) - T0) / 1e-9;
+  if (slope === 0) return null;
+  const first = -T0 / slope;
+  return first <= 0 ? first : first - (at(first) * first) / (at(first) - T0);
 }
 
-/** At the edge v_tap = C_12 / (C_tap + C2); solved for F·v_out = 1. */
-function byHighFrequency(bare: LadderNetwork, scaleFactor: number): number | null {
-  const { seriesProtector, instrument, cable } = bare;
-  const behind = instrument.capacitance_F + instrument.protector.capacitance_F;
-  const far = seriesProtector.at === "divider" ? behind + cable.capacitance_F : behind;
-  if (seriesProtector.resistance_ohm > 0 && far > 0) return null;
-  const s = 1e40;
-  const sre = Float64Array.of(s);
+const edge = 1e40;
+
+/** At the edge v_tap = C_12/(C_tap + C2), solved for F·v_out = 1. null where the edge does not depend on it, or passes nothing. */
+function byHighFrequency(bare: LadderNetwork, scaleFactor: number, reference: Reference): number | null {
+  if (bare.lv.inductance_H > 0 || bare.cable.line !== null) return null;
+  const sre = Float64Array.of(edge);
   const zero = new Float64Array(1);
-  const port = tapTwoPort(bare, sre, zero);
-  const initial = transfer(bare, port, sre, zero).re[0]!;
-  if (initial === 0) return null;
-  // v_out = t·H/(H + E + L), so H + E + L = t·H/v_out and the missing capacitance is what makes v_out = 1/F.
-  const t =
-    seriesProtector.resistance_ohm > 0 ? 1 / (1 + seriesProtector.resistance_ohm / instrument.resistance_ohm) : 1;
-  const H = port.Hre[0]! / s;
-  return t * H * (scaleFactor - 1 / initial);
+  const initial = (network: LadderNetwork) => transfer(network, sre, zero, reference).re[0]! * scaleFactor;
+  const none = initial(bare);
+  if (Math.abs(none) < 1e-15) return null;
+  // v_out = A/(S + C2): two values give S, and S the missing capacitance.
+  const trial = 1e-9;
+  const S = (trial * initial(withLvCapacitance(bare, trial))) / (none - initial(withLvCapacitance(bare, trial)));
+  const found = S * (none - 1);
+  if (!Number.isFinite(found)) return null;
+  return found < 0 || Math.abs(initial(withLvCapacitance(bare, found)) - 1) < 1e-6 ? found : null;
 }
 
-function byFlatness(bare: LadderNetwork, scaleFactor: number, band: readonly [number, number], start: number | null) {
+function byFlatness(
+  bare: LadderNetwork,
+  scaleFactor: number,
+  band: readonly [number, number],
+  scale: number,
+  reference: Reference,
+) {
   const [low, high] = band;
   if (!(low > 0) || !(high >= low)) return { capacitance: null, deviation: null };
   const points = 241;
@@ -69,14 +81,13 @@ function byFlatness(bare: LadderNetwork, scaleFactor: number, band: readonly [nu
   const sre = new Float64Array(points);
   const port = tapTwoPort(bare, sre, sim);
   const worst = (C: number): number => {
-    const H = transfer(bare, port, sre, sim, C);
+    const H = transferOf(bare, port, sre, sim, reference, C);
     let greatest = 0;
     for (let k = 0; k < points; k++) {
       greatest = Math.max(greatest, Math.abs(decibel(H.re[k]! * scaleFactor, H.im[k]! * scaleFactor)));
     }
     return greatest;
   };
-  const scale = start !== null && start > 0 ? start : 1e-8;
   let best = 0;
   let at = 0;
   const grid = [0, ...Array.from({ length: 321 }, (_, i) => scale * 10 ** (i / 40 - 6))];

@@ -14,6 +14,10 @@ export interface NetworkAnswer {
   readonly elementVoltageAt?: { readonly elementVoltage_V: readonly Numbers[]; readonly tapVoltage_V: Numbers };
   readonly step?: StepAnswer;
   readonly ramp?: { readonly value: Numbers };
+  readonly doubleExponential?: { readonly value: Numbers; readonly peak: number | null };
+  readonly halfSine?: { readonly value: Numbers };
+  readonly square?: { readonly value: Numbers };
+  readonly samples?: { readonly value: Numbers };
   readonly compensation?: {
     readonly lvCapacitance_F: {
       readonly responseTime: number | null;
@@ -54,12 +58,49 @@ export interface StepAnswer {
   readonly residualSettlingTime_s: number | null;
 }
 
-/** What was asked of a network, read and checked. */
+/** What was asked of a network, read and checked; null: not asked. */
 export interface NetworkAsk {
+  readonly reference: "electrode" | "source";
   readonly frequencies_Hz: readonly number[] | null;
   readonly elementVoltageAt: { readonly frequencies_Hz: readonly number[]; readonly peak_V: number } | null;
   readonly times_s: readonly number[] | null;
-  readonly ramp: { readonly riseTime_s: number; readonly times_s: readonly number[] } | null;
+  readonly ramp: (Timed & { readonly riseTime_s: number }) | null;
+  readonly doubleExponential:
+    | (Timed & { readonly amplitude: number; readonly alpha_per_s: number; readonly beta_per_s: number })
+    | null;
+  readonly halfSine: (Timed & { readonly duration_s: number }) | null;
+  readonly square: (Timed & { readonly period_s: number; readonly duty: number }) | null;
+  readonly samples: (Timed & { readonly time_s: readonly number[]; readonly value: readonly number[] }) | null;
   readonly band_Hz: readonly [number, number] | null;
   readonly grading_first_F: number | null;
+  readonly faults: boolean;
+  readonly tolerance: ToleranceAsk | null;
+  readonly heat: HeatAsk | null;
+  readonly discharge_threshold_V: number | null;
+}
+
+export interface Timed {
+  readonly times_s: readonly number[];
+}
+
+/** Relative half-widths; one an element, tap first. */
+export interface ToleranceAsk {
+  readonly element: readonly number[];
+  readonly lvArm: number;
+  readonly instrument: number;
+  /** Half-width in standard deviations, for the normal reading of a tolerance. */
+  readonly k: number;
+  readonly samples: number | null;
+  readonly seed: number;
+}
+
+/** R = R0 (1 + α (ΔT_ambient + P Rth) + k_v |V|); lists have one value an element, tap first. */
+export interface HeatAsk {
+  readonly temperatureCoefficient_per_K: readonly number[];
+  readonly voltageCoefficient_per_V: readonly number[];
+  readonly thermalResistance_K_per_W: readonly number[];
+  readonly ambientRise_K: number;
+  readonly lvTemperatureCoefficient_per_K: number;
+  readonly lvVoltageCoefficient_per_V: number;
+  readonly lvThermalResistance_K_per_W: number;
 }

@@ -1,34 +1,32 @@
 import { ok, type Result } from "../quantities/result.ts";
-import { dcSolution } from "./dcSolution.ts";
+import { dcSolution, earthed } from "./dcSolution.ts";
 import { elementVoltages } from "./elementVoltages.ts";
 import { grading } from "./grading.ts";
-import type { LadderNetwork } from "./ladderNetwork.ts";
+import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
 import { lvCapacitance } from "./lvCapacitance.ts";
-import type { DcAnswer, NetworkAnswer, Numbers, StepAnswer } from "./networkForm.ts";
+import type { DcAnswer, NetworkAnswer, NetworkAsk, Numbers, StepAnswer } from "./networkForm.ts";
 import { readNetwork } from "./readNetwork.ts";
 import { stepFigures } from "./stepFigures.ts";
-import { StepResponse } from "./stepResponse.ts";
-import { bandwidth, decibel, degrees, sweep } from "./sweep.ts";
+import { bandwidth, decibel, degrees, sweepAll } from "./sweep.ts";
+import { greatest } from "./timeGrid.ts";
+import { type TimeResponse, timeResponse } from "./timeResponse.ts";
+import { doubleExponential, halfSine, ramp, samples, square } from "./waveforms.ts";
 
 /** The raw network, as JSON in and JSON out. Refused with one message where it cannot be used. Pure. */
 export function solveNetwork(form: unknown): Result<NetworkAnswer> {
   const read = readNetwork(form);
   if (!read.ok) return read;
   const { network, voltage_V, ask } = read.value;
-  const rise = ask.ramp;
+  const { reference, elementVoltageAt: at } = ask;
   return ok({
     format: "stringwright-network-answer",
     version: 1,
     dc: dcAnswer(network, voltage_V),
-    ...(ask.frequencies_Hz === null ? {} : frequencyAnswer(network, ask.frequencies_Hz)),
-    ...(ask.elementVoltageAt === null
-      ? {}
-      : {
-          elementVoltageAt: elementVoltages(network, ask.elementVoltageAt.frequencies_Hz, ask.elementVoltageAt.peak_V),
-        }),
-    ...(ask.times_s === null ? {} : { step: stepAnswer(network, ask.times_s) }),
-    ...(rise === null ? {} : { ramp: { value: ramp(network, rise.riseTime_s, rise.times_s) } }),
-    ...(ask.band_Hz === null ? {} : { compensation: compensationAnswer(network, ask.band_Hz) }),
+    ...(ask.frequencies_Hz === null ? {} : frequencyAnswer(network, ask.frequencies_Hz, reference)),
+    ...(at === null ? {} : { elementVoltageAt: elementVoltages(network, at.frequencies_Hz, at.peak_V, reference) }),
+    ...(ask.times_s === null ? {} : { step: stepAnswer(network, ask.times_s, reference) }),
+    ...waveformAnswers(network, ask),
+    ...(ask.band_Hz === null ? {} : { compensation: compensationAnswer(network, ask.band_Hz, reference) }),
     ...(ask.grading_first_F === null ? {} : { grading: { capacitance_F: grading(network, ask.grading_first_F) } }),
   });
 }
@@ -37,60 +35,59 @@ const blocked = (list: ArrayLike<unknown>): Numbers => Array.from(list, () => nu
 
 function dcAnswer(network: LadderNetwork, voltage: number): DcAnswer {
   const dc = dcSolution(network, voltage);
-  if (dc === null) {
-    const none = blocked(network.resistance_ohm);
-    return {
-      scaleFactor: null,
-      scaleFactorFromSource: null,
-      inputResistance_ohm: null,
-      electrodeVoltage_V: voltage,
-      tapVoltage_V: null,
-      outputVoltage_V: null,
-      current_A: null,
-      elementVoltage_V: none,
-      elementPower_W: none,
-      lvPower_W: null,
-    };
-  }
+  if (dc === null) return blockedDc(network, voltage);
+  return { ...dc, inputResistance_ohm: finite(dc.inputResistance_ohm) };
+}
+
+/**
+ * An element without resistance blocks dc: no current, so nothing stands across the others; what shares the voltage among several
+ * such elements, or holds the tap when nothing leads from it to earth, does not exist.
+ */
+function blockedDc(network: LadderNetwork, voltage: number): DcAnswer {
+  const blocks = Array.from(network.resistance_ohm, (R) => !Number.isFinite(R));
+  const held = earthed(network) ? 0 : null;
+  const alone = held !== null && blocks.filter(Boolean).length === 1;
   return {
-    ...dc,
-    inputResistance_ohm: finite(dc.inputResistance_ohm),
-    scaleFactorFromSource: dc.scaleFactor,
+    scaleFactor: null,
+    scaleFactorFromSource: null,
+    inputResistance_ohm: null,
     electrodeVoltage_V: voltage,
+    tapVoltage_V: held,
+    outputVoltage_V: held,
+    current_A: 0,
+    elementVoltage_V: blocks.map((each) => (each ? (alone ? voltage : null) : 0)),
+    elementPower_W: blocks.map(() => 0),
+    lvPower_W: 0,
   };
 }
 
-function frequencyAnswer(network: LadderNetwork, frequencies: readonly number[]) {
-  const solved = sweep(network, frequencies);
-  if (solved === null) {
-    const none = blocked(frequencies);
-    return {
-      frequency: { real: none, imaginary: none, magnitude_dB: none, phase_deg: none },
-      inputImpedance_ohm: { real: none, imaginary: none },
-      bandwidth_Hz: null,
-    };
-  }
+function frequencyAnswer(network: LadderNetwork, frequencies: readonly number[], reference: Reference) {
+  const { real, imaginary, impedanceReal_ohm, impedanceImaginary_ohm } = sweepAll(network, frequencies, reference);
   const each = (pick: (k: number) => number) => frequencies.map((_, k) => finite(pick(k)));
+  const none = blocked(frequencies);
   return {
-    frequency: {
-      real: each((k) => solved.real[k]!),
-      imaginary: each((k) => solved.imaginary[k]!),
-      magnitude_dB: each((k) => decibel(solved.real[k]!, solved.imaginary[k]!)),
-      phase_deg: each((k) => degrees(solved.real[k]!, solved.imaginary[k]!)),
-    },
+    frequency:
+      real === null || imaginary === null
+        ? { real: none, imaginary: none, magnitude_dB: none, phase_deg: none }
+        : {
+            real: each((k) => real[k]!),
+            imaginary: each((k) => imaginary[k]!),
+            magnitude_dB: each((k) => decibel(real[k]!, imaginary[k]!)),
+            phase_deg: each((k) => degrees(real[k]!, imaginary[k]!)),
+          },
     inputImpedance_ohm: {
-      real: each((k) => solved.impedanceReal_ohm[k]!),
-      imaginary: each((k) => solved.impedanceImaginary_ohm[k]!),
+      real: each((k) => impedanceReal_ohm[k]!),
+      imaginary: each((k) => impedanceImaginary_ohm[k]!),
     },
-    bandwidth_Hz: bandwidth(network),
+    bandwidth_Hz: bandwidth(network, reference),
   };
 }
 
 const finite = (value: number): number | null => (Number.isFinite(value) ? value : null);
 
-function stepAnswer(network: LadderNetwork, times: readonly number[]): StepAnswer {
-  const g = StepResponse.of(network);
-  const figures = stepFigures(network);
+function stepAnswer(network: LadderNetwork, times: readonly number[], reference: Reference): StepAnswer {
+  const g = timeResponse(network, reference);
+  const figures = stepFigures(network, reference);
   if (g === null || figures === null) {
     return {
       value: blocked(times),
@@ -109,32 +106,44 @@ function stepAnswer(network: LadderNetwork, times: readonly number[]): StepAnswe
   return { value: times.map((t) => g.at(t)), ...figures };
 }
 
-/**
- * Ramp from 0 to 1 in T: (D(t) - D(t-T))/T with D = ∫g = t - deficit; so 1 - (deficit(t) - deficit(t-T))/T once past T.
- * Late on the difference is the mean of 1 - g over the ramp, taken by Gauss's rule, since the quotient would lose t/T in precision.
- */
-function ramp(network: LadderNetwork, T: number, times: readonly number[]): Numbers {
-  const g = StepResponse.of(network);
-  if (g === null) return blocked(times);
-  return times.map((t) => {
-    if (t <= T) return (t - g.deficit(t)) / T;
-    if (t < 4 * T) return 1 - (g.deficit(t) - g.deficit(t - T)) / T;
-    return gauss((tau) => g.at(tau), t - T, t);
+function waveformAnswers(network: LadderNetwork, ask: NetworkAsk) {
+  const { ramp: rise, doubleExponential: pulse, halfSine: half, square: wave, samples: record } = ask;
+  if (rise === null && pulse === null && half === null && wave === null && record === null) return {};
+  const g = timeResponse(network, ask.reference);
+  const values = (times: readonly number[], of: (g: TimeResponse) => (t: number) => number): { value: Numbers } => ({
+    value: g === null ? blocked(times) : times.map(of(g)),
   });
+  return {
+    ...(rise === null ? {} : { ramp: values(rise.times_s, (g) => (t) => ramp(g, rise.riseTime_s, t)) }),
+    ...(pulse === null
+      ? {}
+      : {
+          doubleExponential: { ...values(pulse.times_s, (g) => doubleExponentialOf(g, pulse)), peak: peakOf(g, pulse) },
+        }),
+    ...(half === null ? {} : { halfSine: values(half.times_s, (g) => halfSine(g, half.duration_s)) }),
+    ...(wave === null ? {} : { square: values(wave.times_s, (g) => (t) => square(g, wave.period_s, wave.duty, t)) }),
+    ...(record === null
+      ? {}
+      : { samples: values(record.times_s, (g) => (t) => samples(g, record.time_s, record.value, t)) }),
+  };
 }
 
-const abscissae = [0.1834346424956498, 0.525532409916329, 0.7966664774136267, 0.9602898564975363];
-const weights = [0.362683783378362, 0.3137066458778873, 0.2223810344533745, 0.1012285362903763];
+type Pulse = NonNullable<NetworkAsk["doubleExponential"]>;
 
-/** Mean by eight-point Gauss-Legendre (Abramowitz and Stegun, table 25.4, from memory). */
-function gauss(f: (x: number) => number, from: number, to: number): number {
-  const middle = (from + to) / 2;
-  const half = (to - from) / 2;
-  return abscissae.reduce((sum, x, k) => sum + (weights[k]! / 2) * (f(middle + half * x) + f(middle - half * x)), 0);
+const doubleExponentialOf =
+  (g: TimeResponse, { amplitude, alpha_per_s, beta_per_s }: Pulse) =>
+  (t: number) =>
+    doubleExponential(g, amplitude, alpha_per_s, beta_per_s, t);
+
+/** The extreme of the output, with its sign. */
+function peakOf(g: TimeResponse | null, pulse: Pulse): number | null {
+  if (g === null) return null;
+  const at = doubleExponentialOf(g, pulse);
+  return at(greatest(g, (t) => Math.abs(at(t))));
 }
 
-function compensationAnswer(network: LadderNetwork, band: readonly [number, number]) {
-  const found = lvCapacitance(network, band);
+function compensationAnswer(network: LadderNetwork, band: readonly [number, number], reference: Reference) {
+  const found = lvCapacitance(network, band, reference);
   return {
     lvCapacitance_F: {
       responseTime: found.responseTime_F,

@@ -1,7 +1,8 @@
-import { dcSolution } from "./dcSolution.ts";
-import type { LadderNetwork } from "./ladderNetwork.ts";
-import { StepResponse } from "./stepResponse.ts";
-import { tapTwoPort, transfer } from "./tapTwoPort.ts";
+import { scaleFactorOf } from "./dcSolution.ts";
+import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
+import { maximum, timeGrid } from "./timeGrid.ts";
+import { type TimeResponse, timeResponse } from "./timeResponse.ts";
+import { transfer } from "./transfer.ts";
 
 /** Figures of the step response (IEC 60060-2 annex C, from memory); times in s, overshoot a fraction of the final value 1. */
 export interface StepFigures {
@@ -13,52 +14,55 @@ export interface StepFigures {
   readonly riseTime_s: number;
   readonly overshoot: number;
   readonly peakTime_s: number | null;
-  readonly settlingTime_s: { readonly "1%": number; readonly "0.1%": number };
-  readonly residualSettlingTime_s: number;
+  /** null: it never settles. */
+  readonly settlingTime_s: { readonly "1%": number | null; readonly "0.1%": number | null };
+  readonly residualSettlingTime_s: number | null;
 }
 
 /**
  * Response time T = ∫(1 − g) dt = −d(F·H)/ds at s = 0, taken as the imaginary part at an infinitesimal imaginary s, where the
  * elimination has nothing to cancel. null where dc does not pass.
  */
-export function responseTime(network: LadderNetwork): number | null {
-  const dc = dcSolution(network, 1);
-  if (dc === null) return null;
+export function responseTime(network: LadderNetwork, reference: Reference = "electrode"): number | null {
+  const scaleFactor = scaleFactorOf(network, reference);
+  if (scaleFactor === null) return null;
   const tiny = 1e-60;
-  const sre = new Float64Array(1);
-  const sim = Float64Array.of(tiny);
-  return (-transfer(network, tapTwoPort(network, sre, sim), sre, sim).im[0]! * dc.scaleFactor) / tiny;
+  return (-transfer(network, new Float64Array(1), Float64Array.of(tiny), reference).im[0]! * scaleFactor) / tiny;
 }
 
-const perDecade = 40;
-const first = -14;
-const last = 7;
-
-/** All figures of the step response of an R-C network; null where dc does not pass. */
-export function stepFigures(network: LadderNetwork): StepFigures | null {
-  const g = StepResponse.of(network);
-  const T = responseTime(network);
+/** All figures of the step response; null where dc does not pass. */
+export function stepFigures(network: LadderNetwork, reference: Reference = "electrode"): StepFigures | null {
+  const g = timeResponse(network, reference);
+  const T = responseTime(network, reference);
   if (g === null || T === null) return null;
-  const grid = Array.from({ length: (last - first) * perDecade }, (_, i) => 10 ** (first + i / perDecade));
+  const grid = timeGrid(g);
   const values = grid.map((t) => g.at(t));
+  const deficits = grid.map((t) => g.deficit(t));
   const cross = (level: number) => (g.initial >= level ? 0 : firstCrossing(g, grid, values, level));
   const t10_s = cross(0.1);
   const t90_s = cross(0.9);
   const peak = peakOf(g, grid, values);
+  const settling = (band: number) =>
+    lastOutside(
+      grid,
+      values.map((value) => Math.abs(value - 1) - band),
+      (t) => Math.abs(g.at(t) - 1) - band,
+    );
   return {
     initial: g.initial,
     responseTime_s: T,
-    partialResponseTime_s: partial(g, grid),
+    partialResponseTime_s: partial(g, grid, deficits),
     t10_s,
     t90_s,
     riseTime_s: t90_s - t10_s,
     overshoot: peak.overshoot,
     peakTime_s: peak.time,
-    settlingTime_s: {
-      "1%": lastOutside(grid, (t) => Math.abs(g.at(t) - 1) - 0.01),
-      "0.1%": lastOutside(grid, (t) => Math.abs(g.at(t) - 1) - 0.001),
-    },
-    residualSettlingTime_s: lastOutside(grid, (t) => Math.abs(T - g.deficit(t)) - 0.02 * t),
+    settlingTime_s: { "1%": settling(0.01), "0.1%": settling(0.001) },
+    residualSettlingTime_s: lastOutside(
+      grid,
+      grid.map((t, i) => Math.abs(T - deficits[i]!) - 0.02 * t),
+      (t) => Math.abs(T - g.deficit(t)) - 0.02 * t,
+    ),
   };
 }
 
@@ -75,14 +79,14 @@ function crossing(f: (t: number) => number, from: number, to: number): number {
   return Math.exp((low + high) / 2);
 }
 
-function firstCrossing(g: StepResponse, grid: readonly number[], values: readonly number[], level: number): number {
+function firstCrossing(g: TimeResponse, grid: readonly number[], values: readonly number[], level: number): number {
   const i = values.findIndex((value) => value >= level);
   if (i <= 0) return 0;
   return crossing((t) => g.at(t) - level, grid[i - 1]!, grid[i]!);
 }
 
 /** Greatest value with its time, refined by golden section; t = 0+ counted; below 1e-6 it is none. */
-function peakOf(g: StepResponse, grid: readonly number[], values: readonly number[]) {
+function peakOf(g: TimeResponse, grid: readonly number[], values: readonly number[]) {
   let at = 0;
   values.forEach((value, i) => {
     if (value > values[at]!) at = i;
@@ -101,22 +105,8 @@ function peakOf(g: StepResponse, grid: readonly number[], values: readonly numbe
   return overshoot < 1e-6 ? { overshoot: 0, time: null } : { overshoot, time };
 }
 
-function maximum(f: (t: number) => number, from: number, to: number): number {
-  const golden = (Math.sqrt(5) - 1) / 2;
-  let low = Math.log(from);
-  let high = Math.log(to);
-  for (let step = 0; step < 40; step++) {
-    const left = high - golden * (high - low);
-    const right = low + golden * (high - low);
-    if (f(Math.exp(left)) > f(Math.exp(right))) high = right;
-    else low = left;
-  }
-  return Math.exp((low + high) / 2);
-}
-
 /** Greatest value of ∫₀ᵗ(1 − g); the total counts too. */
-function partial(g: StepResponse, grid: readonly number[]): number {
-  const deficits = grid.map((t) => g.deficit(t));
+function partial(g: TimeResponse, grid: readonly number[], deficits: readonly number[]): number {
   let at = 0;
   deficits.forEach((value, i) => {
     if (value > deficits[at]!) at = i;
@@ -126,11 +116,15 @@ function partial(g: StepResponse, grid: readonly number[]): number {
   return Math.max(deficits[at]!, g.deficit(maximum((t) => g.deficit(t), grid[at - 1]!, grid[at + 1]!)));
 }
 
-/** Last time at which `outside` is positive; 0 if never. */
-function lastOutside(grid: readonly number[], outside: (t: number) => number): number {
+/** Last time at which `outside` is positive; 0 if never, null if it still is at the end. */
+function lastOutside(
+  grid: readonly number[],
+  values: readonly number[],
+  outside: (t: number) => number,
+): number | null {
   for (let i = grid.length - 1; i >= 0; i--) {
-    if (outside(grid[i]!) <= 0) continue;
-    return i === grid.length - 1 ? grid[i]! : crossing(outside, grid[i]!, grid[i + 1]!);
+    if (values[i]! <= 0) continue;
+    return i === grid.length - 1 ? null : crossing(outside, grid[i]!, grid[i + 1]!);
   }
   return 0;
 }

@@ -1,38 +1,53 @@
-import { dcSolution } from "./dcSolution.ts";
-import type { LadderNetwork } from "./ladderNetwork.ts";
-import { tapTwoPort, transfer } from "./tapTwoPort.ts";
-
-/** Frequency response at each frequency: H·scale factor (1 at dc), and the input impedance at the electrode. */
-export interface Sweep {
-  readonly real: Float64Array;
-  readonly imaginary: Float64Array;
-  readonly impedanceReal_ohm: Float64Array;
-  readonly impedanceImaginary_ohm: Float64Array;
-}
+import { scaleFactorOf } from "./dcSolution.ts";
+import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
+import { transfer } from "./transfer.ts";
 
 export const angular = (frequencies_Hz: ArrayLike<number>): Float64Array =>
   Float64Array.from(frequencies_Hz, (f) => 2 * Math.PI * f);
 
-/** Exact complex solve of the ladder at each frequency, O(n) a frequency. null where dc does not pass. */
-export function sweep(network: LadderNetwork, frequencies_Hz: ArrayLike<number>): Sweep | null {
-  const dc = dcSolution(network, 1);
-  if (dc === null) return null;
+/** Frequency response at each frequency: H·scale factor (1 at dc), and the input impedance at the electrode. */
+export interface Sweep {
+  /** NaN-free; null where dc does not pass, so that there is no scale factor. */
+  readonly real: Float64Array | null;
+  readonly imaginary: Float64Array | null;
+  /** Of the divider alone; infinite where nothing flows. */
+  readonly impedanceReal_ohm: Float64Array;
+  readonly impedanceImaginary_ohm: Float64Array;
+}
+
+/** Exact complex solve of the ladder at each frequency, O(n) a frequency. */
+export function sweepAll(
+  network: LadderNetwork,
+  frequencies_Hz: ArrayLike<number>,
+  reference: Reference = "electrode",
+): Sweep {
+  const scaleFactor = scaleFactorOf(network, reference);
   const sim = angular(frequencies_Hz);
-  const sre = new Float64Array(sim.length);
-  const H = transfer(network, tapTwoPort(network, sre, sim), sre, sim);
+  const H = transfer(network, new Float64Array(sim.length), sim, reference);
   const impedanceReal_ohm = new Float64Array(sim.length);
   const impedanceImaginary_ohm = new Float64Array(sim.length);
   for (let k = 0; k < sim.length; k++) {
     const d = H.Yre[k]! ** 2 + H.Yim[k]! ** 2;
-    impedanceReal_ohm[k] = H.Yre[k]! / d;
-    impedanceImaginary_ohm[k] = -H.Yim[k]! / d;
+    impedanceReal_ohm[k] = d === 0 ? Number.POSITIVE_INFINITY : H.Yre[k]! / d;
+    impedanceImaginary_ohm[k] = d === 0 ? Number.POSITIVE_INFINITY : -H.Yim[k]! / d;
   }
   return {
-    real: H.re.map((value) => value * dc.scaleFactor),
-    imaginary: H.im.map((value) => value * dc.scaleFactor),
+    real: scaleFactor === null ? null : H.re.map((value) => value * scaleFactor),
+    imaginary: scaleFactor === null ? null : H.im.map((value) => value * scaleFactor),
     impedanceReal_ohm,
     impedanceImaginary_ohm,
   };
+}
+
+/** The same of a network that passes dc; null of one that does not. */
+export function sweep(
+  network: LadderNetwork,
+  frequencies_Hz: ArrayLike<number>,
+  reference: Reference = "electrode",
+): (Sweep & { readonly real: Float64Array; readonly imaginary: Float64Array }) | null {
+  const found = sweepAll(network, frequencies_Hz, reference);
+  const { real, imaginary } = found;
+  return real === null || imaginary === null ? null : { ...found, real, imaginary };
 }
 
 export const decibel = (re: number, im: number): number => 10 * Math.log10(re * re + im * im);
@@ -42,15 +57,15 @@ export function degrees(re: number, im: number): number {
   return phase <= -180 ? 180 : phase;
 }
 
-/** Lowest frequency where |H| crosses 1/√2 of dc, Hz; null where it never does between 1 µHz and 1 THz. */
-export function bandwidth(network: LadderNetwork): number | null {
-  const perDecade = 20;
-  const grid = Float64Array.from({ length: 18 * perDecade + 1 }, (_, i) => 10 ** (i / perDecade - 6));
-  const scan = sweep(network, grid);
+/** Lowest frequency where |H| crosses 1/√2 of dc, Hz; null where it never does between 1 µHz and 10 THz. */
+export function bandwidth(network: LadderNetwork, reference: Reference = "electrode"): number | null {
+  const perDecade = network.cable.line === null ? 20 : 120;
+  const grid = Float64Array.from({ length: 19 * perDecade + 1 }, (_, i) => 10 ** (i / perDecade - 6));
+  const scan = sweep(network, grid, reference);
   if (scan === null) return null;
   const excess = (re: number, im: number) => re * re + im * im - 0.5;
   const at = (f: number) => {
-    const one = sweep(network, [f])!;
+    const one = sweep(network, [f], reference)!;
     return excess(one.real[0]!, one.imaginary[0]!);
   };
   for (let i = 1; i < grid.length; i++) {

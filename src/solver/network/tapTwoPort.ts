@@ -1,5 +1,5 @@
 import type { LadderNetwork } from "./ladderNetwork.ts";
-import { lvShunts } from "./lvArm.ts";
+import { conductance } from "./lvSide.ts";
 
 /**
  * The string seen from its ends at complex frequencies s, inner nodes eliminated from the electrode to the tap by star-mesh
@@ -74,65 +74,5 @@ export function tapTwoPort(network: LadderNetwork, sre: Float64Array, sim: Float
 }
 
 export function conductances(network: LadderNetwork): Float64Array {
-  return network.resistance_ohm.map((R) => (R === Number.POSITIVE_INFINITY ? 0 : 1 / R));
-}
-
-/** Transfer electrode → output and input admittance at each s, with the LV arm on the tap. */
-export interface Transfer {
-  readonly re: Float64Array;
-  readonly im: Float64Array;
-  readonly Yre: Float64Array;
-  readonly Yim: Float64Array;
-}
-
-/** @param extraC capacitance added at the tap (a trial LV capacitance) */
-export function transfer(
-  network: LadderNetwork,
-  port: TapTwoPort,
-  sre: Float64Array,
-  sim: Float64Array,
-  extraC = 0,
-): Transfer {
-  const { count } = port;
-  const { tapG, tapC, Rs, farG, farC } = lvShunts(network);
-  const out = {
-    re: new Float64Array(count),
-    im: new Float64Array(count),
-    Yre: new Float64Array(count),
-    Yim: new Float64Array(count),
-  };
-  for (let k = 0; k < count; k++) {
-    const a = sre[k]!;
-    const b = sim[k]!;
-    let Lr = tapG + a * (tapC + extraC);
-    let Li = b * (tapC + extraC);
-    // Behind the series protector: v_out/v_tap = 1/(1 + Rs·Yf), and it loads the tap with Yf/(1 + Rs·Yf).
-    let tr = 1;
-    let ti = 0;
-    if (Rs > 0) {
-      const fr = farG + a * farC;
-      const fi = b * farC;
-      const dr = 1 + Rs * fr;
-      const di = Rs * fi;
-      const d2 = dr * dr + di * di;
-      tr = dr / d2;
-      ti = -di / d2;
-      Lr += fr * tr - fi * ti;
-      Li += fr * ti + fi * tr;
-    }
-    Lr += port.Ere[k]!;
-    Li += port.Eim[k]!;
-    const hr = port.Hre[k]!;
-    const hi = port.Him[k]!;
-    const Sr = Lr + hr;
-    const Si = Li + hi;
-    const S2 = Sr * Sr + Si * Si;
-    const vr = S2 === 0 ? 0 : (hr * Sr + hi * Si) / S2;
-    const vi = S2 === 0 ? 0 : (hi * Sr - hr * Si) / S2;
-    out.re[k] = vr * tr - vi * ti;
-    out.im[k] = vr * ti + vi * tr;
-    out.Yre[k] = port.Pre[k]! + vr * Lr - vi * Li;
-    out.Yim[k] = port.Pim[k]! + vr * Li + vi * Lr;
-  }
-  return out;
+  return network.resistance_ohm.map(conductance);
 }

@@ -3,8 +3,8 @@ import type { Judging } from "../checks/judging.ts";
 import { type LadderNetwork, withLvCapacitance } from "../network/ladderNetwork.ts";
 import { lvCapacitance } from "../network/lvCapacitance.ts";
 import { responseTime } from "../network/stepFigures.ts";
-import { StepResponse } from "../network/stepResponse.ts";
 import { decibel, sweep } from "../network/sweep.ts";
+import { timeResponse } from "../network/timeResponse.ts";
 import { responseRecords } from "./responseFormulas.ts";
 
 const points = 121;
@@ -26,7 +26,7 @@ export function matches(j: Judging, network: LadderNetwork, residual: number): v
     ["flattest", found.flattest_F],
   ] as const) {
     const trial = C === null ? null : withLvCapacitance(network, C);
-    const g = trial === null ? null : StepResponse.of(trial);
+    const g = trial === null ? null : timeResponse(trial);
     put(`match.${name}.edgeError`, g === null ? null : g.initial - 1);
     put(`match.${name}.bandDeviation_dB`, trial === null ? null : greatestDeviation(trial, band));
     put(`match.${name}.responseTime_s`, trial === null ? null : nearlyNought(responseTime(trial), unmatched));

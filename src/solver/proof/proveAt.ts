@@ -2,8 +2,8 @@ import { judging } from "../checks/judging.ts";
 import { networkOf } from "../checks/networkOf.ts";
 import { stringCapacitance } from "../checks/stringCapacitance.ts";
 import type { DividerDocument } from "../job/document.ts";
-import { StepResponse } from "../network/stepResponse.ts";
 import { decibel, degrees, sweep } from "../network/sweep.ts";
+import { timeResponse } from "../network/timeResponse.ts";
 
 /** The design's response at chosen frequencies (Hz) and times (s); the document must have passed `prove`. */
 export function proveAt(document: DividerDocument, frequencies_Hz: readonly number[], times_s: readonly number[]) {
@@ -11,7 +11,7 @@ export function proveAt(document: DividerDocument, frequencies_Hz: readonly numb
   j.sheet.given("/design/hvArm/strings", document.design!.hvArm.strings);
   const network = networkOf(j, stringCapacitance(j));
   const solved = sweep(network, frequencies_Hz)!;
-  const g = StepResponse.of(network)!;
+  const g = timeResponse(network)!;
   return {
     frequency: {
       frequency_Hz: frequencies_Hz,

@@ -6,8 +6,8 @@ import { wantedOf } from "../checks/wanted.ts";
 import { dcSolution } from "../network/dcSolution.ts";
 import type { LadderNetwork } from "../network/ladderNetwork.ts";
 import { stepFigures } from "../network/stepFigures.ts";
-import { StepResponse } from "../network/stepResponse.ts";
 import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
+import { timeResponse } from "../network/timeResponse.ts";
 import { formatQuantity, formatShare } from "../quantities/format.ts";
 import { greatestDeviation, matches } from "./matches.ts";
 import type { FrequencyResponse, StepResponse as StepResponseShape } from "./proof.ts";
@@ -162,7 +162,7 @@ function stepTraces(
   handover_s: number,
   overshoot: number,
 ): StepResponseShape {
-  const g = StepResponse.of(network)!;
+  const g = timeResponse(network)!;
   const trace = (from: number, to: number) => {
     const time_s = logarithmic(from, to, 151);
     return { time_s, value: time_s.map((t) => g.at(t)) };

@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { dcSolution } from "../../../src/solver/network/dcSolution.ts";
 import type { LadderNetwork } from "../../../src/solver/network/ladderNetwork.ts";
 import { stepFigures } from "../../../src/solver/network/stepFigures.ts";
-import { stepResponse } from "../../../src/solver/network/stepResponse.ts";
+import { stepResponse } from "../../../src/solver/network/timeResponse.ts";
 import { over, plus, type Rational, rational, times, toNumber } from "../../support/rational.ts";
 import { expectRelative } from "../../support/relative.ts";
 import { randomNetwork, seeded, sketch } from "./invented.ts";

@@ -1,4 +1,4 @@
-import type { LadderNetwork } from "../../../src/solver/network/ladderNetwork.ts";
+import { idealSource, type LadderNetwork } from "../../../src/solver/network/ladderNetwork.ts";
 
 export interface Sketch {
   n: number;
@@ -27,11 +27,12 @@ export function sketch(s: Sketch): LadderNetwork {
     toEarth_F: new Float64Array(s.n - 1).fill((s.Ce ?? 0) / s.n),
     toElectrode_F: new Float64Array(s.n - 1).fill((s.Ch ?? 0) / s.n),
     electrodeToTap_F: 0,
-    lv: shunt(s.R2, s.C2),
+    lv: { ...shunt(s.R2, s.C2), inductance_H: 0 },
     protector: shunt(),
-    cable: { capacitance_F: s.cable ?? 0 },
+    cable: { capacitance_F: s.cable ?? 0, line: null },
     instrument: { ...shunt(s.Rm, s.Cm), protector: shunt() },
     seriesProtector: { resistance_ohm: s.Rs ?? 0, at: s.at ?? "instrument" },
+    source: idealSource,
   };
 }
 
@@ -62,7 +63,7 @@ export function randomNetwork(random: () => number, n: number): LadderNetwork {
     capacitance_F: Float64Array.from({ length: n }, () => maybe(decades(-14, -9))),
     toEarth_F: Float64Array.from({ length: n - 1 }, () => maybe(decades(-15, -11))),
     toElectrode_F: Float64Array.from({ length: n - 1 }, () => maybe(decades(-15, -11))),
-    cable: { capacitance_F: maybe(decades(-11, -9)) },
+    cable: { capacitance_F: maybe(decades(-11, -9)), line: null },
     seriesProtector: {
       resistance_ohm: random() < 0.5 ? 0 : decades(2, 6),
       at: random() < 0.5 ? "divider" : "instrument",

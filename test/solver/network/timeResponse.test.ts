@@ -2,7 +2,7 @@ import { eigs, matrix } from "mathjs";
 import { describe, expect, it } from "vitest";
 import { lvCapacitance } from "../../../src/solver/network/lvCapacitance.ts";
 import { responseTime, stepFigures } from "../../../src/solver/network/stepFigures.ts";
-import { stepResponse } from "../../../src/solver/network/stepResponse.ts";
+import { stepResponse } from "../../../src/solver/network/timeResponse.ts";
 import { expectRelative } from "../../support/relative.ts";
 import { sketch } from "./invented.ts";
 
