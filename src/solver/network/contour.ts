@@ -35,12 +35,12 @@ export function decadeContour(end_s: number): Contour {
 
 /**
  * Wide contour for times from end/1.5 to end: s(θ) = (τ θ cot θ + j ν θ)/end (A. Talbot, J. Inst. Maths Applics 23 (1979), 97, from
- * memory), stretched so that it also encloses complex poles up to |Im s| = reach. Tried: 1e-9 up to reach·end = 300.
+ * memory), stretched so that it also encloses complex poles up to |Im s| = reach. Tried: 1e-9 up to reach·end = 3000.
  */
 export function wideContour(end_s: number, reach_per_s: number): Contour {
   const tau = 12;
   const wide = Math.max(8, 1.7 * reach_per_s * end_s) / (Math.PI / 2);
-  const count = Math.ceil(34 + 1.25 * reach_per_s * end_s);
+  const count = Math.ceil(34 + 1.6 * reach_per_s * end_s);
   return contour(count, Math.PI / count, (theta) => {
     const cot = Math.cos(theta) / Math.sin(theta);
     return {

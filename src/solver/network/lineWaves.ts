@@ -1,6 +1,6 @@
 import type { LadderNetwork, Line, Reference } from "./ladderNetwork.ts";
 import { conductance, lvSide } from "./lvSide.ts";
-import { tapTwoPort } from "./tapTwoPort.ts";
+import { type TapTwoPort, tapTwoPort } from "./tapTwoPort.ts";
 import { transferOf } from "./transfer.ts";
 
 /**
@@ -40,7 +40,7 @@ export function lineWaves(
 ): LineWaves {
   const port = tapTwoPort(network, sre, sim);
   const loaded = transferOf(matched(network, line), port, sre, sim, reference);
-  const back = lookingBack(network, line, reference, sre, sim);
+  const back = lookingBack(network, line, reference, port, sre, sim);
   const count = sre.length;
   const make = () => new Float64Array(count);
   const out = { launchRe: make(), launchIm: make(), roundRe: make(), roundIm: make() };
@@ -77,12 +77,12 @@ function lookingBack(
   network: LadderNetwork,
   line: Line,
   reference: Reference,
+  port: TapTwoPort,
   sre: Float64Array,
   sim: Float64Array,
 ): { readonly re: Float64Array; readonly im: Float64Array } {
   const series = ahead(network);
   const atDivider = network.seriesProtector.at === "divider";
-  const port = tapTwoPort(network, sre, sim);
   const alone = lvSide(
     {
       ...network,

@@ -37,7 +37,10 @@ export function stepFigures(network: LadderNetwork, reference: Reference = "elec
   if (g === null || T === null) return null;
   const grid = timeGrid(g);
   const values = grid.map((t) => g.at(t));
-  const deficits = grid.map((t) => g.deficit(t));
+  // Once the response has settled for good the integral is its total; the quadrature's own noise would grow with t.
+  const settled = grid[values.findLastIndex((value) => Math.abs(value - 1) > 1e-10) + 1] ?? Number.POSITIVE_INFINITY;
+  const lost = (t: number) => (t >= settled ? T : g.deficit(t));
+  const deficits = grid.map(lost);
   const cross = (level: number) => (g.initial >= level ? 0 : firstCrossing(g, grid, values, level));
   const t10_s = cross(0.1);
   const t90_s = cross(0.9);
@@ -51,18 +54,14 @@ export function stepFigures(network: LadderNetwork, reference: Reference = "elec
   return {
     initial: g.initial,
     responseTime_s: T,
-    partialResponseTime_s: partial(g, grid, deficits),
+    partialResponseTime_s: partial(lost, grid, deficits),
     t10_s,
     t90_s,
     riseTime_s: t90_s - t10_s,
     overshoot: peak.overshoot,
     peakTime_s: peak.time,
     settlingTime_s: { "1%": settling(0.01), "0.1%": settling(0.001) },
-    residualSettlingTime_s: lastOutside(
-      grid,
-      grid.map((t, i) => Math.abs(T - deficits[i]!) - 0.02 * t),
-      (t) => Math.abs(T - g.deficit(t)) - 0.02 * t,
-    ),
+    residualSettlingTime_s: residualSettling(T, lost, grid, deficits),
   };
 }
 
@@ -106,14 +105,29 @@ function peakOf(g: TimeResponse, grid: readonly number[], values: readonly numbe
 }
 
 /** Greatest value of ∫₀ᵗ(1 − g); the total counts too. */
-function partial(g: TimeResponse, grid: readonly number[], deficits: readonly number[]): number {
+function partial(lost: (t: number) => number, grid: readonly number[], deficits: readonly number[]): number {
   let at = 0;
   deficits.forEach((value, i) => {
     if (value > deficits[at]!) at = i;
   });
   if (deficits[at]! <= 0) return 0;
   if (at === 0 || at === grid.length - 1) return deficits[at]!;
-  return Math.max(deficits[at]!, g.deficit(maximum((t) => g.deficit(t), grid[at - 1]!, grid[at + 1]!)));
+  return Math.max(deficits[at]!, lost(maximum(lost, grid[at - 1]!, grid[at + 1]!)));
+}
+
+/** Earliest time after which |T − ∫₀ᵗ(1 − g)| < 0.02 t; before the first time looked at the integral counts for nothing. */
+function residualSettling(
+  T: number,
+  lost: (t: number) => number,
+  grid: readonly number[],
+  deficits: readonly number[],
+): number | null {
+  const found = lastOutside(
+    grid,
+    grid.map((t, i) => Math.abs(T - deficits[i]!) - 0.02 * t),
+    (t) => Math.abs(T - lost(t)) - 0.02 * t,
+  );
+  return found === 0 ? Math.abs(T) / 0.02 : found;
 }
 
 /** Last time at which `outside` is positive; 0 if never, null if it still is at the end. */

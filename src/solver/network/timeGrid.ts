@@ -13,22 +13,35 @@ const mostPoints = 60000;
 export function timeGrid(g: TimeResponse): number[] {
   const times = Array.from({ length: (last - first) * perDecade + 1 }, (_, i) => 10 ** (first + i / perDecade));
   if (g.delay_s > 0) {
-    const arrivals = 12;
-    const around = times.filter((t) => t < 2 * g.delay_s);
-    for (let k = 0; k < arrivals; k++) {
-      const at = (2 * k + 1) * g.delay_s;
-      times.push(at, ...around.map((t) => at + t));
+    times.push(...lineTimes(g, times));
+  } else {
+    for (const p of g.ringing) {
+      const step = (2 * Math.PI) / p.im / perCycle;
+      const end = Math.min(30 / -p.re, step * mostPoints, 10 ** last);
+      for (let t = step; t < end; t += step) times.push(t);
     }
-  }
-  for (const p of g.ringing) {
-    // A mode far faster than the line's round trip is seen at its arrivals.
-    if (g.delay_s > 0 && p.im * g.delay_s > 20) continue;
-    const step = (2 * Math.PI) / p.im / perCycle;
-    const end = Math.min(30 / -p.re, step * mostPoints, 10 ** last);
-    for (let t = g.delay_s + step; t < end; t += step) times.push(t);
   }
   times.sort((a, b) => a - b);
   return times.filter((t, i) => i === 0 || t > times[i - 1]!);
+}
+
+/** After the first arrivals in detail, sixteen a delay for sixty delays, then one period of the slowest mode, four delays, now and then. */
+function lineTimes({ delay_s: T, ringing }: TimeResponse, plain: readonly number[]): number[] {
+  const times: number[] = [];
+  const soon = plain.filter((t) => t < 2 * T);
+  for (let k = 0; k < 12; k++) {
+    const at = (2 * k + 1) * T;
+    times.push(at, ...soon.filter((_, i) => k < 2 || i % 4 === 0).map((t) => at + t));
+  }
+  for (let i = 1; i < 16 * 60; i++) times.push(T * (1 + i / 16));
+  // The slow modes alone are strong enough to matter so late.
+  const strong = ringing.slice(0, 40);
+  const slowest = strong.reduce((least, p) => Math.min(least, -p.re), Number.POSITIVE_INFINITY);
+  const period = strong.reduce((longest, p) => Math.max(longest, (2 * Math.PI) / p.im), 4 * T);
+  for (const from of plain.filter((t, i) => t > 60 * T && t * slowest < 25 && i % 4 === 0)) {
+    for (let i = 0; i < 24; i++) times.push(from + (i / 24) * period);
+  }
+  return times;
 }
 
 /** The time at which f is greatest, refined between the points of the grid. */

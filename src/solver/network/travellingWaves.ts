@@ -1,13 +1,15 @@
 import { type Complex, modulus } from "../quantities/complex.ts";
-import { type Contour, invert, weighted, wideContour } from "./contour.ts";
+import { type Contour, type OnContour, weighted, wideContour } from "./contour.ts";
+import { over } from "./decade.ts";
+import { gaussMean } from "./gaussMean.ts";
 import type { LadderNetwork, Line, Reference } from "./ladderNetwork.ts";
 import { lineModes } from "./lineModes.ts";
 import { lineWaves, matched } from "./lineWaves.ts";
-import { gaussMean, LumpedResponse, over } from "./lumpedResponse.ts";
+import { LumpedResponse } from "./lumpedResponse.ts";
 import { ringingPoles } from "./ringing.ts";
 import type { TimeResponse } from "./timeResponse.ts";
 
-/** Delays after which the line is told by its modes; until then by its waves. */
+/** Delays after which the line is told by its modes where they die away; until then by its waves. */
 const wavesFor = 24;
 
 /**
@@ -25,8 +27,9 @@ export class LineResponse implements TimeResponse {
   constructor(network: LadderNetwork, line: Line, reference: Reference, scaleFactor: number) {
     this.delay_s = line.delay_s;
     this.waves = new Waves(network, line, reference, scaleFactor);
-    this.handover_s = wavesFor * line.delay_s;
-    this.ringing = lineModes(network, line, reference, scaleFactor, this.handover_s);
+    const modes = lineModes(network, line, reference, scaleFactor, wavesFor);
+    this.ringing = modes.poles;
+    this.handover_s = modes.from_s;
     this.later = new LumpedResponse(network, reference, scaleFactor, this.ringing, this.handover_s);
   }
 
@@ -71,11 +74,19 @@ interface Stretch {
   /** ln|round| and its angle. */
   readonly size: Float64Array;
   readonly angle: Float64Array;
+  /** Launch times an input's transform and the contour's weights, for the inputs asked again and again. */
+  readonly launched: Map<Input, OnContour>;
 }
 
+/** The transform of an input. */
+type Input = (sre: number, sim: number) => readonly [re: number, im: number];
+
 const stretch = 1.5;
+const mostLevels = 9;
 /** Powers of e by which the integrand may outgrow the answer before the contour is widened. */
 const growth = 10;
+/** How far round^k may turn or change, in radians and powers of e, from one node to the next. */
+const greatestTurn = 0.6;
 
 class Waves {
   private readonly stretches = new Map<number, Stretch>();
@@ -109,31 +120,22 @@ class Waves {
       const span = until - since;
       if (span === 0) return 0;
       const share = span / (b - a);
-      if (span < 1e-3 * until) return share * gaussMean((x) => this.term(k, x, 1), since, until);
+      if (span < 0.05 * until) return share * gaussMean((x) => this.term(k, x, 1), since, until);
       return (this.term(k, until, 2) - this.term(k, since, 2)) / (b - a);
     });
   }
 
   exponential(alpha: number, t: number): number {
+    const input: Input = (sre, sim) => over(1, 0, sre + alpha, sim);
     return this.arrived(t, (k, since) =>
-      since < least_s
-        ? this.firstRe * this.roundRe ** k
-        : this.inverse(k, since, (sre, sim) => over(1, 0, sre + alpha, sim), 0),
+      since < least_s ? this.firstRe * this.roundRe ** k : this.inverse(k, since, input, 0),
     );
   }
 
   /** Response to sin(ωt) from t = 0, whole. */
   sine(omega: number, t: number): number {
-    return this.arrived(t, (k, since) =>
-      since < least_s
-        ? 0
-        : this.inverse(
-            k,
-            since,
-            (sre, sim) => over(omega, 0, sre * sre - sim * sim + omega * omega, 2 * sre * sim),
-            1.3 * omega,
-          ),
-    );
+    const input: Input = (sre, sim) => over(omega, 0, sre * sre - sim * sim + omega * omega, 2 * sre * sim);
+    return this.arrived(t, (k, since) => (since < least_s ? 0 : this.inverse(k, since, input, 1.3 * omega)));
   }
 
   private arrived(t: number, wave: (k: number, since: number) => number): number {
@@ -147,28 +149,13 @@ class Waves {
     return this.inverse(k, since, power === 1 ? reciprocal : squaredReciprocal, 0);
   }
 
-  private inverse(
-    k: number,
-    since: number,
-    input: (sre: number, sim: number) => readonly [number, number],
-    reach_per_s: number,
-  ): number {
+  private inverse(k: number, since: number, input: Input, reach_per_s: number): number {
     const place = Math.ceil(Math.log(since) / Math.log(stretch));
     const end = stretch ** place * 1.0000001;
     for (let level = 0; ; level++) {
       const reach = Math.max(this.ringing_per_s, reach_per_s, (8 * 2 ** level) / end);
       const found = this.stretch(place, end, reach);
-      if (level < 9 && overgrown(found, k, since)) continue;
-      const F = weighted(found.contour, (i) => {
-        const size = Math.exp(k * found.size[i]!);
-        const rr = size * Math.cos(k * found.angle[i]!);
-        const ri = size * Math.sin(k * found.angle[i]!);
-        const [xr, xi] = input(found.contour.sre[i]!, found.contour.sim[i]!);
-        const ar = found.launchRe[i]! * rr - found.launchIm[i]! * ri;
-        const ai = found.launchRe[i]! * ri + found.launchIm[i]! * rr;
-        return [ar * xr - ai * xi, ar * xi + ai * xr];
-      });
-      return invert(found.contour, F, since);
+      if (level === mostLevels || !overgrown(found, k, since)) return wave(found, launched(found, input), k, since);
     }
   }
 
@@ -184,6 +171,7 @@ class Waves {
         launchIm: waves.launchIm.map((each) => each * this.scaleFactor),
         size: waves.roundRe.map((re, i) => Math.log(Math.hypot(re, waves.roundIm[i]!))),
         angle: waves.roundRe.map((re, i) => Math.atan2(waves.roundIm[i]!, re)),
+        launched: new Map(),
       };
       this.stretches.set(key, found);
     }
@@ -194,15 +182,44 @@ class Waves {
 /** Below this the wave has just arrived: its value is that of the instant. */
 const least_s = 1e-17;
 
-/** Whether round^k outgrows the fall of exp(s t) somewhere left of the imaginary axis. */
-function overgrown({ contour, size }: Stretch, k: number, t: number): boolean {
+/**
+ * Whether round^k is too much for the contour: it outgrows the fall of exp(s t) somewhere left of the imaginary axis, or turns too far
+ * from node to node where the integrand still counts.
+ */
+function overgrown({ contour, size, angle }: Stretch, k: number, t: number): boolean {
   for (let i = 0; i < size.length; i++) {
-    if (contour.sre[i]! < 0 && k * size[i]! + contour.sre[i]! * t > growth) return true;
+    const height = k * size[i]! + contour.sre[i]! * t;
+    if (contour.sre[i]! < 0 && height > growth) return true;
+    if (i === 0 || height < -25) continue;
+    const turned = angle[i]! - angle[i - 1]!;
+    const turn = turned - 2 * Math.PI * Math.round(turned / (2 * Math.PI));
+    if (k * Math.hypot(turn, size[i]! - size[i - 1]!) > greatestTurn) return true;
   }
   return false;
 }
 
-const reciprocal = (sre: number, sim: number) => over(1, 0, sre, sim);
-function squaredReciprocal(sre: number, sim: number): readonly [number, number] {
-  return over(1, 0, sre * sre - sim * sim, 2 * sre * sim);
+const reciprocal: Input = (sre, sim) => over(1, 0, sre, sim);
+const squaredReciprocal: Input = (sre, sim) => over(1, 0, sre * sre - sim * sim, 2 * sre * sim);
+
+function launched(at: Stretch, input: Input): OnContour {
+  const held = at.launched.get(input);
+  if (held !== undefined) return held;
+  const { contour, launchRe, launchIm } = at;
+  const made = weighted(contour, (i) => {
+    const [xr, xi] = input(contour.sre[i]!, contour.sim[i]!);
+    return [launchRe[i]! * xr - launchIm[i]! * xi, launchRe[i]! * xi + launchIm[i]! * xr];
+  });
+  if (input === reciprocal || input === squaredReciprocal) at.launched.set(input, made);
+  return made;
+}
+
+/** The k-th wave at a time since its arrival: Im Σ F round^k exp(s t). */
+function wave({ contour, size, angle }: Stretch, { re, im }: OnContour, k: number, t: number): number {
+  let sum = 0;
+  for (let i = 0; i < re.length; i++) {
+    const e = Math.exp(k * size[i]! + contour.sre[i]! * t);
+    const phase = k * angle[i]! + contour.sim[i]! * t;
+    sum += e * (re[i]! * Math.sin(phase) + im[i]! * Math.cos(phase));
+  }
+  return sum;
 }
