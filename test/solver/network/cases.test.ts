@@ -1,13 +1,24 @@
 /**
  * Invented networks, each with the answer of an independent program, compared to the accuracy the raw network promises.
  *
- * How the answers were computed: a general nodal analysis in multi-precision (ball) arithmetic that shares nothing with
- * the solver. It eliminates the whole nodal matrix, knows no ladder, and was written from the description of the input
- * alone. dc, faults and limits are exact fractions. Frequency: elimination at 300 bits. Time, lumped networks: the
- * transfer function as an exact fraction of polynomials, its certified roots, the modal sum; checked by a second route,
- * the fixed Talbot inversion of the nodal solve with two contours that agree. Time, lines: see the method of the case.
+ * How the answers were computed: a general nodal analysis in multi-precision ball arithmetic, written from the description
+ * of the input alone; it eliminates the whole nodal matrix and knows no ladder. dc, faults, limits: exact fractions.
+ * Frequency: elimination at 300 bits or more. Time, lumped: the transfer function as an exact fraction of polynomials,
+ * its certified roots, the modal sum. Time, lines: travelling waves, each arrival inverted at its own shifted time.
  *
- * What agreed with what is said at the end of this file, with the closed forms that the reference was held against.
+ * What agreed with what:
+ * - every frequency and input impedance up to 60 elements with a second, separately written dense analysis with branch
+ *   currents (40 digits): 2e-16 relative;
+ * - modal sums with the fixed Talbot inversion of the nodal solve: 1e-15 of full scale, all waveforms, but for six times
+ *   more than a hundred swings after the edge, which the modal sum alone gives; square waves with direct sums: 1e-11;
+ * - 400 elements: Talbot inversion with two contours of unlike size, 5e-23;
+ * - lines: two contours for every arrival, 1e-10 with inductance in the LV arm and 1e-24 without; the sum of arrivals
+ *   with the inversion of the chain matrix as a whole, 3e-15 where the line has rung out;
+ * - figures with brute force over dense samples: 360 and 70 figures, to the spacing of the samples;
+ * - closed forms: first order; the uniform R-C line (omega3dB R C -> 9.18056, response time (1 - 1/N^2)/6); second-order
+ *   steps of damping 0.4 to 0.8 (overshoot 25.38 ... 1.516 %, response time 2 zeta, residual settling 3.937 ... 2.646);
+ *   a matched resistive line as a pure delay; thermal runaway at a quarter of the feedback.
+ * Where the description leaves something open, the case says how it was read.
  */
 import { readdirSync, readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
@@ -96,7 +107,8 @@ const figures: Record<string, number> = {
   t90_s: 1e-4,
   riseTime_s: 1e-4,
   settlingTime_s: 1e-3,
-  peakTime_s: 1e-3, // no accuracy is promised for it; a flat top is found to the square root of what its height is
+  residualSettlingTime_s: 1e-3,
+  peakTime_s: 1e-2, // no accuracy is promised for it; cases with a top flatter than 2e-6 within 1 % leave it out
 };
 
 function stepAllowance(path: readonly string[], one: Case): Allowance {
@@ -106,8 +118,6 @@ function stepAllowance(path: readonly string[], one: Case): Allowance {
   if (key === "overshoot") return within(1e-5, 1e-5);
   if (key === "responseTime_s" || key === "partialResponseTime_s")
     return within(1e-6, 1e-9 * (one.slowestTimeConstant_s ?? 0));
-  // The integral's own accuracy over the 2 % of the time that it is held against.
-  if (key === "residualSettlingTime_s") return within(1e-3, (1e-9 * (one.slowestTimeConstant_s ?? 0)) / 0.02);
   return within(figures[key]!, 1e-20);
 }
 
