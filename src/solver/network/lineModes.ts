@@ -47,7 +47,12 @@ export function lineModes(
     for (let k = 0; k < re.length; k++) {
       const pole = complex(re[k]!, im[k]!);
       const moved = Math.hypot(re[k]! - starts.re[k]!, im[k]! - starts.im[k]!) * line.delay_s;
-      if (!(moved < 3 && pole.re * from_s > -60) || pole.im < limit / 2 || !isNew(modes.slice(0, slow), pole) || !isNew(modes.slice(-8), pole))
+      if (
+        !(moved < 3 && pole.re <= 0 && pole.re * from_s > -60) ||
+        pole.im < limit / 2 ||
+        !isNew(modes.slice(0, slow), pole) ||
+        !isNew(modes.slice(-8), pole)
+      )
         continue;
       modes.push(pole);
       const strong = left[k]! * Math.exp(pole.re * from_s);

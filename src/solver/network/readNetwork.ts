@@ -159,7 +159,7 @@ const shunt = (given: Keyed, where: string): Shunt => ({
   capacitance_F: capacitance(given.capacitance_F, `${where}/capacitance_F`),
 });
 
-const capacitance = (value: unknown, where: string): number => optional(value, where, 0, 0, 1);
+const capacitance = (value: unknown, where: string): number => optional(value, where, 0, 0, 1e3);
 /** A series resistance or inductance: missing or zero is a wire. */
 const resistance = (value: unknown, where: string): number => optional(value, where, 0, 0, 1e15);
 const inductance = (value: unknown, where: string): number => optional(value, where, 0, 0, 1e3);

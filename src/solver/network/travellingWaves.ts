@@ -169,7 +169,8 @@ class Waves {
         contour,
         launchRe: waves.launchRe.map((each) => each * this.scaleFactor),
         launchIm: waves.launchIm.map((each) => each * this.scaleFactor),
-        size: waves.roundRe.map((re, i) => Math.log(Math.hypot(re, waves.roundIm[i]!))),
+        // Nothing comes back from a line matched at an end; a logarithm needs something.
+        size: waves.roundRe.map((re, i) => Math.log(Math.max(1e-300, Math.hypot(re, waves.roundIm[i]!)))),
         angle: waves.roundRe.map((re, i) => Math.atan2(waves.roundIm[i]!, re)),
         launched: new Map(),
       };
