@@ -171,6 +171,12 @@ function differences(expected: Json, got: unknown, path: readonly string[], one:
   }
   if (typeof expected !== "object" || expected === null) return got === expected ? [] : say();
   if (typeof got !== "object" || got === null) return say();
+  if (path[0] === "faults" && path.length === 1 && Array.isArray(expected) && Array.isArray(got))
+    return expected.flatMap((fault) => {
+      const { kind, element } = fault as Table;
+      const same = (got as Table[]).find((each) => each.kind === kind && each.element === element);
+      return differences(fault, same, ["faults", `${kind} ${element}`], one);
+    });
   if (Array.isArray(expected) && (!Array.isArray(got) || got.length !== expected.length))
     return say(", another length");
   return Object.entries(expected).flatMap(([key, value]) =>
