@@ -9,7 +9,7 @@
  * What agreed with what:
  * - every frequency and input impedance up to 60 elements with a second, separately written dense analysis with branch
  *   currents (40 digits): 2e-16 relative;
- * - modal sums with the fixed Talbot inversion of the nodal solve: 1e-15 of full scale, all waveforms, but for six times
+ * - modal sums with the fixed Talbot inversion of the nodal solve: 1e-15 of full scale, all waveforms, but for eight moments
  *   more than a hundred swings after the edge, which the modal sum alone gives; square waves with direct sums: 1e-11;
  * - 400 elements: Talbot inversion with two contours of unlike size, 5e-23;
  * - lines: two contours for every arrival, 1e-10 with inductance in the LV arm and 1e-24 without; the sum of arrivals
