@@ -1,4 +1,5 @@
 import type { LadderNetwork } from "../../src/solver/network/ladderNetwork.ts";
+import { nodeVoltages } from "../../src/solver/network/nodeVoltages.ts";
 import { stepFigures } from "../../src/solver/network/stepFigures.ts";
 import { sweep } from "../../src/solver/network/sweep.ts";
 import { stepResponse } from "../../src/solver/network/timeResponse.ts";
@@ -122,6 +123,27 @@ export const networkBenchmarks: readonly Benchmark[] = [
     referenceName: "dense complex elimination",
     reference: () => denseSweep(n60),
     bar: 0.05,
+  },
+  {
+    name: "all nodes, 400 frequencies × 60 elements",
+    run: () => nodeVoltages(n60, frequencies),
+    referenceName: "dense complex elimination, output alone",
+    reference: () => denseSweep(n60),
+    bar: 0.05,
+  },
+  {
+    name: "all nodes, 400 frequencies × 400 elements",
+    run: () => nodeVoltages(n400, frequencies),
+    referenceName: `${plain}, output alone`,
+    reference: () => plainSweep(n400),
+    bar: 0.7,
+  },
+  {
+    name: "all nodes, 400 frequencies × 4000 elements",
+    run: () => nodeVoltages(n4000, frequencies),
+    referenceName: "the same × 400 elements: linear is 10",
+    reference: () => nodeVoltages(n400, frequencies),
+    bar: 12,
   },
   {
     name: "step, 1000 times × 60 elements",
