@@ -6,6 +6,7 @@ import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
 import { lvCapacitance } from "./lvCapacitance.ts";
 import type { DcAnswer, NetworkAnswer, NetworkAsk, Numbers, StepAnswer } from "./networkForm.ts";
 import { readNetwork } from "./readNetwork.ts";
+import { singleFaults } from "./singleFaults.ts";
 import { stepFigures } from "./stepFigures.ts";
 import { bandwidth, decibel, degrees, sweepAll } from "./sweep.ts";
 import { greatest } from "./timeGrid.ts";
@@ -28,6 +29,7 @@ export function solveNetwork(form: unknown): Result<NetworkAnswer> {
     ...waveformAnswers(network, ask),
     ...(ask.band_Hz === null ? {} : { compensation: compensationAnswer(network, ask.band_Hz, reference) }),
     ...(ask.grading_first_F === null ? {} : { grading: { capacitance_F: grading(network, ask.grading_first_F) } }),
+    ...(ask.faults ? { faults: singleFaults(network, voltage_V) } : {}),
   });
 }
 
