@@ -89,6 +89,7 @@ describe("faults, tolerance, heat and discharge", () => {
   it("answer under the name they were asked by", async () => {
     const asked = {
       faults: true,
+      tolerance: { element: [0.01, 0.02], lvArm: 0.01, samples: 10 },
     };
     const { code, out } = await solve(form({ ask: asked }));
     expect(code).toBe(0);

@@ -11,6 +11,7 @@ import { stepFigures } from "./stepFigures.ts";
 import { bandwidth, decibel, degrees, sweepAll } from "./sweep.ts";
 import { greatest } from "./timeGrid.ts";
 import { type TimeResponse, timeResponse } from "./timeResponse.ts";
+import { toleranceSpread } from "./toleranceSpread.ts";
 import { doubleExponential, halfSine, ramp, samples, square } from "./waveforms.ts";
 
 /** The raw network, as JSON in and JSON out. Refused with one message where it cannot be used. Pure. */
@@ -30,6 +31,7 @@ export function solveNetwork(form: unknown): Result<NetworkAnswer> {
     ...(ask.band_Hz === null ? {} : { compensation: compensationAnswer(network, ask.band_Hz, reference) }),
     ...(ask.grading_first_F === null ? {} : { grading: { capacitance_F: grading(network, ask.grading_first_F) } }),
     ...(ask.faults ? { faults: singleFaults(network, voltage_V) } : {}),
+    ...(ask.tolerance === null ? {} : { tolerance: toleranceSpread(network, ask.tolerance) }),
   });
 }
 
