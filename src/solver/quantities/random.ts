@@ -50,8 +50,9 @@ export class MersenneTwister {
   private twist(): void {
     const { state } = this;
     for (let i = 0; i < size; i++) {
-      const y = (state[i]! & 0x80000000) | (state[(i + 1) % size]! & 0x7fffffff);
-      state[i] = state[(i + middle) % size]! ^ (y >>> 1) ^ (y & 1 ? 0x9908b0df : 0);
+      const y = (state[i]! & 0x80000000) | (state[i + 1 < size ? i + 1 : 0]! & 0x7fffffff);
+      const far = i + middle < size ? i + middle : i + middle - size;
+      state[i] = state[far]! ^ (y >>> 1) ^ (-(y & 1) & 0x9908b0df);
     }
     this.at = 0;
   }
