@@ -74,8 +74,8 @@ describe("a form that cannot be used", () => {
     expect(out).toBe("");
     expect(said).toMatch(message);
   });
-  it.each(["doubleExponential", "halfSine", "square", "samples", "faults", "tolerance", "heat", "discharge"])(
-    "%s is either computed or refused by name",
+  it.each(["doubleExponential", "halfSine", "square", "samples", "faults", "discharge"])(
+    "%s without what it needs is refused by name",
     async (ask) => {
       const { code, said, out } = await solve(form({ ask: { [ask]: {} } }));
       expect(code).toBe(2);
@@ -83,6 +83,30 @@ describe("a form that cannot be used", () => {
       expect(said).toContain(`/ask/${ask}`);
     },
   );
+});
+
+describe("faults, tolerance, heat and discharge", () => {
+  it("answer under the name they were asked by", async () => {
+    const asked = {
+      faults: true,
+      tolerance: { element: [0.01, 0.02], lvArm: 0.01, samples: 10 },
+      heat: { temperatureCoefficient_per_K: 1e-4, thermalResistance_K_per_W: [50, 60] },
+    };
+    const { code, out } = await solve(form({ ask: asked }));
+    expect(code).toBe(0);
+    const answer = JSON.parse(out);
+    expect(Object.keys(answer)).toEqual(expect.arrayContaining(Object.keys(asked)));
+    expect(answer.faults.map((row: { kind: string; element: number }) => `${row.kind} ${row.element}`)).toEqual([
+      "normal 0",
+      "elementOpen 1",
+      "elementOpen 2",
+      "elementShort 1",
+      "elementShort 2",
+      "lvOpen 0",
+      "lvShort 0",
+      "instrumentOpen 0",
+    ]);
+  });
 });
 
 describe("what does not exist is null", () => {

@@ -27,6 +27,10 @@ export interface NetworkAnswer {
     readonly flattest_dB: number | null;
   };
   readonly grading?: { readonly capacitance_F: Numbers };
+  readonly faults?: readonly FaultAnswer[];
+  readonly tolerance?: ToleranceAnswer;
+  readonly heat?: HeatAnswer;
+  readonly discharge?: DischargeAnswer;
 }
 
 export type Numbers = readonly (number | null)[];
@@ -56,6 +60,51 @@ export interface StepAnswer {
   readonly peakTime_s: number | null;
   readonly settlingTime_s: { readonly "1%": number | null; readonly "0.1%": number | null };
   readonly residualSettlingTime_s: number | null;
+}
+
+export interface FaultAnswer {
+  readonly kind: "normal" | "elementOpen" | "elementShort" | "lvOpen" | "lvShort" | "instrumentOpen";
+  /** 1 … n from the tap; 0: none. */
+  readonly element: number;
+  readonly output_V: number | null;
+  /** A magnitude. */
+  readonly greatestElementVoltage_V: number | null;
+  readonly outputRatio: number | null;
+  readonly greatestElementRatio: number | null;
+  readonly fastOutput_V: number;
+}
+
+export interface ToleranceAnswer {
+  readonly sensitivity: {
+    readonly element: Numbers;
+    readonly lvArm: number | null;
+    readonly instrument: number | null;
+  };
+  readonly standardUncertainty: { readonly rectangular: number | null; readonly normal: number | null };
+  readonly worst: { readonly least: number | null; readonly greatest: number | null };
+  readonly sampled?: {
+    readonly mean: number | null;
+    readonly standardDeviation: number | null;
+    readonly q025: number | null;
+    readonly q500: number | null;
+    readonly q975: number | null;
+  };
+}
+
+export interface HeatAnswer {
+  readonly scaleFactor: number | null;
+  readonly relativeShift: number | null;
+  readonly resistance_ohm: Numbers;
+  readonly lvResistance_ohm: number | null;
+  readonly elementVoltage_V: Numbers;
+  readonly elementPower_W: Numbers;
+  readonly temperatureRise_K: Numbers;
+}
+
+export interface DischargeAnswer {
+  readonly time_s: number | null;
+  readonly energy_J: number | null;
+  readonly slowestTimeConstant_s: number | null;
 }
 
 /** What was asked of a network, read and checked; null: not asked. */

@@ -18,7 +18,7 @@ const keys = [
   "heat",
   "discharge",
 ];
-const later = ["faults", "tolerance", "heat", "discharge"];
+const later = ["discharge"];
 
 const greatestTime_s = 1e6;
 const greatestFrequency_Hz = 1e13;

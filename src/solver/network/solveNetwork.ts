@@ -1,15 +1,19 @@
 import { ok, type Result } from "../quantities/result.ts";
-import { dcSolution, earthed } from "./dcSolution.ts";
+import { blockedDc } from "./blockedDc.ts";
+import { dcSolution } from "./dcSolution.ts";
 import { elementVoltages } from "./elementVoltages.ts";
 import { grading } from "./grading.ts";
 import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
 import { lvCapacitance } from "./lvCapacitance.ts";
 import type { DcAnswer, NetworkAnswer, NetworkAsk, Numbers, StepAnswer } from "./networkForm.ts";
 import { readNetwork } from "./readNetwork.ts";
+import { selfHeating } from "./selfHeating.ts";
+import { singleFaults } from "./singleFaults.ts";
 import { stepFigures } from "./stepFigures.ts";
 import { bandwidth, decibel, degrees, sweepAll } from "./sweep.ts";
 import { greatest } from "./timeGrid.ts";
 import { type TimeResponse, timeResponse } from "./timeResponse.ts";
+import { toleranceSpread } from "./toleranceSpread.ts";
 import { doubleExponential, halfSine, ramp, samples, square } from "./waveforms.ts";
 
 /** The raw network, as JSON in and JSON out. Refused with one message where it cannot be used. Pure. */
@@ -28,6 +32,9 @@ export function solveNetwork(form: unknown): Result<NetworkAnswer> {
     ...waveformAnswers(network, ask),
     ...(ask.band_Hz === null ? {} : { compensation: compensationAnswer(network, ask.band_Hz, reference) }),
     ...(ask.grading_first_F === null ? {} : { grading: { capacitance_F: grading(network, ask.grading_first_F) } }),
+    ...(ask.faults ? { faults: singleFaults(network, voltage_V) } : {}),
+    ...(ask.tolerance === null ? {} : { tolerance: toleranceSpread(network, ask.tolerance) }),
+    ...(ask.heat === null ? {} : { heat: selfHeating(network, voltage_V, ask.heat) }),
   });
 }
 
@@ -37,28 +44,6 @@ function dcAnswer(network: LadderNetwork, voltage: number): DcAnswer {
   const dc = dcSolution(network, voltage);
   if (dc === null) return blockedDc(network, voltage);
   return { ...dc, inputResistance_ohm: finite(dc.inputResistance_ohm) };
-}
-
-/**
- * An element without resistance blocks dc: no current, so nothing stands across the others; what shares the voltage among several
- * such elements, or holds the tap when nothing leads from it to earth, does not exist.
- */
-function blockedDc(network: LadderNetwork, voltage: number): DcAnswer {
-  const blocks = Array.from(network.resistance_ohm, (R) => !Number.isFinite(R));
-  const held = earthed(network) ? 0 : null;
-  const alone = held !== null && blocks.filter(Boolean).length === 1;
-  return {
-    scaleFactor: null,
-    scaleFactorFromSource: null,
-    inputResistance_ohm: null,
-    electrodeVoltage_V: voltage,
-    tapVoltage_V: held,
-    outputVoltage_V: held,
-    current_A: 0,
-    elementVoltage_V: blocks.map((each) => (each ? (alone ? voltage : null) : 0)),
-    elementPower_W: blocks.map(() => 0),
-    lvPower_W: 0,
-  };
 }
 
 function frequencyAnswer(network: LadderNetwork, frequencies: readonly number[], reference: Reference) {
