@@ -29,7 +29,8 @@ export interface NetworkAnswer {
   readonly grading?: { readonly capacitance_F: Numbers };
   readonly faults?: readonly FaultAnswer[];
   readonly tolerance?: ToleranceAnswer;
-  readonly heat?: HeatAnswer;
+  /** null: thermal runaway. */
+  readonly heat?: HeatAnswer | null;
   readonly discharge?: DischargeAnswer;
 }
 

@@ -8,16 +8,16 @@ import type { HeatAnswer, HeatAsk } from "./networkForm.ts";
 /**
  * Steady state with every resistance at its own temperature and voltage, R = R0 (1 + α (ΔT_ambient + P Rth) + k_v |V|), the LV resistor
  * too, the ideal source held behind its resistance. It is the state reached while the source rises slowly from zero; where that branch
- * turns back before the full voltage (thermal runaway), or where α and k_v leave no resistance above zero, all is null.
+ * turns back before the full voltage (thermal runaway), or where α and k_v leave no resistance above zero, there is none: null.
  * A string that blocks dc stays cold: resistances at ambient temperature, no scale factor.
  */
-export function selfHeating(network: LadderNetwork, voltage_V: number, ask: HeatAsk): HeatAnswer {
+export function selfHeating(network: LadderNetwork, voltage_V: number, ask: HeatAsk): HeatAnswer | null {
   const string = heatedString(network, ask);
   const cold = dcSolution(network, voltage_V);
-  if (string === null) return runaway(network);
+  if (string === null) return null;
   if (cold === null) return blocked(network, string, voltage_V);
   const state = reachedFromCold(string, Math.abs(voltage_V));
-  if (state === null) return runaway(network);
+  if (state === null) return null;
   const hot: LadderNetwork = {
     ...network,
     resistance_ohm: state.resistance_ohm,
@@ -74,18 +74,5 @@ function blocked(network: LadderNetwork, string: HeatedString, voltage: number):
     elementVoltage_V,
     elementPower_W,
     temperatureRise_K: elementPower_W,
-  };
-}
-
-function runaway(network: LadderNetwork): HeatAnswer {
-  const each = new Array<null>(network.n).fill(null);
-  return {
-    scaleFactor: null,
-    relativeShift: null,
-    resistance_ohm: each,
-    lvResistance_ohm: null,
-    elementVoltage_V: each,
-    elementPower_W: each,
-    temperatureRise_K: each,
   };
 }

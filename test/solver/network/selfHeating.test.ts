@@ -96,7 +96,7 @@ describe("self-heating", () => {
         lvKv: about(0.1) / Math.abs(cold.tapVoltage_V),
         lvRth: (200 * random()) / cold.lvPower_W,
       });
-      const found = selfHeating(network, voltage, ask);
+      const found = selfHeating(network, voltage, ask)!;
       const hot = iterated(network, voltage, ask);
       const dc = dcSolution(hot, voltage)!;
       expectRelative(found.scaleFactor, dc.scaleFactor, 1e-10, "plain iteration");
@@ -117,7 +117,7 @@ describe("self-heating", () => {
   });
   it("keeps the digits of a shift of parts in 1e12", () => {
     const network = sketch({ n: 10, R: 1e8, R2: 1e5 });
-    const found = selfHeating(network, 1000, heat(10, { alpha: 1e-9, Rth: 1 }));
+    const found = selfHeating(network, 1000, heat(10, { alpha: 1e-9, Rth: 1 }))!;
     const P = (1000 / (1e9 + 1e5)) ** 2 * 1e8;
     expectRelative(
       found.relativeShift,
@@ -129,7 +129,7 @@ describe("self-heating", () => {
   it("of a lone LV arm driven by a current is R0/(1 − R0 α Rth I²)", () => {
     const network = sketch({ n: 1, R: 1e9, R2: 1e5 });
     for (const lvAlpha of [2e-3, -2e-3]) {
-      const found = selfHeating(network, 1e6, heat(1, { lvAlpha, lvRth: 1000 }));
+      const found = selfHeating(network, 1e6, heat(1, { lvAlpha, lvRth: 1000 }))!;
       const I = found.elementVoltage_V[0]! / 1e9;
       expectRelative(found.lvResistance_ohm, 1e5 / (1 - 1e5 * lvAlpha * 1000 * I * I), 1e-12, "its own power");
       expectRelative(found.scaleFactor, 1 + 1e9 / found.lvResistance_ohm!, 1e-12, "two resistances");
@@ -138,31 +138,19 @@ describe("self-heating", () => {
   it("runs away where the branch from cold turns back: V = R0/(2 √|R0 α Rth|) for a lone falling element", () => {
     const network = sketch({ n: 1, R: 1e6, R2: 1e-3 });
     const turn = 1e6 / (2 * Math.sqrt(1e6 * 1e-3 * 100));
-    const found = selfHeating(network, turn * (1 - 1e-6), heat(1, { alpha: -1e-3, Rth: 100 }));
+    const found = selfHeating(network, turn * (1 - 1e-6), heat(1, { alpha: -1e-3, Rth: 100 }))!;
     expectRelative(found.resistance_ohm[0], 5e5, 3e-3, "half of the cold resistance at the turn, reached as a root");
-    expect(JSON.stringify(selfHeating(network, turn * (1 + 1e-6), heat(1, { alpha: -1e-3, Rth: 100 })))).toBe(
-      JSON.stringify({
-        scaleFactor: null,
-        relativeShift: null,
-        resistance_ohm: [null],
-        lvResistance_ohm: null,
-        elementVoltage_V: [null],
-        elementPower_W: [null],
-        temperatureRise_K: [null],
-      }),
-    );
+    expect(selfHeating(network, turn * (1 + 1e-6), heat(1, { alpha: -1e-3, Rth: 100 }))).toBeNull();
     // Behind a resistance as great as its own the element never turns.
-    expect(
-      selfHeating(behind(network, 1e6), 10 * turn, heat(1, { alpha: -1e-3, Rth: 100 })).scaleFactor,
-    ).not.toBeNull();
+    expect(selfHeating(behind(network, 1e6), 10 * turn, heat(1, { alpha: -1e-3, Rth: 100 }))).not.toBeNull();
   });
   it("stays on the branch from cold where a hotter state exists too", () => {
     // Behind R0/100 the falling element has three states below the turn; the first is the cold one.
     const network = behind(sketch({ n: 1, R: 1e6, R2: 1e-3 }), 1e4 / 1.1);
     const turn = 1e6 / (2 * Math.sqrt(1e6 * 1e-3 * 100));
-    const found = selfHeating(network, turn * 0.9, heat(1, { alpha: -1e-3, Rth: 100 }));
+    const found = selfHeating(network, turn * 0.9, heat(1, { alpha: -1e-3, Rth: 100 }))!;
     expect(found.resistance_ohm[0]).toBeGreaterThan(5e5);
-    expect(selfHeating(network, turn * 1.2, heat(1, { alpha: -1e-3, Rth: 100 })).scaleFactor).toBeNull();
+    expect(selfHeating(network, turn * 1.2, heat(1, { alpha: -1e-3, Rth: 100 }))).toBeNull();
   });
   it("rising coefficients always settle, 400 unlike elements at once", () => {
     const random = seeded(9);
@@ -174,7 +162,7 @@ describe("self-heating", () => {
       lvAlpha: 1e-2,
       lvRth: 1e4,
     });
-    const found = selfHeating(network, 1e6, ask);
+    const found = selfHeating(network, 1e6, ask)!;
     found.resistance_ohm.forEach((R, i) => {
       const own =
         1 + ask.temperatureCoefficient_per_K[i]! * found.temperatureRise_K[i]! + 1e-4 * found.elementVoltage_V[i]!;
@@ -182,14 +170,12 @@ describe("self-heating", () => {
     });
   });
   it("surroundings that leave no resistance: nothing; a blocked string: cold", () => {
-    expect(
-      selfHeating(sketch({ n: 1, R: 1e6, R2: 1e3 }), 1, heat(1, { alpha: -0.1, ambient: 10 })).scaleFactor,
-    ).toBeNull();
+    expect(selfHeating(sketch({ n: 1, R: 1e6, R2: 1e3 }), 1, heat(1, { alpha: -0.1, ambient: 10 }))).toBeNull();
     const found = selfHeating(
       sketch({ n: 2, R: [1e6, Number.POSITIVE_INFINITY], C: 1e-12, R2: 1e3 }),
       100,
       heat(2, { alpha: 1e-3, ambient: 10, Rth: 5 }),
-    );
+    )!;
     expect(found.scaleFactor).toBeNull();
     expectRelative(found.resistance_ohm[0], 1.01e6, 1e-12, "ten kelvin");
     expect(found.resistance_ohm[1]).toBeNull();
