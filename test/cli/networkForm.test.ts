@@ -91,6 +91,7 @@ describe("faults, tolerance, heat and discharge", () => {
       faults: true,
       tolerance: { element: [0.01, 0.02], lvArm: 0.01, samples: 10 },
       heat: { temperatureCoefficient_per_K: 1e-4, thermalResistance_K_per_W: [50, 60] },
+      discharge: { threshold_V: 60 },
     };
     const { code, out } = await solve(form({ ask: asked }));
     expect(code).toBe(0);

@@ -15,17 +15,16 @@ export interface Contour {
  * s(θ) = μ (1 + sin(iθ − α)). It encloses the negative real axis, where the poles of an R-C network lie, so the error falls as
  * exp(−B(α) N); 24 nodes over a span of ten leave about 3e-11.
  */
-const nodes = 24;
+const usualNodes = 24;
 const span = 10;
 const alpha = 1.03;
 const A = Math.acosh(((Math.PI - 2 * alpha) * span + 4 * alpha - Math.PI) / ((4 * alpha - Math.PI) * Math.sin(alpha)));
-const stepSize = A / nodes;
-const muTimesEnd = ((4 * Math.PI * alpha - Math.PI * Math.PI) / A) * nodes;
+const muTimesEnd = (4 * Math.PI * alpha - Math.PI * Math.PI) / A;
 
-/** For times from end/10 to end. */
-export function decadeContour(end_s: number): Contour {
-  const mu = muTimesEnd / end_s;
-  return contour(nodes, stepSize, (theta) => ({
+/** For times from end/10 to end. More nodes leave less; beyond 32 the rounding of the sum does not. */
+export function decadeContour(end_s: number, nodes = usualNodes): Contour {
+  const mu = (muTimesEnd * nodes) / end_s;
+  return contour(nodes, A / nodes, (theta) => ({
     sre: mu * (1 - Math.sin(alpha) * Math.cosh(theta)),
     sim: mu * Math.cos(alpha) * Math.sinh(theta),
     dre: -mu * Math.sin(alpha) * Math.sinh(theta),

@@ -18,7 +18,6 @@ const keys = [
   "heat",
   "discharge",
 ];
-const later = ["discharge"];
 
 const greatestTime_s = 1e6;
 const greatestFrequency_Hz = 1e13;
@@ -28,9 +27,6 @@ const times = (value: unknown, where: string) => numbers(value, where, 0, greate
 /** What is asked of a network of n elements; anything not asked is null. */
 export function readAsk(value: unknown, n: number): NetworkAsk {
   const raw = object(value, "/ask", keys);
-  for (const key of later) {
-    if (raw[key] !== undefined) stop(`/ask/${key}`, "The program does not compute this yet.", "Leave it out.");
-  }
   const part = <T>(key: string, inside: readonly string[], read: (given: Keyed, where: string) => T): T | null =>
     raw[key] === undefined || raw[key] === null ? null : read(object(raw[key], `/ask/${key}`, inside), `/ask/${key}`);
   return {

@@ -1,6 +1,7 @@
 import { ok, type Result } from "../quantities/result.ts";
 import { blockedDc } from "./blockedDc.ts";
 import { dcSolution } from "./dcSolution.ts";
+import { discharge } from "./discharge.ts";
 import { elementVoltages } from "./elementVoltages.ts";
 import { grading } from "./grading.ts";
 import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
@@ -35,6 +36,9 @@ export function solveNetwork(form: unknown): Result<NetworkAnswer> {
     ...(ask.faults ? { faults: singleFaults(network, voltage_V) } : {}),
     ...(ask.tolerance === null ? {} : { tolerance: toleranceSpread(network, ask.tolerance) }),
     ...(ask.heat === null ? {} : { heat: selfHeating(network, voltage_V, ask.heat) }),
+    ...(ask.discharge_threshold_V === null
+      ? {}
+      : { discharge: discharge(network, voltage_V, ask.discharge_threshold_V) }),
   });
 }
 
