@@ -1,7 +1,7 @@
 import { type Complex, complex, divide, subtract } from "../quantities/complex.ts";
 import { type Contour, decadeContour, invert, type OnContour, weighted } from "./contour.ts";
+import { over } from "./decade.ts";
 import type { LadderNetwork } from "./ladderNetwork.ts";
-import { over } from "./lumpedResponse.ts";
 import { residue, ringingPoles } from "./ringing.ts";
 import { slowestDecay } from "./slowestMode.ts";
 import { tapTwoPort } from "./tapTwoPort.ts";
