@@ -4,8 +4,9 @@ import { along, alongInverse } from "./grading.ts";
 import type { Panel } from "./panel.ts";
 import { ringKernel } from "./ringPotential.ts";
 
-const onPanel = gaussLegendre(12);
-const beside = gaussLegendre(20);
+/** Points enough for the logarithm and for a basis of the panel's own degree, which v³ triples. */
+const pointsOn = (degree: number) => gaussLegendre(Math.max(12, 6 + 2 * degree));
+const pointsBeside = (degree: number) => gaussLegendre(16 + degree);
 
 /**
  * Adds to `out` the potential at (r, z) of each basis polynomial of a panel, times `sign`. Split at the nearest point: with
@@ -14,11 +15,13 @@ const beside = gaussLegendre(20);
  */
 export function addNear(panel: Panel, r: number, z: number, at: number | null, sign: number, out: Float64Array): void {
   const { curve, p, q } = panel;
+  const degree = panel.rule.points.length - 1;
   if (at !== null) {
+    const { points, weights } = pointsOn(degree);
     for (const span of [1 - at, -at]) {
-      for (let k = 0; k < onPanel.points.length; k++) {
-        const v = onPanel.points[k]!;
-        add(panel, r, z, at + span * v * v * v, sign * Math.abs(span) * 3 * v * v * onPanel.weights[k]!, out);
+      for (let k = 0; k < points.length; k++) {
+        const v = points[k]!;
+        add(panel, r, z, at + span * v * v * v, sign * Math.abs(span) * 3 * v * v * weights[k]!, out);
       }
     }
     return;
@@ -26,15 +29,16 @@ export function addNear(panel: Panel, r: number, z: number, at: number | null, s
   const s = nearestOn(curve, r, z);
   const star = alongInverse(p, q, s);
   const away = Math.hypot(r - radiusAt(curve, s), z - heightAt(curve, s)) / panel.length;
+  const { points, weights } = pointsBeside(degree);
   for (const way of [1, -1]) {
     const span = way > 0 ? 1 - star : star;
     if (span < 1e-14) continue;
     const b = Math.max(1e-12, Math.abs(alongInverse(p, q, s + way * away) - star));
     const eta = Math.asinh(span / b);
-    for (let k = 0; k < beside.points.length; k++) {
-      const e = Math.exp(eta * beside.points[k]!);
+    for (let k = 0; k < points.length; k++) {
+      const e = Math.exp(eta * points[k]!);
       const u = star + (way * b * (e - 1 / e)) / 2;
-      add(panel, r, z, u, sign * b * eta * ((e + 1 / e) / 2) * beside.weights[k]!, out);
+      add(panel, r, z, u, sign * b * eta * ((e + 1 / e) / 2) * weights[k]!, out);
     }
   }
 }
@@ -46,7 +50,8 @@ function add(panel: Panel, r: number, z: number, u: number, weight: number, out:
   const s = along(panel.p, panel.q, u);
   const a = radiusAt(curve, s);
   const value = weight * a * ringKernel(r, z, a, heightAt(curve, s));
-  if (value === 0) return;
+  // A point that rounding moves onto the ring itself: its weight is below 1e-9 of the whole.
+  if (!Number.isFinite(value)) return;
   let sum = 0;
   for (let k = 0; k < n; k++) {
     const off = u - points[k]!;
