@@ -25,8 +25,8 @@ export function columnPieces(geometry: FieldGeometry, idealisation: Idealisation
   ];
   if (idealisation === "distributed") {
     for (let i = 0; i < n - 1; i++)
-      pieces.push(wall(foot + i * pitch, foot + (i + 1) * pitch, i, i + 1, i === 0 ? 3 : 1, 1));
-    return [...pieces, wall(top - pitch, top, n - 1, n, n === 1 ? 3 : 1, rimOrder(geometry))];
+      pieces.push(wall(foot + i * pitch, foot + (i + 1) * pitch, i, i + 1, i === 0 ? 3 : 2, 2));
+    return [...pieces, wall(top - pitch, top, n - 1, n, n === 1 ? 3 : 2, rimOrder(geometry))];
   }
   pieces.push(wall(foot, foot + half, 0, 0, 3, 2));
   for (let i = 1; i < n; i++) pieces.push(wall(foot + i * pitch - half, foot + i * pitch + half, i, i, 2, 2));

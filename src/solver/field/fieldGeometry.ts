@@ -29,11 +29,43 @@ export interface FieldElectrode {
 }
 
 /**
- * `bands`: node i is an open thin band at i · pitch. `distributed`: the whole surface of the column, its potential running evenly
- * from node to node (a graded film); charge is shared between two nodes as the potential is.
+ * `bands`: node i is an open thin band at i · pitch. `distributed`: the outer surface of the whole column, its potential running
+ * evenly from node to node (a graded film on a body); charge is shared between two nodes as the potential is. The field inside
+ * that body is the string's own capacitance and is not counted as stray.
  */
 export type Idealisation = "bands" | "distributed";
+
+/**
+ * What a wall at `wallDistance_m` is: `round`, an earthed cylinder of that radius round the axis (walls on all sides: more than a
+ * single wall does, about three times); `plane`, one flat wall, by images averaged round the axis.
+ */
+export type Wall = "round" | "plane";
+
+export interface FieldAsk {
+  readonly idealisation: Idealisation;
+  /** Points on each panel as a multiple of the usual number, 0.5 … 4. */
+  readonly resolution: number;
+  readonly wall: Wall;
+}
+
+export const usualAsk: FieldAsk = { idealisation: "bands", resolution: 1, wall: "round" };
 
 export const noElectrode: FieldElectrode = { kind: "none", radius_m: 0, tubeRadius_m: 0, thickness_m: 0, offset_m: 0 };
 
 export const topOf = (geometry: FieldGeometry): number => geometry.footHeight_m + geometry.columnLength_m;
+
+/** Highest point of column, electrode, HV wire and shield. */
+export function highestOf(geometry: FieldGeometry): number {
+  const { electrode, columnDiameter_m, shield, wire } = geometry;
+  const top = topOf(geometry);
+  const { kind, radius_m, tubeRadius_m, thickness_m, offset_m } = electrode;
+  const rise =
+    kind === "sphere"
+      ? radius_m + Math.sqrt(radius_m * radius_m - (columnDiameter_m * columnDiameter_m) / 4)
+      : kind === "disc"
+        ? thickness_m
+        : 0;
+  const tube = kind === "toroid" ? Math.max(0, offset_m + tubeRadius_m) : 0;
+  const end = top + rise;
+  return Math.max(end + (wire?.length_m ?? 0), top + tube, shield?.to_m ?? 0);
+}

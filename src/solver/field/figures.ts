@@ -33,7 +33,7 @@ export function strayFigures(C: Float64Array): StrayFigures {
   const charge = (i: number) => sum(all, (j) => at(i, j) * x(j));
   return {
     toEarth_F: inner.map(earth),
-    toElectrode_F: inner.map((i) => positive(-at(i, n))),
+    toElectrode_F: inner.map((i) => -at(i, n)),
     tapToElectrode_F: -at(0, n),
     tapToEarth_F: earth(0),
     adjacent_F: all.slice(1).map((i) => -at(i - 1, i)),
@@ -45,8 +45,6 @@ export function strayFigures(C: Float64Array): StrayFigures {
     inputHigh_F: floating(C, nodes),
   };
 }
-
-const positive = (value: number) => value;
 
 /** C_nn after the floating inner nodes are eliminated, the tap at earth. */
 function floating(C: Float64Array, nodes: number): number {

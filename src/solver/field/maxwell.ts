@@ -15,9 +15,9 @@ export interface Solved {
  * Charge for each node at 1 V, all others earthed: Σ charge × potential = given potential, by LU. The matrix is made symmetric,
  * which reciprocity asks for and discretisation keeps only to its own accuracy.
  */
-export function maxwell(mesh: Mesh, nodes: number, floor: boolean, wallDistance: number | null): Solved {
+export function maxwell(mesh: Mesh, nodes: number, floor = true, planeWall: number | null = null): Solved {
   const { count, panels, share, weight, stretch } = mesh;
-  const matrix = assemble(mesh, floor, wallDistance);
+  const matrix = assemble(mesh, floor, planeWall);
   const pivots = factor(matrix, count);
   const raw = new Float64Array(nodes * nodes);
   const field: Float64Array[] = [];

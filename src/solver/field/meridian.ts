@@ -1,19 +1,28 @@
 import { columnPieces } from "./columnPieces.ts";
 import { line } from "./curve.ts";
 import { electrodePieces } from "./electrodePieces.ts";
-import type { FieldGeometry, Idealisation } from "./fieldGeometry.ts";
+import { type FieldAsk, type FieldGeometry, highestOf } from "./fieldGeometry.ts";
 import type { Piece } from "./panel.ts";
 
 const earth = { low: -1, high: -1 } as const;
 
 /** Every conducting surface of a geometry whose shape was found possible, cut at its corners and contacts only. */
-export function meridian(geometry: FieldGeometry, idealisation: Idealisation): Piece[] {
+export function meridian(geometry: FieldGeometry, ask: FieldAsk): Piece[] {
   return [
-    ...columnPieces(geometry, idealisation),
+    ...columnPieces(geometry, ask.idealisation),
     ...electrodePieces(geometry),
     ...shieldPieces(geometry),
     ...boxPieces(geometry),
+    ...(ask.wall === "round" ? wallPieces(geometry) : []),
   ];
+}
+
+/** A wall all round, from the floor to two distances above everything. */
+function wallPieces(geometry: FieldGeometry): Piece[] {
+  const a = geometry.wallDistance_m;
+  if (a === null) return [];
+  const curve = line([a, 0], [a, highestOf(geometry) + 2 * a]);
+  return [{ curve, body: "wall", ...earth, p: 1, q: 2 }];
 }
 
 /** Whether the shield's lower end stands on the lid of the box, or reaches through it: what is inside the box does not count. */

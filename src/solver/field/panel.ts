@@ -3,7 +3,7 @@ import { gaussLegendre, type Rule } from "./gaussLegendre.ts";
 import { along, alongSlope, type EndOrder } from "./grading.ts";
 
 /** Which body a piece of surface belongs to. */
-export type Body = "column" | "end" | "electrode" | "wire" | "shield" | "box";
+export type Body = "column" | "end" | "electrode" | "wire" | "shield" | "box" | "wall";
 
 /** A piece of conducting surface: its meridian curve, how points crowd at its ends, and its potential. */
 export interface Piece {
