@@ -58,7 +58,10 @@ function tooLong({ piece, length, r, z }: Sized, all: readonly Sized[]): boolean
   const { curve } = piece;
   if (piece.body !== "wire" && length > perRadius * Math.max(radiusAt(curve, 0), radiusAt(curve, 1))) return true;
   const allowed = length / perDistance;
-  if (Math.min(heightAt(curve, 0), heightAt(curve, 1)) > 0 && 2 * Math.min(heightAt(curve, 0), heightAt(curve, 1)) < allowed)
+  if (
+    Math.min(heightAt(curve, 0), heightAt(curve, 1)) > 0 &&
+    2 * Math.min(heightAt(curve, 0), heightAt(curve, 1)) < allowed
+  )
     return true;
   for (const other of all) {
     if (facing(piece, other.piece)) continue;

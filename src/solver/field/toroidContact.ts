@@ -22,7 +22,11 @@ export interface Cut {
 }
 
 /** The parts of a straight line that lie outside a tube. */
-export function outsideTube([r1, z1]: readonly [number, number], [r2, z2]: readonly [number, number], tube: Tube): Cut[] {
+export function outsideTube(
+  [r1, z1]: readonly [number, number],
+  [r2, z2]: readonly [number, number],
+  tube: Tube,
+): Cut[] {
   const [dr, dz, fr, fz] = [r2 - r1, z2 - z1, r1 - tube.r, z1 - tube.z];
   const a = dr * dr + dz * dz;
   const b = fr * dr + fz * dz;
