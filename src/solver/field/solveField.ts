@@ -48,10 +48,22 @@ export function solveField(geometry: FieldGeometry, options: FieldOptions = {}):
   return { ...fine, uncertainty: moved(solveOnce(geometry, { ...ask, resolution: (ask.resolution * 2) / 3 }), fine) };
 }
 
+/** Greatest number of unknowns that is solved: about ten seconds. */
+export const mostUnknowns = 2500;
+
+/** How many unknowns the solve would have: parts that nearly touch, and many elements, need many. */
+export function unknownsOf(geometry: FieldGeometry, ask: FieldAsk): number {
+  return refine(meridian(geometry, ask)).reduce((sum, piece) => sum + pointsAt(piece, ask), 0);
+}
+
+const pointsOn = ({ body }: Piece): number => (body === "column" ? 4 : 6);
+const pointsAt = (piece: Piece, { resolution }: FieldAsk): number =>
+  Math.max(2, Math.round(pointsOn(piece) * resolution));
+
 function solveOnce(geometry: FieldGeometry, ask: FieldAsk): FieldStrays {
   const n = geometry.elements;
   const pieces = refine(meridian(geometry, ask));
-  const mesh = meshOf(pieces, (piece) => Math.max(2, Math.round(pointsOn(piece) * ask.resolution)));
+  const mesh = meshOf(pieces, (piece) => pointsAt(piece, ask));
   const { C, field } = maxwell(mesh, n + 1, true, ask.wall === "plane" ? geometry.wallDistance_m : null);
   if (ask.idealisation === "distributed") {
     const inside = insideColumn(n, geometry.columnDiameter_m / 2, geometry.columnLength_m);
@@ -70,14 +82,12 @@ function solveOnce(geometry: FieldGeometry, ask: FieldAsk): FieldStrays {
   };
 }
 
-const pointsOn = ({ body }: Piece): number => (body === "column" ? 4 : 6);
-
 function moved(coarse: FieldStrays, fine: FieldStrays): FieldUncertainty {
-  const share = (a: number, b: number, scale = b) => Math.abs(a - b) / Math.abs(scale);
+  const share = (a: number, b: number, scale = b) => (a === b ? 0 : Math.abs((a - b) / scale));
   return {
     ceEff: share(coarse.ceEff_F, fine.ceEff_F),
     chEff: share(coarse.chEff_F, fine.chEff_F),
-    m: share(coarse.m_F, fine.m_F, fine.ceEff_F / 6 + fine.chEff_F / 3),
+    m: share(coarse.m_F, fine.m_F, fine.ceEff_F / 6 + fine.chEff_F / 3 || fine.inputLow_F),
     inputLow: share(coarse.inputLow_F, fine.inputLow_F),
     inputHigh: share(coarse.inputHigh_F, fine.inputHigh_F),
     fieldMax:
