@@ -1,12 +1,12 @@
 import { type ExitCode, type Outside, Unusable, type Verb } from "./verb.ts";
+import { field } from "./verbs/field.ts";
 import { network } from "./verbs/network.ts";
 import { parts } from "./verbs/parts.ts";
 import { prove } from "./verbs/prove.ts";
 import { size } from "./verbs/size.ts";
 import { why } from "./verbs/why.ts";
 
-export const verbs: readonly Verb[] = [size, prove, parts, network, why];
-const later: Readonly<Record<string, string>> = { field: "The field of a geometry is not computed yet." };
+export const verbs: readonly Verb[] = [size, prove, parts, network, field, why];
 
 const usage = () =>
   `stringwright VERB FILE [options]\n\n${verbs.map((verb) => `  ${verb.name.padEnd(8)} ${verb.does}`).join("\n")}\n\nVERB --help says more. Exit 0: clear or caution. 1: a stop stands. 2: unusable input.\n`;
@@ -20,7 +20,7 @@ export async function run(words: readonly string[], outside: Outside): Promise<E
   }
   const verb = verbs.find((each) => each.name === name);
   if (verb === undefined) {
-    outside.say(later[name] ?? `There is no verb "${name}".\n\n${usage()}`);
+    outside.say(`There is no verb "${name}".\n\n${usage()}`);
     return 2;
   }
   if (rest.includes("--help")) {
