@@ -178,7 +178,7 @@ describe("the raw network", () => {
     [{ ...attenuator, elements: [] }, /elements: There are 0/],
     [{ ...attenuator, elements: [{ resistance_ohm: -1 }] }, /elements\/0\/resistance_ohm/],
     [{ ...attenuator, lvArm: { resistance_ohm: 1e6, inductance_H: -1e-9 } }, /lvArm\/inductance_H/],
-    [{ ...attenuator, ask: { faults: true } }, /ask\/faults: The program does not compute this yet/],
+    [{ ...attenuator, ask: { faults: "all" } }, /ask\/faults: It must be true or false/],
     [{ ...attenuator, source: { resistance_ohm: -10 } }, /source\/resistance_ohm/],
     [{ ...attenuator, cable: { delay_s: 1e-9 } }, /cable\/impedance_ohm: A line needs it/],
     [{ ...attenuator, surprise: 1 }, /surprise: This key is not known/],

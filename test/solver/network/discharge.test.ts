@@ -240,6 +240,20 @@ describe("discharge", () => {
     const ringing = discharge({ ...network, lv: { ...network.lv, inductance_H: 1 } }, 1000, 1);
     expectRelative(ringing.slowestTimeConstant_s, 2 / 100, 1e-9, "2 L/R; the string's end is open");
   });
+  it("with an LV inductance begins with the capacitor out of the way, and comes back", () => {
+    // For a tenth of a picosecond the inductance keeps C2 away and the electrode stands at 0; then it follows C2 from a half.
+    const network = withSource(sketch({ n: 1, R: 1e4, R2: 1e4, C2: 1e-6 }), 0);
+    const found = discharge({ ...network, lv: { ...network.lv, inductance_H: 1e-9 } }, 1000, 100);
+    expectRelative(found.time_s, 1e-2 * Math.log(5), 1e-6, "R2·C2 = 10 ms from a half");
+    expectRelative(found.slowestTimeConstant_s, 1e-2, 1e-9, "R2·C2");
+  });
+  it("an overdamped LV branch: L, R2 and C2 in series, both roots real", () => {
+    const network = sketch({ n: 1, R: 1e6, R2: 1e3, C2: 1e-6 });
+    const [R, L, C] = [1e3, 0.1, 1e-6];
+    const root = (R - Math.sqrt(R * R - (4 * L) / C)) / (2 * L);
+    const found = discharge({ ...network, lv: { ...network.lv, inductance_H: L } }, 1000, 1e-3);
+    expectRelative(found.slowestTimeConstant_s, 1 / root, 1e-9, "slower root of L s² + R s + 1/C");
+  });
   it("holds for 400 elements and an infinity of bare ones", () => {
     const network = withSource(
       sketch({ n: 400, R: 1e9, C: 1e-16, Ce: 1e-10, Ch: 1e-11, R2: 1e5, C2: 1e-6, Rm: 1e7 }),
