@@ -234,6 +234,27 @@ describe("discharge", () => {
     expectRelative(inductive.time_s, plain.time_s!, 1e-7, "ringing long over");
     expectRelative(inductive.slowestTimeConstant_s, plain.slowestTimeConstant_s!, 1e-9, "ringing long over");
   });
+  it("a line's series resistor and termination stand where a series protector and the instrument would", () => {
+    const base = withSource(
+      sketch({ n: 2, R: 1e7, C: 1e-11, R2: 1e5, C2: 1e-8, Rm: 1e6, Cm: 2e-11, Rs: 5e5, at: "divider" }),
+      1e-10,
+    );
+    const lumped = { ...base, cable: { capacitance_F: 2e-9, line: null } };
+    const line = { impedance_ohm: 0.5, delay_s: 1e-9, seriesAtTap_ohm: 5e5, terminationAtEnd_ohm: 2e6 };
+    const lined = {
+      ...base,
+      instrument: { ...base.instrument, resistance_ohm: 2e6 },
+      cable: { capacitance_F: 0, line },
+      seriesProtector: { resistance_ohm: 0, at: "instrument" as const },
+    };
+    // The last threshold is reached within a delay: the line as its capacitance.
+    for (const threshold of [1, 60, 5000, 9999.9999]) {
+      const [a, b] = [lined, lumped].map((each) => discharge(each, 1e4, threshold));
+      expectRelative(a!.time_s, b!.time_s!, 1e-7, `the same circuit, ${threshold} V`);
+      expectRelative(a!.slowestTimeConstant_s, b!.slowestTimeConstant_s!, 1e-8, "the same circuit");
+      expectRelative(a!.energy_J, b!.energy_J!, 1e-12, "the same circuit");
+    }
+  });
   it("of a series circuit that rings takes the envelope's time constant", () => {
     // 1 H, 1 µF at the tap, 100 Ω in parallel with both: s² + (1/(R C))… the LV resistor damps the branch as R/(2 L).
     const network = { ...sketch({ n: 1, R: 1e6, R2: 100, C2: 1e-6 }) };
