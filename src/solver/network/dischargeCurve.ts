@@ -28,6 +28,8 @@ export class DischargeCurve {
   /** The slowest decay of all modes; a ringing one by its envelope. null: nothing to discharge. */
   readonly slowest_per_s: number | null;
   private readonly shift: number;
+  /** Resistances and capacitances alone: the curve only falls. */
+  private readonly plain: boolean;
   private readonly pairs: readonly Pair[];
 
   constructor(
@@ -36,22 +38,19 @@ export class DischargeCurve {
     private readonly Z0: number,
   ) {
     const { lv, cable } = network;
+    this.plain = cable.line === null && (lv.inductance_H === 0 || lv.capacitance_F === 0);
     const slow = slowestDecay(network);
-    const plain = cable.line === null && (lv.inductance_H === 0 || lv.capacitance_F === 0);
-    const refined = slow === null || plain ? slow : this.refined(slow);
-    const poles = cable.line === null && !plain ? ringingPoles(leftAlone(network), "source") : [];
+    const decay = slow === null || cable.line === null ? slow : this.refined(slow);
+    const poles = cable.line === null && !this.plain ? ringingPoles(leftAlone(network), "source") : [];
     this.pairs = poles.map((p) => ({ p, q: residue((sre, sim) => this.transform(network, sre, sim), p) }));
-    this.shift = refined ?? 0;
-    const decays = poles.map(({ re }) => -re);
-    if (refined !== null) decays.push(refined);
-    else if (slow !== null && decays.length === 0) decays.push(slow);
+    this.shift = decay ?? 0;
+    const decays = [...poles.map(({ re }) => -re), ...(decay === null ? [] : [decay])];
     this.slowest_per_s = decays.length === 0 ? null : Math.min(...decays);
   }
 
   /** The time after which the curve stays below exp(logarithm), s. */
   timeTo(logarithm: number): number {
-    const first = this.transform(this.network, Float64Array.of(1e40), new Float64Array(1)).re[0]! * 1e40;
-    if (first <= Math.exp(logarithm) || this.slowest_per_s === null) return 0;
+    if (this.slowest_per_s === null || (this.plain && this.first() <= Math.exp(logarithm))) return 0;
     // A sum of falling exponentials, 1 at most at the start, is below exp(−λ t).
     let end = (-logarithm / this.slowest_per_s) * (1 + 1e-9);
     let above = this.margin(end, logarithm);
@@ -59,12 +58,17 @@ export class DischargeCurve {
       end *= 10;
       above = this.margin(end, logarithm);
     }
-    for (let decade = 0; decade < 60; decade++) {
+    for (let decade = 0; decade < 40; decade++) {
       if (above(end / 10) > 0) return bisected(above, end / 10, end);
       end /= 10;
       above = this.margin(end, logarithm);
     }
     return 0;
+  }
+
+  /** The value at t = 0+. */
+  private first(): number {
+    return this.transform(this.network, Float64Array.of(1e40), new Float64Array(1)).re[0]! * 1e40;
   }
 
   /** Within the decade before `end`: positive while the curve is above the threshold. */
@@ -111,15 +115,16 @@ export class DischargeCurve {
     };
   }
 
-  /** The slowest decay with line and inductance in full, by the secant method from what it is without; null where it is another mode. */
-  private refined(start: number): number | null {
+  /** The slowest decay with the line in full, by the secant method from what it is with the line's capacitance. */
+  private refined(start: number): number {
     const at = (x: number) => this.admittance(this.network, Float64Array.of(-x), new Float64Array(1)).re[0]!;
     let [a, b] = [start, start * (1 + 1e-6)];
     let [fa, fb] = [at(a), at(b)];
     for (let step = 0; step < 40 && fb !== fa; step++) {
       const next = b - (fb * (b - a)) / (fb - fa);
       [a, fa, b, fb] = [b, fb, next, at(next)];
-      if (!(Math.abs(b - start) < start / 2)) return null;
+      // Another mode, or one that the electrode hardly feels.
+      if (!(Math.abs(b - start) < 0.1 * start)) return start;
       if (Math.abs(b - a) <= 1e-15 * b) break;
     }
     return b;

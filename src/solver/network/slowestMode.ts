@@ -1,24 +1,33 @@
 import type { LadderNetwork } from "./ladderNetwork.ts";
 import { conductance } from "./lvSide.ts";
 
+const least_per_s = 1e-40;
+const greatest_per_s = 1e40;
+
 /**
- * Slowest natural decay λ, 1/s, of the network left to itself (no source but its capacitance), as resistances and capacitances alone:
- * an LV inductance counts as a wire, a line as its capacitance. The smallest generalised eigenvalue of conductances and capacitances,
- * by bisection on the number of negative pivots (Sylvester's law of inertia), to rounding. Every node must have a resistance to earth.
- * null where no capacitance is left to discharge.
+ * Slowest natural decay λ, 1/s, that does not ring, of the network left to itself (no source but its capacitance); a line counts as its
+ * capacitance. With resistances and capacitances alone it is the smallest generalised eigenvalue of conductances and capacitances, by
+ * bisection on the number of negative pivots (Sylvester's law of inertia), to rounding. With an LV inductance the same count holds up to
+ * the resonance of the LV branch; beyond, its first change is searched in steps. Every node must have a resistance to earth.
+ * null where nothing decays so.
  */
 export function slowestDecay(network: LadderNetwork): number | null {
-  let low = 1e-40;
-  let high = 1e40;
   const chain = instrumentChain(network);
-  if (negativePivots(network, chain, high) === 0) return null;
-  while (high > low * (1 + 2 ** -51)) {
+  const changed = (x: number) => negativePivots(network, chain, x) > 0;
+  const { inductance_H, capacitance_F } = network.lv;
+  let low = least_per_s;
+  let high = Math.min(greatest_per_s, 1 / Math.sqrt(inductance_H * capacitance_F));
+  while (!changed(high)) {
+    if (high >= greatest_per_s) return null;
+    low = high;
+    high *= 1.1;
+  }
+  for (;;) {
     const middle = Math.sqrt(low) * Math.sqrt(high);
-    if (middle <= low || middle >= high) break;
-    if (negativePivots(network, chain, middle) > 0) high = middle;
+    if (middle <= low || middle >= high || high <= low * (1 + 2 ** -51)) return low;
+    if (changed(middle)) high = middle;
     else low = middle;
   }
-  return low;
 }
 
 /** A node between instrument and tap: what hangs from it, and the resistance towards the instrument (0: the same node). */
@@ -49,7 +58,7 @@ function instrumentChain(network: LadderNetwork): ChainNode[] {
     {
       fromInstrument_ohm: atDivider ? Rs : 0,
       G: conductance(lv.resistance_ohm) + conductance(protector.resistance_ohm),
-      C: lv.capacitance_F + protector.capacitance_F,
+      C: protector.capacitance_F,
     },
   ];
 }
@@ -67,6 +76,8 @@ function negativePivots(network: LadderNetwork, chain: readonly ChainNode[], x: 
     }
     E += G - x * C;
   }
+  const { inductance_H: L, capacitance_F: C2 } = network.lv;
+  E -= (x * C2) / (1 + L * C2 * x * x);
   let H = -x * network.electrodeToTap_F;
   let P = 0;
   for (let i = 0; i < n; i++) {

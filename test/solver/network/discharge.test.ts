@@ -234,11 +234,46 @@ describe("discharge", () => {
     expectRelative(inductive.time_s, plain.time_s!, 1e-7, "ringing long over");
     expectRelative(inductive.slowestTimeConstant_s, plain.slowestTimeConstant_s!, 1e-9, "ringing long over");
   });
+  it("a line's series resistor and termination stand where a series protector and the instrument would", () => {
+    const base = withSource(
+      sketch({ n: 2, R: 1e7, C: 1e-11, R2: 1e5, C2: 1e-8, Rm: 1e6, Cm: 2e-11, Rs: 5e5, at: "divider" }),
+      1e-10,
+    );
+    const lumped = { ...base, cable: { capacitance_F: 2e-9, line: null } };
+    const line = { impedance_ohm: 0.5, delay_s: 1e-9, seriesAtTap_ohm: 5e5, terminationAtEnd_ohm: 2e6 };
+    const lined = {
+      ...base,
+      instrument: { ...base.instrument, resistance_ohm: 2e6 },
+      cable: { capacitance_F: 0, line },
+      seriesProtector: { resistance_ohm: 0, at: "instrument" as const },
+    };
+    // The last threshold is reached within a delay: the line as its capacitance.
+    for (const threshold of [1, 60, 5000, 9999.9999]) {
+      const [a, b] = [lined, lumped].map((each) => discharge(each, 1e4, threshold));
+      expectRelative(a!.time_s, b!.time_s!, 1e-7, `the same circuit, ${threshold} V`);
+      expectRelative(a!.slowestTimeConstant_s, b!.slowestTimeConstant_s!, 1e-8, "the same circuit");
+      expectRelative(a!.energy_J, b!.energy_J!, 1e-12, "the same circuit");
+    }
+  });
   it("of a series circuit that rings takes the envelope's time constant", () => {
     // 1 H, 1 µF at the tap, 100 Ω in parallel with both: s² + (1/(R C))… the LV resistor damps the branch as R/(2 L).
     const network = { ...sketch({ n: 1, R: 1e6, R2: 100, C2: 1e-6 }) };
     const ringing = discharge({ ...network, lv: { ...network.lv, inductance_H: 1 } }, 1000, 1);
     expectRelative(ringing.slowestTimeConstant_s, 2 / 100, 1e-9, "2 L/R; the string's end is open");
+  });
+  it("with an LV inductance begins with the capacitor out of the way, and comes back", () => {
+    // For a tenth of a picosecond the inductance keeps C2 away and the electrode stands at 0; then it follows C2 from a half.
+    const network = withSource(sketch({ n: 1, R: 1e4, R2: 1e4, C2: 1e-6 }), 0);
+    const found = discharge({ ...network, lv: { ...network.lv, inductance_H: 1e-9 } }, 1000, 100);
+    expectRelative(found.time_s, 1e-2 * Math.log(5), 1e-6, "R2·C2 = 10 ms from a half");
+    expectRelative(found.slowestTimeConstant_s, 1e-2, 1e-9, "R2·C2");
+  });
+  it("an overdamped LV branch: L, R2 and C2 in series, both roots real", () => {
+    const network = sketch({ n: 1, R: 1e6, R2: 1e3, C2: 1e-6 });
+    const [R, L, C] = [1e3, 0.1, 1e-6];
+    const root = (R - Math.sqrt(R * R - (4 * L) / C)) / (2 * L);
+    const found = discharge({ ...network, lv: { ...network.lv, inductance_H: L } }, 1000, 1e-3);
+    expectRelative(found.slowestTimeConstant_s, 1 / root, 1e-9, "slower root of L s² + R s + 1/C");
   });
   it("holds for 400 elements and an infinity of bare ones", () => {
     const network = withSource(
