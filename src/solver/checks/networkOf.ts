@@ -35,7 +35,8 @@ export function networkOf(j: Judging, string: StringCapacitance): LadderNetwork 
     },
     protector: {
       resistance_ohm: leakage === 0 ? Number.POSITIVE_INFINITY : 1 / leakage,
-      capacitance_F: protectorCapacitance(j, "divider"),
+      // The tap's own stray to earth lies beside the limiting parts.
+      capacitance_F: protectorCapacitance(j, "divider") + string.strays.tapToEarth_F,
     },
     cable: { capacitance_F: instrument.cable.length_m * instrument.cable.capacitance_F_per_m, line: null },
     instrument: {

@@ -7,6 +7,7 @@ import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
+import { fieldRecord } from "../checks/solvedStrays.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
@@ -36,7 +37,12 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
 
 /** Every solution record, by id: what no closed formula gives. */
 export const solutions: ReadonlyMap<string, Solution> = new Map(
-  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords), ...sizingSolutions].map(
-    (record) => [record.id, record],
-  ),
+  [
+    capacitiveLadderRecord,
+    fieldRecord,
+    faultRecord,
+    resistanceAbove,
+    ...Object.values(responseRecords),
+    ...sizingSolutions,
+  ].map((record) => [record.id, record]),
 );
