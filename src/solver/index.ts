@@ -8,7 +8,7 @@ export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";
 export { answerField, type FieldAnswer } from "./field/answerField.ts";
 export { type BalancingElectrode, balancingElectrode } from "./field/balancingElectrode.ts";
 export { estimateFormulas } from "./field/estimateFormulas.ts";
-export type * from "./field/fieldGeometry.ts";
+export * from "./field/fieldGeometry.ts";
 export { type InstantEstimate, instantEstimate } from "./field/instantEstimate.ts";
 export { type Neighbour, proximity } from "./field/proximity.ts";
 export { shapeFault } from "./field/shapeFault.ts";
