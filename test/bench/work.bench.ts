@@ -1,6 +1,14 @@
 import { readFileSync } from "node:fs";
 import { restoreDocument } from "../../src/file/restore.ts";
-import { type DividerDocument, fieldAsked, isFieldOf, prove, size, solveColumnField, takeCandidate } from "../../src/solver/index.ts";
+import {
+  type DividerDocument,
+  fieldAsked,
+  isFieldOf,
+  prove,
+  size,
+  solveColumnField,
+  takeCandidate,
+} from "../../src/solver/index.ts";
 import { jobsOf } from "../../src/work/outcomeOf.ts";
 import { fixed, invented } from "../support/builders.ts";
 import type { Benchmark } from "./benchmark.ts";
