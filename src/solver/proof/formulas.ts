@@ -10,6 +10,8 @@ import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
+import { estimateFormulas } from "../field/estimateFormulas.ts";
+import { fieldRecord } from "../field/fieldRecord.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
@@ -28,6 +30,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     chargeFormulas,
     protectorFormulas,
     responseFormulas,
+    estimateFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
@@ -36,7 +39,12 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
 
 /** Every solution record, by id: what no closed formula gives. */
 export const solutions: ReadonlyMap<string, Solution> = new Map(
-  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords), ...sizingSolutions].map(
-    (record) => [record.id, record],
-  ),
+  [
+    capacitiveLadderRecord,
+    fieldRecord,
+    faultRecord,
+    resistanceAbove,
+    ...Object.values(responseRecords),
+    ...sizingSolutions,
+  ].map((record) => [record.id, record]),
 );
