@@ -10,6 +10,7 @@ export { answerField, type FieldAnswer } from "./field/answerField.ts";
 export { type BalancingElectrode, balancingElectrode } from "./field/balancingElectrode.ts";
 export { estimateFormulas } from "./field/estimateFormulas.ts";
 export * from "./field/fieldGeometry.ts";
+export { fieldRecord } from "./field/fieldRecord.ts";
 export { type InstantEstimate, instantEstimate } from "./field/instantEstimate.ts";
 export { type Neighbour, proximity } from "./field/proximity.ts";
 export { shapeFault } from "./field/shapeFault.ts";

@@ -11,6 +11,8 @@ import { fieldRecord } from "../checks/solvedStrays.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
+import { estimateFormulas } from "../field/estimateFormulas.ts";
+import { fieldRecord } from "../field/fieldRecord.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
@@ -29,6 +31,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     chargeFormulas,
     protectorFormulas,
     responseFormulas,
+    estimateFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])

@@ -3,7 +3,7 @@ import { solveField } from "../../../src/solver/field/solveField.ts";
 import { idealSource } from "../../../src/solver/network/ladderNetwork.ts";
 import { responseTime } from "../../../src/solver/network/stepFigures.ts";
 import { expectRelative } from "../../support/relative.ts";
-import { drawn } from "./invented.ts";
+import { column, drawn, sphere } from "./invented.ts";
 
 const none = { resistance_ohm: Number.POSITIVE_INFINITY, capacitance_F: 0 };
 
@@ -51,5 +51,14 @@ describe.each(drawn)("the ladder of: %s", (_, geometry) => {
       seriesProtector: { resistance_ohm: 0, at: "divider" },
     });
     expectRelative(T, R * strays.m_F, 1e-6, "T = R·M", R * (strays.ceEff_F / 6 + strays.chEff_F / 3));
+  });
+});
+
+describe("a column deep in a shield", () => {
+  it("has couplings of none, not of the wrong sign", () => {
+    const geometry = column(40, 0.5, 12, 0.2, { shield: { radius_m: 0.03, from_m: 0.05, to_m: 0.75 } });
+    const { toEarth_F, toElectrode_F, adjacent_F, ladder } = solveField({ ...geometry, electrode: sphere(0.025) });
+    for (const each of [...toEarth_F, ...toElectrode_F, ...adjacent_F, ...ladder.series_F, ladder.electrodeToTap_F])
+      expect(each).toBeGreaterThanOrEqual(0);
   });
 });

@@ -50,3 +50,34 @@ describe("what must hold whatever is drawn", () => {
     expectRelative(limit, film.m_F - inside, 3e-3, "M; open bands have the field within them counted");
   });
 });
+
+describe("a graded film with all nodes at one potential is a closed tube", () => {
+  const whole = (l: number, d: number, h: number) => {
+    const strays = solveField(column(10, l, l / d, h / l), { idealisation: "distributed" });
+    const couplings = strays.toElectrode_F.reduce((sum, each) => sum + each, strays.tapToElectrode_F);
+    const earth = strays.toEarth_F.reduce((sum, each) => sum + each, strays.tapToEarth_F);
+    return earth + strays.electrodeSelf_F - couplings;
+  };
+  // Method of moments, computed independently; length, diameter, foot height in m.
+  it.each([
+    [1, 0.1, 0.5, 23.51],
+    [1, 0.05, 0.2, 19.26],
+    [2, 0.1, 0.2, 40.12],
+    [0.3, 0.02, 0.1, 6.203],
+  ])("%f m long, %f m wide, foot at %f m: %f pF", (l, d, h, pF) =>
+    expectRelative(whole(l, d, h), pF * 1e-12, 6e-3, "coarse elements, ends not crowded"),
+  );
+  it.each([
+    [4, 0.1],
+    [10, 0.3],
+    [30, 1],
+    [80, 3],
+  ])("l/d %f, h/l %f: as an independent fit, within 1.03 %%", (slender, t) => {
+    const L = Math.log(slender);
+    const floor = (2 * t + 2) * Math.log(2 * t + 2) - 2 * (2 * t + 1) * Math.log(2 * t + 1) + 2 * t * Math.log(2 * t);
+    const d = 1 / slender;
+    const tube = (2 * Math.PI * epsilon0) / (Math.log(4 * slender) - 1 - 0.617 * floor - 0.09 + 0.751 / L);
+    const ends = 2.545 * epsilon0 * d + (0.954 * epsilon0 * d * d) / t;
+    expectRelative(whole(1, d, t), tube + ends, 0.0103, "2πε0 l/[ln(4l/d) − 1 − 0.617Φ − 0.090 + 0.751/L] + ends");
+  });
+});
