@@ -1,6 +1,7 @@
 import { capacitiveLadderRecord } from "../checks/capacitiveLadder.ts";
 import { chargeFormulas } from "../checks/charge.ts";
 import { strayFormulas } from "../checks/columnStrays.ts";
+import { edgeFormulas } from "../checks/edgeFormulas.ts";
 import { faultRecord } from "../checks/faultRow.ts";
 import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loadingFormulas.ts";
@@ -9,6 +10,7 @@ import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
+import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
@@ -28,6 +30,8 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     chargeFormulas,
     protectorFormulas,
     responseFormulas,
+    edgeFormulas,
+    tapLoadFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
