@@ -165,4 +165,9 @@ export const briefShape = object<Brief>("What the engineer asks.", {
   source: sourceShape,
   surroundings: surroundingsShape,
   policy: policyShape,
+  generator_Vpp: quantity("V", "Square-wave generator at hand for the slow/fast check, peak to peak.", {
+    aboveLeast: true,
+    fallback: 20,
+    assumable: false,
+  }),
 });

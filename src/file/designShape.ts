@@ -5,6 +5,7 @@ import type {
   Geometry,
   HvArm,
   HvElement,
+  Lead,
   LvArm,
   LvBranch,
   LvSeriesItem,
@@ -138,6 +139,15 @@ const lvArmShape = object<LvArm>("The arm between tap and earth.", {
     },
     "none",
   ),
+  inductance_H: quantity("H", "Of the LV capacitors and their connections together; 0: left out.", {
+    fallback: 0,
+    assumable: false,
+  }),
+});
+
+const leadShape = object<Lead>("The connection from source to top electrode.", {
+  inductance_H: quantity("H", "Inductance of the loop; 0: left out.", { fallback: 0, assumable: false }),
+  damping_ohm: quantity("ohm", "Damping resistor at the top electrode; 0: none.", { fallback: 0, assumable: false }),
 });
 
 const electrodeShape = object<Electrode>("The top electrode.", {
@@ -224,4 +234,5 @@ export const designShape = object<Design>("The chosen divider.", {
   ),
   geometry: geometryShape,
   strays: straysShape,
+  lead: leadShape,
 });

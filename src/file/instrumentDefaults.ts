@@ -46,3 +46,10 @@ export const typicalInstruments: Readonly<Record<InstrumentFunction, Typical>> =
   "data logger": typical([10, 10], [1e9, 0.5], [1e-10, 5e-11], [0.001, 1e-4], 1000),
   microammeter: typical([0.1, 1], [1000, 0.01], [0, 0], [0.02, 0.001], null),
 };
+
+/** Noise of an oscilloscope's trace on its most sensitive ranges, whole bandwidth, V rms; from memory. */
+export const typicalNoise: Partial<Readonly<Record<InstrumentFunction, number>>> = {
+  "scope 1 MΩ": 3e-4,
+  "scope with 10:1 probe": 3e-3,
+  "scope 50 Ω": 2e-4,
+};

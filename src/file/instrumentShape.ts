@@ -1,5 +1,5 @@
-import type { Cable, Instrument, InstrumentFunction } from "../solver/index.ts";
-import { typicalInstruments } from "./instrumentDefaults.ts";
+import type { Cable, CableEnd, Instrument, InstrumentFunction } from "../solver/index.ts";
+import { typicalInstruments, typicalNoise } from "./instrumentDefaults.ts";
 import type { Raw } from "./shape.ts";
 import { choice, namedAs, object, quantity, quantityOrNull, text } from "./shapes.ts";
 
@@ -15,10 +15,28 @@ function typicalResistance_ohm(parent: Raw): number {
   return parent.function === "pointer meter" && known ? 20e3 * range : typicalOf(parent).resistance_ohm;
 }
 
+/** Noise by kind, from memory; where none is known, one count. */
+const typicalNoise_Vrms = (parent: Raw): number => {
+  const known = typicalNoise[parent.function as InstrumentFunction];
+  if (known !== undefined) return known;
+  return typeof parent.resolution_V === "number" ? parent.resolution_V : typicalOf(parent).resolution_V;
+};
+
 const cableShape = object<Cable>("The cable between divider and instrument.", {
   length_m: quantity("m", "Length.", { fallback: 1 }),
   capacitance_F_per_m: quantity("F/m", "Capacitance a metre.", { fallback: 1e-10 }),
   impedance_ohm: quantity("ohm", "Characteristic impedance.", { aboveLeast: true, fallback: 50 }),
+  delay_s_per_m: quantity("s/m", "Delay a metre.", { aboveLeast: true, fallback: 5e-9 }),
+  end: choice<CableEnd>(
+    "How the cable is counted.",
+    {
+      lumped: "as its capacitance at the tap",
+      open: "as a line, open into the instrument",
+      matchedAtTap: "as a line behind a resistor of its impedance at the tap",
+      terminated: "as a line with its impedance across the far end",
+    },
+    "lumped",
+  ),
 });
 
 export const instrumentFunctions: Readonly<Record<InstrumentFunction, string>> = {
@@ -62,6 +80,7 @@ export const instrumentShape = object<Instrument>("An instrument on one range an
     fallback: (p) => typicalOf(p).readingAccuracy,
   }),
   resolution_V: quantity("V", "One count.", { fallback: (p) => typicalOf(p).resolution_V }),
+  noise_Vrms: quantity("V", "Noise on the most sensitive range, rms.", { fallback: typicalNoise_Vrms }),
   bandwidth_Hz: quantityOrNull("Hz", "Bandwidth; null: dc only.", { fallback: (p) => typicalOf(p).bandwidth_Hz }),
   cable: cableShape,
 });

@@ -15,6 +15,7 @@ export type Unit =
   | "1/K"
   | "1/V"
   | "F/m"
+  | "s/m"
   | "1";
 
 export const ranges: Readonly<Record<Unit, readonly [least: number, greatest: number]>> = {
@@ -33,5 +34,6 @@ export const ranges: Readonly<Record<Unit, readonly [least: number, greatest: nu
   "1/K": [-1, 1],
   "1/V": [-1, 1],
   "F/m": [0, 1e-6],
+  "s/m": [0, 1e-6],
   "1": [0, 1],
 };

@@ -39,11 +39,12 @@ export const sizingKey = (document: DividerDocument, top: number): string => {
   return canonical([brief, parts, instruments, principal, ownOrigins(origins), keptOfDesign(document), top]);
 };
 
-/** Fitted protectors, and the foot height where it is stated rather than drawn by the search. */
+/** Fitted protectors, inductances, and the foot height where it is stated rather than drawn by the search. */
 function keptOfDesign({ design, origins, typed }: DividerDocument): unknown {
   const pointer = "/design/geometry/footHeight_m";
   const stated = typed[pointer] !== undefined || origins[pointer] === "typed" || origins[pointer] === "measured";
-  return [design?.protectors ?? [], stated ? design?.geometry.footHeight_m : null];
+  const { protectors = [], lead = null, lvArm = null } = design ?? {};
+  return [protectors, lead, lvArm?.inductance_H ?? 0, stated ? design?.geometry.footHeight_m : null];
 }
 
 const ownOrigins = (origins: DividerDocument["origins"]): DividerDocument["origins"] =>

@@ -15,8 +15,9 @@ export const inventedMeter: Instrument = {
   greatestInput_Vpeak: 1000,
   readingAccuracy: 0.005,
   resolution_V: 0.01,
+  noise_Vrms: 0.01,
   bandwidth_Hz: null,
-  cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50 },
+  cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50, delay_s_per_m: 5e-9, end: "lumped" },
 };
 
 export const inventedStart = (): DividerDocument =>

@@ -13,7 +13,8 @@ const start = startDocument({
   nominal_V: -48_000,
   kind: "pulse",
   statedAs: "peak",
-  instrument: { id: "scope", name: "oscilloscope", function: "scope 1 MΩ", ...typicalInstruments["scope 1 MΩ"], cable },
+  // As it was then: keys that came later are filled in on opening.
+  instrument: { id: "scope", name: "oscilloscope", function: "scope 1 MΩ", ...typicalInstruments["scope 1 MΩ"], cable } as never,
   wantedUncertainty: 0.03,
   scaleFactor: 1000,
   riseTime_s: 2e-7,

@@ -102,8 +102,9 @@ export const inventedInstruments: readonly Instrument[] = [
     greatestInput_Vpeak: 300,
     readingAccuracy: 0.015,
     resolution_V: 0.1,
+    noise_Vrms: 3e-4,
     bandwidth_Hz: 100e6,
-    cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50 },
+    cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50, delay_s_per_m: 5e-9, end: "lumped" },
   },
   {
     id: "meter",
@@ -117,8 +118,9 @@ export const inventedInstruments: readonly Instrument[] = [
     greatestInput_Vpeak: 1000,
     readingAccuracy: 0.005,
     resolution_V: 0.01,
+    noise_Vrms: 0.01,
     bandwidth_Hz: null,
-    cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50 },
+    cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50, delay_s_per_m: 5e-9, end: "lumped" },
   },
 ];
 
@@ -162,6 +164,7 @@ export const inventedDocument: DividerDocument = {
       greatestLength_m: null,
       compensation: "whenNeeded",
     },
+    generator_Vpp: 20,
   },
   parts: [inventedResistor, inventedCapacitor, lvResistor, lvCapacitor, trimmer],
   instruments: inventedInstruments,
@@ -172,6 +175,7 @@ export const inventedDocument: DividerDocument = {
     lvArm: {
       stays: "withDivider",
       capacitanceBy: "flattest",
+      inductance_H: 0,
       branches: [
         { name: "R2a", series: [{ part: "r2", resistance_ohm: 274e3 }] },
         {
@@ -201,6 +205,7 @@ export const inventedDocument: DividerDocument = {
       wallDistance_m: 1,
     },
     strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
+    lead: { inductance_H: 0, damping_ohm: 0 },
   },
   asBuilt: { readings: [], records: [] },
   origins: { "/brief/source/capacitance_F": "assumed", "/brief/source/resistance_ohm": "typed" },

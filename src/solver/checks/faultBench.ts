@@ -1,7 +1,8 @@
 import { type CapacitiveTwoPort, capacitiveLadder } from "./capacitiveLadder.ts";
 import type { Judging } from "./judging.ts";
-import { capacitanceOf, fixedOf, isResistive, protectorCapacitance, seriesResistance, trimOf } from "./lvArm.ts";
+import { capacitanceOf, fixedOf, isResistive, leakageConductance, protectorCapacitance, trimOf } from "./lvArm.ts";
 import type { StringCapacitance } from "./stringCapacitance.ts";
+import { tapLoad } from "./tapLoad.ts";
 
 /** What the faults of one design are computed from, gathered once. */
 export interface FaultBench {
@@ -45,9 +46,9 @@ export function dcOutput(
   R1 = bench.R1,
   unplugged = false,
 ): number {
-  const Rs = seriesResistance(j);
-  const Rm = j.instrument.resistance_ohm;
-  const G = branches.reduce((sum, R) => sum + 1 / R, 0) + (unplugged ? 0 : 1 / (Rs + Rm));
+  const { series_ohm: Rs, input_ohm: Rm, shunt_S } = tapLoad(j);
+  const termination = shunt_S - leakageConductance(j);
+  const G = branches.reduce((sum, R) => sum + 1 / R, 0) + (unplugged ? 0 : termination + 1 / (Rs + Rm));
   if (G === 0) return bench.V;
   const tap = bench.V / (1 + R1 * G);
   return unplugged ? tap : (tap * Rm) / (Rs + Rm);

@@ -1,6 +1,6 @@
 import type { Judging } from "./judging.ts";
 import { readingBasis } from "./loading.ts";
-import { leakageConductance, seriesResistance } from "./lvArm.ts";
+import { tapLoad } from "./tapLoad.ts";
 
 /** One instrument judged on this LV arm, with a scale factor of its own. */
 export interface InstrumentRow {
@@ -24,10 +24,10 @@ export function instrumentRows(j: Judging): InstrumentRow[] {
   const polarity = sheet.number("/brief/waveform/nominal_V:polarity") as number;
   const working = polarity * (sheet.number(readingBasis(j)) as number);
   const greatest = sheet.number("working.greatest_Vpeak") as number;
-  const Rs = seriesResistance(j);
   return j.document.instruments.map((each) => {
-    const G = (R2 === null ? 0 : 1 / R2) + leakageConductance(j) + 1 / (Rs + each.resistance_ohm);
-    const scaleFactor = (1 + R1 * G) * (1 + Rs / each.resistance_ohm);
+    const { series_ohm: Rs, input_ohm: Rm, shunt_S } = tapLoad(j, each);
+    const G = (R2 === null ? 0 : 1 / R2) + shunt_S + 1 / (Rs + Rm);
+    const scaleFactor = (1 + R1 * G) * (1 + Rs / Rm);
     return {
       id: each.id,
       name: each.name,

@@ -1,6 +1,7 @@
 import { givenPerElement, type Judging, resistorOf } from "./judging.ts";
 import { isResistive, leakageConductance, lvArmResistance, seriesResistance } from "./lvArm.ts";
 import { scaleFactorFormulas } from "./scaleFactorFormulas.ts";
+import { tapLoad, tapLoadFormulas } from "./tapLoad.ts";
 
 /** Scale factor for the principal instrument and its parts on the sheet. Writes `hvArm.resistance_ohm`, `lvArm.*`, `scaleFactor.*`. */
 export function scaleFactor(j: Judging): void {
@@ -14,12 +15,7 @@ export function scaleFactor(j: Judging): void {
   sheet.given("/design/hvArm/strings", design.hvArm.strings);
   sheet.given("/brief/scaleFactor", document.brief.scaleFactor);
   const at = document.instruments.indexOf(instrument);
-  const Rm = `/instruments/${at}/resistance_ohm`;
-  sheet.given(Rm, instrument.resistance_ohm);
-  sheet.given("/design/protectors:series_ohm", seriesResistance(j));
-  sheet.given("/design/protectors:leakage_S", leakageConductance(j));
-  const Rs = "/design/protectors:series_ohm";
-  const G = "/design/protectors:leakage_S";
+  const { Rm, Rs, G } = tapLoadOnSheet(j, at);
   sheet.derive("hvArm.resistance_ohm", f.hvArm, { Re, p: "/design/hvArm/strings" });
   const R1 = "hvArm.resistance_ohm";
   sheet.derive("lvArm.wanted_ohm", f.wantedLvArm, { F: "/brief/scaleFactor", R1, Rm, Rs, G });
@@ -33,6 +29,31 @@ export function scaleFactor(j: Judging): void {
   sheet.derive("scaleFactor.predicted", f.predicted, { R1, R2p, Rs, Rm });
   sheet.derive("scaleFactor.deviation", f.deviation, { F: "scaleFactor.predicted", W: "/brief/scaleFactor" });
   sheet.derive("scaleFactor.instrumentShare", f.instrumentShare, { R2p, Rs, Rm });
+}
+
+/** Paths of the three things that the tap's dc meets; a cable that is a line adds its own resistors. */
+function tapLoadOnSheet(j: Judging, at: number) {
+  const { sheet, instrument } = j;
+  const Rm = `/instruments/${at}/resistance_ohm`;
+  const Rs = "/design/protectors:series_ohm";
+  const G = "/design/protectors:leakage_S";
+  sheet.given(Rm, instrument.resistance_ohm);
+  sheet.given(Rs, seriesResistance(j));
+  sheet.given(G, leakageConductance(j));
+  const { end, impedance_ohm } = instrument.cable;
+  if (end !== "matchedAtTap" && end !== "terminated") return { Rm, Rs, G };
+  const Z0 = `/instruments/${at}/cable/impedance_ohm`;
+  sheet.given(Z0, impedance_ohm);
+  if (end === "matchedAtTap") {
+    sheet.derive("cable.withSeries_ohm", tapLoadFormulas.series, { Rs, Z0 });
+    return { Rm, Rs: "cable.withSeries_ohm", G };
+  }
+  if (tapLoad(j).input_ohm === instrument.resistance_ohm) {
+    sheet.derive("cable.withTermination_S", tapLoadFormulas.shunt, { G, Z0 });
+    return { Rm, Rs, G: "cable.withTermination_S" };
+  }
+  sheet.derive("cable.withTermination_ohm", tapLoadFormulas.input, { Rm, Z0 });
+  return { Rm: "cable.withTermination_ohm", Rs, G };
 }
 
 /** Uncertainty from parts; needs the element voltages. */

@@ -75,4 +75,6 @@ export interface Brief {
   readonly source: SourceOfVoltage;
   readonly surroundings: Surroundings;
   readonly policy: Policy;
+  /** Square-wave generator at hand for the slow/fast check, peak to peak. */
+  readonly generator_Vpp: number;
 }

@@ -50,6 +50,15 @@ export interface LvArm {
   readonly branches: readonly LvBranch[];
   /** Which of the three matches the LV capacitance was chosen by. */
   readonly capacitanceBy: LvCapacitanceBy;
+  /** Of the LV capacitors and their connections together, in series with them; 0: left out. */
+  readonly inductance_H: number;
+}
+
+/** The connection from source to top electrode. 0: left out, none. */
+export interface Lead {
+  readonly inductance_H: number;
+  /** Damping resistor at the top electrode. */
+  readonly damping_ohm: number;
 }
 
 export interface Electrode {
@@ -97,4 +106,5 @@ export interface Design {
   readonly protectors: readonly FittedProtector[];
   readonly geometry: Geometry;
   readonly strays: Strays;
+  readonly lead: Lead;
 }

@@ -12,10 +12,18 @@ export type InstrumentFunction =
   | "data logger"
   | "microammeter";
 
+/**
+ * How the cable is counted. `lumped`: as its capacitance at the tap. Else as a line: `open` from tap to instrument; `matchedAtTap`
+ * behind a resistor of its impedance at the tap; `terminated` with its impedance across the far end.
+ */
+export type CableEnd = "lumped" | "open" | "matchedAtTap" | "terminated";
+
 export interface Cable {
   readonly length_m: number;
   readonly capacitance_F_per_m: number;
   readonly impedance_ohm: number;
+  readonly delay_s_per_m: number;
+  readonly end: CableEnd;
 }
 
 export interface Instrument {
@@ -32,6 +40,8 @@ export interface Instrument {
   /** Relative half-width of the reading, and one count. */
   readonly readingAccuracy: number;
   readonly resolution_V: number;
+  /** Noise of the trace or reading on its most sensitive range, rms. */
+  readonly noise_Vrms: number;
   /** null: dc only. */
   readonly bandwidth_Hz: number | null;
   readonly cable: Cable;

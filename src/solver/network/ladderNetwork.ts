@@ -42,7 +42,13 @@ export interface Line {
 
 export interface Source {
   readonly resistance_ohm: number;
+  /** From the electrode to earth. */
   readonly capacitance_F: number;
+  /**
+   * Across the source's own terminals, between its resistance and the inductance; absent: none. Counted where the source is the
+   * reference input, which is then the voltage that its terminals would have without the divider.
+   */
+  readonly atTerminals_F?: number;
   readonly inductance_H: number;
   readonly damping_ohm: number;
 }

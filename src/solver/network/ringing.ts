@@ -2,6 +2,7 @@ import { type Complex, complex, divide, modulus, multiply, subtract } from "../q
 import type { LadderNetwork, Reference } from "./ladderNetwork.ts";
 import { lvSide } from "./lvSide.ts";
 import { tapTwoPort } from "./tapTwoPort.ts";
+import { sourceImpedance } from "./transfer.ts";
 
 /**
  * Complex natural frequencies of a network, upper half plane. An R-C network has none; each inductance adds at most one pair
@@ -57,10 +58,7 @@ export function determinant(
     const S = complex(below.re + H.re, below.im + H.im);
     let value = S;
     if (reference === "source") {
-      const Z = complex(
-        source.resistance_ohm + source.damping_ohm + s.re * source.inductance_H,
-        s.im * source.inductance_H,
-      );
+      const Z = sourceImpedance(network, s.re, s.im);
       const shunt = complex(port.Pre[k]! + s.re * source.capacitance_F, port.Pim[k]! + s.im * source.capacitance_F);
       const a = multiply(shunt, S);
       const b = multiply(H, below);

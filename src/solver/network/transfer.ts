@@ -66,19 +66,27 @@ export function transferOf(
   return out;
 }
 
-/** Electrode voltage over the ideal source's: 1/(1 + Z (Y + s Cs)), Z = R + damping + s L. */
+/** What stands between the source's own voltage and the electrode: Z = R/(1 + s R Ct) + damping + s L, Ct across its terminals. */
+export function sourceImpedance({ source }: LadderNetwork, a: number, b: number): { re: number; im: number } {
+  const { resistance_ohm: R, damping_ohm, inductance_H, atTerminals_F: C = 0 } = source;
+  const dr = 1 + a * R * C;
+  const di = b * R * C;
+  const size = dr * dr + di * di;
+  return { re: (R * dr) / size + damping_ohm + a * inductance_H, im: (-R * di) / size + b * inductance_H };
+}
+
+/** Electrode voltage over the source's own: 1/(1 + Z (Y + s Cs)). */
 export function electrodeShare(
   network: LadderNetwork,
   { Yre, Yim }: Pick<Transfer, "Yre" | "Yim">,
   sre: Float64Array,
   sim: Float64Array,
 ): { readonly re: Float64Array; readonly im: Float64Array } {
-  const { resistance_ohm, damping_ohm, inductance_H, capacitance_F } = network.source;
+  const { capacitance_F } = network.source;
   const re = new Float64Array(sre.length);
   const im = new Float64Array(sre.length);
   for (let k = 0; k < sre.length; k++) {
-    const Zr = resistance_ohm + damping_ohm + sre[k]! * inductance_H;
-    const Zi = sim[k]! * inductance_H;
+    const { re: Zr, im: Zi } = sourceImpedance(network, sre[k]!, sim[k]!);
     const yr = Yre[k]! + sre[k]! * capacitance_F;
     const yi = Yim[k]! + sim[k]! * capacitance_F;
     const dr = 1 + Zr * yr - Zi * yi;

@@ -191,6 +191,13 @@ const rows: readonly Row[] = [
   ],
 ];
 
+/** Of an oscilloscope's trace on its most sensitive ranges, V rms; of the others one count stands for it. */
+const noise: Partial<Readonly<Record<InstrumentFunction, number>>> = {
+  "scope 1 MΩ": 3e-4,
+  "scope with 10:1 probe": 3e-3,
+  "scope 50 Ω": 2e-4,
+};
+
 /** Generic instruments by range and function, typical figures from memory; type those of the instrument at hand over them. */
 export const instruments: readonly Instrument[] = rows.map(
   ([id, name, kind, range_V, R, spread, C, spreadC, greatest, accuracy, resolution_V, bandwidth_Hz, cable]) => ({
@@ -205,6 +212,7 @@ export const instruments: readonly Instrument[] = rows.map(
     greatestInput_Vpeak: greatest,
     readingAccuracy: accuracy,
     resolution_V,
+    noise_Vrms: noise[kind] ?? resolution_V,
     bandwidth_Hz,
     cable: { length_m: kind === "scope with 10:1 probe" ? 0.05 : 1, ...cables[cable] },
   }),

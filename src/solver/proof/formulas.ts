@@ -1,15 +1,16 @@
 import { capacitiveLadderRecord } from "../checks/capacitiveLadder.ts";
 import { chargeFormulas } from "../checks/charge.ts";
 import { strayFormulas } from "../checks/columnStrays.ts";
+import { edgeFormulas } from "../checks/edgeFormulas.ts";
 import { faultRecord } from "../checks/faultRow.ts";
 import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
-import { fieldRecord } from "../checks/solvedStrays.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
+import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { estimateFormulas } from "../field/estimateFormulas.ts";
 import { fieldRecord } from "../field/fieldRecord.ts";
@@ -32,6 +33,8 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     protectorFormulas,
     responseFormulas,
     estimateFormulas,
+    edgeFormulas,
+    tapLoadFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])

@@ -1,17 +1,21 @@
+import { judgeCable } from "../checks/cableLine.ts";
 import { charge } from "../checks/charge.ts";
 import type { ColumnField } from "../checks/columnField.ts";
+import { edgeOnSheet } from "../checks/edge.ts";
 import { worstFault } from "../checks/faultRow.ts";
 import { faults } from "../checks/faults.ts";
 import { instrumentRows } from "../checks/instruments.ts";
 import { insulation } from "../checks/insulation.ts";
-import { judging } from "../checks/judging.ts";
+import { type Judging, judging } from "../checks/judging.ts";
+import { judgeLead } from "../checks/lead.ts";
 import { judgeLoading, loading } from "../checks/loading.ts";
 import { judgeLvArm } from "../checks/lvArm.ts";
+import { judgeLvSpike } from "../checks/lvSpike.ts";
 import { misuse } from "../checks/misuse.ts";
 import { networkOf } from "../checks/networkOf.ts";
 import { judgeProtectors } from "../checks/protectors.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
-import { show } from "../checks/show.ts";
+import { type Show, show } from "../checks/show.ts";
 import { judgeStress } from "../checks/stress.ts";
 import { stringCapacitance } from "../checks/stringCapacitance.ts";
 import { workingVoltages } from "../checks/workingVoltage.ts";
@@ -49,6 +53,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   const rows = faults(j, string, show);
   charge(j, show);
   const { frequency, step } = response(j, networkOf(j, string), show);
+  judgeEdge(j, show);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -67,6 +72,14 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
       "clear",
     ),
   });
+}
+
+/** The cable, the HV lead and the LV arm's inductance against the edge; needs the figures of the response. */
+function judgeEdge(j: Judging, show: Show): void {
+  const edge = edgeOnSheet(j);
+  judgeCable(j, edge, show);
+  judgeLead(j, show);
+  judgeLvSpike(j, edge, show);
 }
 
 const rank: Record<Level, number> = { stop: 0, caution: 1, clear: 2 };

@@ -19,6 +19,7 @@ export type UnitName =
   | "1/V"
   | "K/W"
   | "F/m"
+  | "s/m"
   | "dB"
   | "deg";
 
@@ -50,6 +51,7 @@ export const units: Readonly<Record<UnitName, UnitRecord>> = {
   "1/V": { symbol: "/V", spellings: ["/V", "1/V"], prefixes: false },
   "K/W": { symbol: "K/W", spellings: ["K/W"], prefixes: false },
   "F/m": { symbol: "F/m", spellings: ["F/m"], prefixes: true },
+  "s/m": { symbol: "s/m", spellings: ["s/m"], prefixes: true },
   dB: { symbol: "dB", spellings: ["dB"], prefixes: false },
   deg: { symbol: "°", spellings: ["°", "deg"], prefixes: false },
 };

@@ -1,5 +1,5 @@
 import { type Judging, judging } from "../checks/judging.ts";
-import { leakageConductance, seriesResistance } from "../checks/lvArm.ts";
+import { tapLoad } from "../checks/tapLoad.ts";
 import { type WorkingVoltages, workingVoltages } from "../checks/workingVoltage.ts";
 import type { Design } from "../job/design.ts";
 import type { DividerDocument } from "../job/document.ts";
@@ -20,7 +20,7 @@ export interface Asking {
 const bare: Design = {
   follows: true,
   hvArm: { strings: 1, elements: [] },
-  lvArm: { stays: "withDivider", branches: [], capacitanceBy: "none" },
+  lvArm: { stays: "withDivider", branches: [], capacitanceBy: "none", inductance_H: 0 },
   protectors: [],
   geometry: {
     columnDiameter_m: 0.01,
@@ -35,6 +35,7 @@ const bare: Design = {
     wallDistance_m: null,
   },
   strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
+  lead: { inductance_H: 0, damping_ohm: 0 },
 };
 
 const numbersAsked = (document: DividerDocument): readonly (readonly [string, number, number, number, string])[] => {
@@ -89,7 +90,7 @@ export function asking(document: DividerDocument): Result<Asking> {
   const { scaleFactor } = document.brief;
   const j = judging({ ...document, design: { ...(document.design ?? bare) } });
   const working = workingVoltages(document.brief, j.sheet);
-  const seriesProtector_ohm = seriesResistance(j);
+  const { series_ohm: seriesProtector_ohm, shunt_S } = tapLoad(j);
   const tapScaleFactor = scaleFactor / (1 + seriesProtector_ohm / instrument.resistance_ohm);
   if (tapScaleFactor <= 1) {
     const why = "The series protector alone divides by more than the wanted scale factor.";
@@ -99,8 +100,14 @@ export function asking(document: DividerDocument): Result<Asking> {
     j,
     working,
     seriesProtector_ohm,
-    leakage_S: leakageConductance(j),
+    leakage_S: shunt_S + terminationBeside(j),
     tapScaleFactor,
     at,
   });
+}
+
+/** A termination beside the instrument counts like a leakage at the tap: near enough for a search, the proof has it exact. */
+function terminationBeside(j: Judging): number {
+  const { input_ohm } = tapLoad(j);
+  return input_ohm === j.instrument.resistance_ohm ? 0 : 1 / j.instrument.cable.impedance_ohm;
 }

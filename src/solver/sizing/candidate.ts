@@ -92,10 +92,16 @@ function designOf(build: Build, limits: Limits, branches: Design["lvArm"]["branc
         capacitance_F: 0,
       })),
     },
-    lvArm: { stays: "withDivider", branches, capacitanceBy: "none" },
+    lvArm: {
+      stays: "withDivider",
+      branches,
+      capacitanceBy: "none",
+      inductance_H: document.design?.lvArm.inductance_H ?? 0,
+    },
     protectors: document.design?.protectors ?? [],
     geometry: geometryOf(limits, build.elements, build.length_m, envelope(family.bodyDiameter_m, build.strings)),
     strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
+    lead: document.design?.lead ?? { inductance_H: 0, damping_ohm: 0 },
   };
 }
 

@@ -60,7 +60,7 @@ const scope: Instrument = {
   capacitance_F: 18e-12,
   capacitanceSpread_F: 3e-12,
   greatestInput_Vpeak: 300,
-  cable: { length_m: 1.2, capacitance_F_per_m: 95e-12, impedance_ohm: 50 },
+  cable: { length_m: 1.2, capacitance_F_per_m: 95e-12, impedance_ohm: 50, delay_s_per_m: 5e-9, end: "lumped" },
 };
 const pulse: Over = {
   brief: { wantedUncertainty: 0.03, band_Hz: [0, 3e5] },

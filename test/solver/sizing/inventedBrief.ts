@@ -64,8 +64,9 @@ export const meter: Instrument = {
   greatestInput_Vpeak: 1000,
   readingAccuracy: 0.005,
   resolution_V: 0.001,
+  noise_Vrms: 0.001,
   bandwidth_Hz: null,
-  cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50 },
+  cable: { length_m: 1, capacitance_F_per_m: 1e-10, impedance_ohm: 50, delay_s_per_m: 5e-9, end: "lumped" },
 };
 
 export interface Over {
@@ -80,6 +81,7 @@ export const brief = (over: Over = {}): Brief => ({
   scaleFactor: 1000,
   wantedUncertainty: 0.1,
   band_Hz: [0, 0],
+  generator_Vpp: 20,
   ...over.brief,
   waveform: {
     kind: "dc",

@@ -4,7 +4,7 @@ import { linkReach, outOfReach } from "../../../src/ui/size/linkReach.ts";
 import { expectRelative } from "../../support/relative.ts";
 
 const lvArm = (branches: readonly LvBranch[]) =>
-  ({ stays: "withDivider", capacitanceBy: "flattest", branches }) as const;
+  ({ stays: "withDivider", capacitanceBy: "flattest", inductance_H: 0, branches }) as const;
 const link = (capacitance_F: number): LvBranch => ({ name: "K", part: "c", link: true, capacitance_F, fitted: false });
 const trimmer: LvBranch = { name: "T", part: "t", trimmer: { least_F: 10e-12, greatest_F: 60e-12, setting: 0.5 } };
 const fixed: LvBranch = { name: "C", part: "c", capacitance_F: 1e-9 };
