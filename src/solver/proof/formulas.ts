@@ -14,6 +14,7 @@ import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { estimateFormulas } from "../field/estimateFormulas.ts";
 import { fieldRecord } from "../field/fieldRecord.ts";
+import { underElectrode } from "../field/underElectrode.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
@@ -33,8 +34,12 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     protectorFormulas,
     responseFormulas,
     estimateFormulas,
+<<<<<<< HEAD
     edgeFormulas,
     tapLoadFormulas,
+=======
+    underElectrode,
+>>>>>>> field
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
