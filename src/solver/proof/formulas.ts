@@ -34,12 +34,9 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     protectorFormulas,
     responseFormulas,
     estimateFormulas,
-<<<<<<< HEAD
     edgeFormulas,
     tapLoadFormulas,
-=======
     underElectrode,
->>>>>>> field
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
