@@ -14,6 +14,7 @@ import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { estimateFormulas } from "../field/estimateFormulas.ts";
 import { fieldRecord } from "../field/fieldRecord.ts";
+import { pottingFormulas } from "../field/potting.ts";
 import { underElectrode } from "../field/underElectrode.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
@@ -37,6 +38,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     edgeFormulas,
     tapLoadFormulas,
     underElectrode,
+    pottingFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
