@@ -1,6 +1,7 @@
 /** The solver's only door: the rest of the program imports from here and from nowhere deeper. */
 export * from "./build/partsList.ts";
 export * from "./build/partsListCsv.ts";
+export { type ColumnField, fieldAsked, isFieldOf, solveColumnField } from "./checks/columnField.ts";
 export type { FaultRow } from "./checks/faultRow.ts";
 export type { InstrumentRow } from "./checks/instruments.ts";
 export { plainPointer } from "./checks/judging.ts";
@@ -8,7 +9,8 @@ export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";
 export { answerField, type FieldAnswer } from "./field/answerField.ts";
 export { type BalancingElectrode, balancingElectrode } from "./field/balancingElectrode.ts";
 export { estimateFormulas } from "./field/estimateFormulas.ts";
-export type * from "./field/fieldGeometry.ts";
+export * from "./field/fieldGeometry.ts";
+export { fieldRecord } from "./field/fieldRecord.ts";
 export { type InstantEstimate, instantEstimate } from "./field/instantEstimate.ts";
 export { type Neighbour, proximity } from "./field/proximity.ts";
 export { shapeFault } from "./field/shapeFault.ts";

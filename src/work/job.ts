@@ -1,15 +1,20 @@
 /** One numbered job and its one outcome. Plain data only: everything here crosses to a worker and back. */
-import type { DividerDocument, Proof, Refusal, ResistorFamily, Sizing } from "../solver/index.ts";
+import type { ColumnField, DividerDocument, Proof, Refusal, ResistorFamily, Sizing } from "../solver/index.ts";
 
-/** *check*: the current design, newest job only. *long*: search (and later field, Monte Carlo). */
+/** The field solved last; "solve": solve it within the job where the document asks for it and it is another. */
+export type FieldGiven = ColumnField | null | "solve";
+
+/** *check*: the current design, newest job only. *long*: search; *field*: the field of the drawing. */
 export type Job =
-  | { readonly kind: "prove"; readonly document: DividerDocument }
+  | { readonly kind: "prove"; readonly document: DividerDocument; readonly field?: FieldGiven }
+  | { readonly kind: "field"; readonly document: DividerDocument }
   | { readonly kind: "size"; readonly document: DividerDocument; readonly top: number }
   | {
       /** The search when `design.follows`, then the proof of the design chosen. */
       readonly kind: "follow";
       readonly document: DividerDocument;
       readonly top: number;
+      readonly field?: FieldGiven;
     };
 
 export interface Outcome {
@@ -17,6 +22,10 @@ export interface Outcome {
   readonly document: DividerDocument;
   readonly sizing: Sizing | null;
   readonly proof: Proof | null;
+  /** The field of the drawing: solved by this job, or the one it was given. */
+  readonly field: ColumnField | null;
+  /** The document asks for the field of its drawing and the proof had to do without. */
+  readonly awaitsField: boolean;
 }
 
 export type JobMessage = { readonly number: number; readonly job: Job };

@@ -1,10 +1,13 @@
-import type { Candidate, DividerDocument, Proof, Result, Sizing } from "../solver/index.ts";
-import type { Job, Outcome } from "./job.ts";
+import type { Candidate, ColumnField, DividerDocument, FieldGeometry, Proof, Result, Sizing } from "../solver/index.ts";
+import type { FieldGiven, Job, Outcome } from "./job.ts";
 
 /** What a job needs of the solver. */
 export interface SolverDoor {
   readonly size: (document: DividerDocument, options: { readonly top: number }) => Result<Sizing>;
-  readonly prove: (document: DividerDocument) => Result<Proof>;
+  readonly prove: (document: DividerDocument, field: ColumnField | null) => Result<Proof>;
+  readonly fieldAsked: (document: DividerDocument) => Result<FieldGeometry | null>;
+  readonly isFieldOf: (field: ColumnField, geometry: FieldGeometry) => boolean;
+  readonly solveField: (geometry: FieldGeometry) => ColumnField;
   readonly takeCandidate: (document: DividerDocument, candidate: Candidate) => DividerDocument;
 }
 
@@ -17,32 +20,58 @@ export const jobsOf =
   (job, progress = () => {}) => {
     switch (job.kind) {
       case "prove":
-        return provenOf(door, job.document, null);
+        return provenOf(door, job.document, null, job.field ?? null);
+      case "field":
+        return fieldOf(door, job.document);
       case "size": {
         const sizing = door.size(job.document, { top: job.top });
-        return sizing.ok ? { ok: true, value: { document: job.document, sizing: sizing.value, proof: null } } : sizing;
+        return sizing.ok ? ok({ document: job.document, sizing: sizing.value }) : sizing;
       }
       case "follow":
-        return followed(door, job.document, job.top, progress);
+        return followed(door, job, progress);
     }
   };
 
-function provenOf(door: SolverDoor, document: DividerDocument, sizing: Sizing | null): Result<Outcome> {
-  const proof = door.prove(document);
-  return proof.ok ? { ok: true, value: { document, sizing, proof: proof.value } } : proof;
+const nothing = { sizing: null, proof: null, field: null, awaitsField: false };
+const ok = (found: Pick<Outcome, "document"> & Partial<Outcome>): Result<Outcome> => ({
+  ok: true,
+  value: { ...nothing, ...found },
+});
+
+/** The proof, with the field of the drawing where the document asks for it and it is at hand. */
+function provenOf(
+  door: SolverDoor,
+  document: DividerDocument,
+  sizing: Sizing | null,
+  given: FieldGiven,
+): Result<Outcome> {
+  const asked = door.fieldAsked(document);
+  const geometry = asked.ok ? asked.value : null;
+  const held = given === "solve" ? (geometry === null ? null : door.solveField(geometry)) : given;
+  const field = held !== null && geometry !== null && door.isFieldOf(held, geometry) ? held : null;
+  const proof = door.prove(document, field);
+  if (!proof.ok) return proof;
+  return ok({ document, sizing, proof: proof.value, field, awaitsField: geometry !== null && field === null });
+}
+
+function fieldOf(door: SolverDoor, document: DividerDocument): Result<Outcome> {
+  const asked = door.fieldAsked(document);
+  if (!asked.ok) return asked;
+  return ok({ document, field: asked.value === null ? null : door.solveField(asked.value) });
 }
 
 /** A design that stands is proved as it is; one that follows is chosen first. Without a candidate the old one is judged. */
-function followed(door: SolverDoor, document: DividerDocument, top: number, progress: Progress): Result<Outcome> {
+function followed(door: SolverDoor, job: Extract<Job, { kind: "follow" }>, progress: Progress): Result<Outcome> {
+  const { document, top, field = null } = job;
   const { design } = document;
-  if (design !== null && !design.follows) return provenOf(door, document, null);
+  if (design !== null && !design.follows) return provenOf(door, document, null, field);
   const sizing = door.size(document, { top });
   if (!sizing.ok) return sizing;
   progress(0.5);
   const best = sizing.value.candidates[0];
-  if (best !== undefined) return provenOf(door, following(door.takeCandidate(document, best)), sizing.value);
-  if (design !== null) return provenOf(door, document, sizing.value);
-  return { ok: true, value: { document, sizing: sizing.value, proof: null } };
+  if (best !== undefined) return provenOf(door, following(door.takeCandidate(document, best)), sizing.value, field);
+  if (design !== null) return provenOf(door, document, sizing.value, field);
+  return ok({ document, sizing: sizing.value });
 }
 
 const following = (document: DividerDocument): DividerDocument =>

@@ -1,6 +1,19 @@
-import { prove, size, takeCandidate } from "../solver/index.ts";
-import { cachedSize } from "./cache.ts";
+import {
+  type ColumnField,
+  type FieldGeometry,
+  fieldAsked,
+  isFieldOf,
+  prove,
+  size,
+  solveColumnField,
+  takeCandidate,
+} from "../solver/index.ts";
+import { Cache, cachedSize, canonical } from "./cache.ts";
 import { jobsOf } from "./outcomeOf.ts";
 
-/** Runs one job here and now. Searches are answered from memory when their inputs have not changed. */
-export const runJob = jobsOf({ size: cachedSize(size), prove, takeCandidate });
+const fields = new Cache<ColumnField>(24);
+const solveField = (geometry: FieldGeometry): ColumnField =>
+  fields.get(canonical(geometry), () => solveColumnField(geometry));
+
+/** Runs one job here and now. Searches and fields are answered from memory when their inputs have not changed. */
+export const runJob = jobsOf({ size: cachedSize(size), prove, takeCandidate, fieldAsked, isFieldOf, solveField });

@@ -3,25 +3,32 @@ import type { WorkerLike } from "./workerLike.ts";
 
 /** A new check waits this long for the one that runs before it is terminated. */
 const checkPatience_ms = 1000;
+/** A drawing that is dragged asks again and again: what runs is let finish, so that something comes while it moves. */
+const fieldPatience_ms = 3000;
 
 export interface Runner {
   /** The current design: kept warm, newest job only; one asked for while another runs waits, and replaces any that waits. */
   readonly check: Lane;
   /** Search and the like: a new one ends the one that runs. */
   readonly long: Lane;
+  /** The field of the drawing: one asked for while another runs waits, and replaces any that waits. */
+  readonly field: Lane;
   readonly close: () => void;
 }
 
-/** Two lanes of work, each with a worker of its own, started when first needed. */
+/** Three lanes of work, each with a worker of its own, started when first needed. */
 export function createRunner(startWorker: () => WorkerLike, now: () => number = Date.now): Runner {
   const check = new Lane({ startWorker, now, patience_ms: checkPatience_ms });
   const long = new Lane({ startWorker, now, patience_ms: 0 });
+  const field = new Lane({ startWorker, now, patience_ms: fieldPatience_ms });
   return {
     check,
     long,
+    field,
     close: () => {
       check.close();
       long.close();
+      field.close();
     },
   };
 }

@@ -1,6 +1,14 @@
 import { readFileSync } from "node:fs";
 import { restoreDocument } from "../../src/file/restore.ts";
-import { type DividerDocument, prove, size, takeCandidate } from "../../src/solver/index.ts";
+import {
+  type DividerDocument,
+  fieldAsked,
+  isFieldOf,
+  prove,
+  size,
+  solveColumnField,
+  takeCandidate,
+} from "../../src/solver/index.ts";
 import { jobsOf } from "../../src/work/outcomeOf.ts";
 import { fixed, invented } from "../support/builders.ts";
 import type { Benchmark } from "./benchmark.ts";
@@ -23,7 +31,7 @@ const wide = invented({
   branches: [fixed("R2a", 2.4e6), fixed("R2b", 2.4e6)],
 });
 
-const follow = jobsOf({ size, prove, takeCandidate });
+const follow = jobsOf({ size, prove, takeCandidate, fieldAsked, isFieldOf, solveField: solveColumnField });
 /** A keystroke in the voltage: searched, taken and proved anew, nothing remembered. */
 function keystroke(document: DividerDocument) {
   const { design, brief } = document;

@@ -24,7 +24,12 @@ export class FakeWorker implements WorkerLike {
   /** Answers job `number` with a document named after it. */
   finish(number: number): void {
     const { document } = this.sent.find((sent) => sent.number === number)!.job;
-    this.say({ number, kind: "done", outcome: { document, sizing: null, proof: null }, took_ms: 1 });
+    this.say({
+      number,
+      kind: "done",
+      outcome: { document, sizing: null, proof: null, field: null, awaitsField: false },
+      took_ms: 1,
+    });
   }
 }
 

@@ -1,5 +1,13 @@
 import { describe, expect, it } from "vitest";
-import type { Candidate, DividerDocument, Proof, Sizing } from "../../src/solver/index.ts";
+import type {
+  Candidate,
+  ColumnField,
+  Design,
+  DividerDocument,
+  FieldGeometry,
+  Proof,
+  Sizing,
+} from "../../src/solver/index.ts";
 import { answer } from "../../src/work/answer.ts";
 import { Cache, cachedSize, canonical, sizingKey } from "../../src/work/cache.ts";
 import { inlineWorker } from "../../src/work/inline.ts";
@@ -17,14 +25,23 @@ function door(candidates: Candidate[] = [candidate]) {
       calls.push(`size ${top}`);
       return { ok: true, value: sizingWith(candidates) };
     },
-    prove: (document) => {
-      calls.push(`prove ${document.design === null ? "nothing" : document.design.follows}`);
+    prove: (document, field) => {
+      calls.push(
+        `prove ${document.design === null ? "nothing" : document.design.follows}${field ? " with field" : ""}`,
+      );
       return { ok: true, value: { level: "clear" } as Proof };
+    },
+    fieldAsked: ({ design }) => ({ ok: true, value: design?.strays.from === "field" ? geometryOf(design) : null }),
+    isFieldOf: (field, geometry) => field.geometry.columnLength_m === geometry.columnLength_m,
+    solveField: (geometry) => {
+      calls.push("field");
+      return { geometry, strays: {} as ColumnField["strays"] };
     },
     takeCandidate: (document, { design }) => ({ ...document, design: { ...design, follows: false } }),
   });
   return { calls, run };
 }
+const geometryOf = ({ geometry }: Design) => ({ ...geometry, elements: 3 }) as unknown as FieldGeometry;
 const standing = (): DividerDocument => {
   const document = inventedDesign();
   return { ...document, design: { ...document.design!, follows: false } };
@@ -54,6 +71,42 @@ describe("a job that follows the brief", () => {
     expect(calls).toEqual(["size 1", "prove true", "size 1"]);
     expect(none.ok && none.value.proof).toBeNull();
     expect(none.ok && none.value.sizing).not.toBeNull();
+  });
+});
+
+describe("a design whose strays come from the field of its drawing", () => {
+  const asking = (length = 1): DividerDocument => {
+    const document = standing();
+    const design = document.design!;
+    return {
+      ...document,
+      design: {
+        ...design,
+        strays: { ...design.strays, from: "field" },
+        geometry: { ...design.geometry, columnLength_m: length },
+      },
+    };
+  };
+  it("is proved without it at once, and says that it waits", () => {
+    const { calls, run } = door();
+    const outcome = run({ kind: "prove", document: asking() });
+    expect(calls).toEqual(["prove false"]);
+    expect(outcome.ok && outcome.value.awaitsField).toBe(true);
+  });
+  it("is proved with a field of the same drawing, never with one of another", () => {
+    const { calls, run } = door();
+    const solved = run({ kind: "field", document: asking() });
+    const field = solved.ok ? solved.value.field : null;
+    const same = run({ kind: "prove", document: asking(), field });
+    const other = run({ kind: "prove", document: asking(2), field });
+    expect(calls).toEqual(["field", "prove false with field", "prove false"]);
+    expect(same.ok && same.value.awaitsField).toBe(false);
+    expect(other.ok && other.value.awaitsField).toBe(true);
+  });
+  it("is solved within the job where that is asked, as the shell does", () => {
+    const { calls, run } = door();
+    run({ kind: "prove", document: asking(), field: "solve" });
+    expect(calls).toEqual(["field", "prove false with field"]);
   });
 });
 

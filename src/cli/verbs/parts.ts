@@ -23,7 +23,7 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
     needsDesign(document);
     const list = partsList(document);
     if (!list.ok) throw new Unusable(refusalText(list.error));
-    const outcome = runJob({ kind: "prove", document });
+    const outcome = runJob({ kind: "prove", document, field: "solve" });
     if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
     outside.print(partsListCsv(list.value, flavour as CsvFlavour));
     const stops = outcome.value.proof!.findings.filter((finding) => finding.level === "stop");

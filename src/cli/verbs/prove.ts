@@ -21,10 +21,10 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
     const times = listOf(options.times, "times", "s");
     const document = openDocument(file, outside);
     needsDesign(document);
-    const outcome = runJob({ kind: "prove", document });
+    const outcome = runJob({ kind: "prove", document, field: "solve" });
     if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
     const proof = outcome.value.proof!;
-    const asked = proveAt(document, frequencies ?? [], times ?? []);
+    const asked = proveAt(document, frequencies ?? [], times ?? [], outcome.value.field);
     const { sheet, frequency, step, ...rest } = proof;
     outside.print(
       `${JSON.stringify(

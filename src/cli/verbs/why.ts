@@ -17,7 +17,7 @@ Exit 0: printed. 2: no such figure, or unusable input.
     const { file, options, rest } = readArguments(words, ["element"], 2);
     const document = openDocument(file, outside);
     needsDesign(document);
-    const outcome = runJob({ kind: "prove", document });
+    const outcome = runJob({ kind: "prove", document, field: "solve" });
     if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
     const { sheet, origins } = outcome.value.proof!;
     const index = options.element === undefined ? null : wholeNumber(options.element, "element", 1, 5000, 1) - 1;

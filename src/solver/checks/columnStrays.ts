@@ -48,6 +48,10 @@ export interface ColumnStrays {
   readonly toEarth_F: readonly number[];
   readonly toElectrode_F: readonly number[];
   readonly electrodeToTap_F: number;
+  /** Across each element, beside its own capacitance; none by the formula. */
+  readonly series_F: readonly number[] | null;
+  /** From the tap to earth, across the LV arm. */
+  readonly tapToEarth_F: number;
 }
 
 /** Writes `strays.*` on the sheet and returns what each inner node carries; 0 where the formula gives none. */
@@ -66,5 +70,11 @@ export function columnStrays(geometry: Geometry, n: number, sheet: Sheet): Colum
     Ce: "strays.toEarth_F",
   });
   const each = (total: number | null) => new Array<number>(Math.max(n - 1, 0)).fill((total ?? 0) / n);
-  return { toEarth_F: each(toEarth), toElectrode_F: each(toElectrode), electrodeToTap_F: 0 };
+  return {
+    toEarth_F: each(toEarth),
+    toElectrode_F: each(toElectrode),
+    electrodeToTap_F: 0,
+    series_F: null,
+    tapToEarth_F: 0,
+  };
 }

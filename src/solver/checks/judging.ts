@@ -6,6 +6,7 @@ import type { Cure, Finding, Level } from "../standards/finding.ts";
 import { marginOf } from "../standards/finding.ts";
 import { Sheet } from "../standards/sheet.ts";
 import type { Source } from "../standards/source.ts";
+import type { ColumnField } from "./columnField.ts";
 
 /** Everything a check reads and writes: the document's design in hand, the sheet, the findings so far. */
 export interface Judging {
@@ -15,17 +16,19 @@ export interface Judging {
   readonly parts: ReadonlyMap<string, Part>;
   readonly sheet: Sheet;
   readonly findings: Finding[];
+  /** The solved field of the drawing, where there is one for it. */
+  readonly field: ColumnField | null;
 }
 
 /** A judgement about to begin: an empty sheet, no findings. Throws where the document has no design. */
-export function judging(document: DividerDocument): Judging {
+export function judging(document: DividerDocument, field: ColumnField | null = null): Judging {
   const { design } = document;
   if (design === null) throw new Error("judging needs a design");
   const instrument = document.instruments.find((each) => each.id === document.principal);
   if (instrument === undefined)
     throw new Error(`the principal instrument ${document.principal} is not in the document`);
   const parts = new Map(document.parts.map((part) => [part.id, part]));
-  return { document, design, instrument, parts, sheet: new Sheet(), findings: [] };
+  return { document, design, instrument, parts, sheet: new Sheet(), findings: [], field };
 }
 
 function partOf<K extends Part["kind"]>(

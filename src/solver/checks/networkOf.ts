@@ -37,7 +37,8 @@ export function networkOf(j: Judging, string: StringCapacitance, instrument: Ins
     },
     protector: {
       resistance_ohm: leakage === 0 ? Number.POSITIVE_INFINITY : 1 / leakage,
-      capacitance_F: protectorCapacitance(j, "divider"),
+      // The tap's own stray to earth lies beside the limiting parts.
+      capacitance_F: protectorCapacitance(j, "divider") + string.strays.tapToEarth_F,
     },
     cable: { capacitance_F: lumped_F(instrument.cable), line: lineOf(instrument.cable) },
     instrument: {

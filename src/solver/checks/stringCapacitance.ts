@@ -3,6 +3,7 @@ import { computedHere } from "../standards/source.ts";
 import { type CapacitiveTwoPort, capacitiveLadder, capacitiveLadderRecord } from "./capacitiveLadder.ts";
 import { type ColumnStrays, columnStrays, strayFormulas } from "./columnStrays.ts";
 import { givenPerElement, type Judging, plainFinding } from "./judging.ts";
+import { solvedStrays } from "./solvedStrays.ts";
 
 const F = (symbol: string, meaning: string) => ({ symbol, unit: "F", meaning });
 
@@ -21,6 +22,19 @@ export const capacitanceFormulas = {
     source: computedHere("parallel sum"),
     compute: ({ p, body, fitted }) => p * (body + fitted),
   }),
+  withStray: formula({
+    id: "capacitance.withStray",
+    title: "Capacitance across an element with the column's own",
+    statement: "{=} = {C} + {Cs}",
+    result: F("C_i'", "across one element"),
+    inputs: {
+      C: F("C_i", "element capacitance"),
+      Cs: F("C_s,i", "couplings along the column, folded onto the element"),
+    },
+    holds: "Exact for an evenly shared voltage; couplings over several elements are folded onto each of them.",
+    source: computedHere("parallel sum"),
+    compute: ({ C, Cs }) => C + Cs,
+  }),
   string: formula<never, "C">({
     id: "capacitance.string",
     title: "HV arm capacitance, string alone",
@@ -35,6 +49,7 @@ export const capacitanceFormulas = {
 };
 
 export interface StringCapacitance {
+  /** Each element with what the field puts across it. */
   readonly element_F: readonly number[];
   readonly strays: ColumnStrays;
   readonly twoPort: CapacitiveTwoPort;
@@ -58,23 +73,42 @@ export function stringCapacitance(j: Judging): StringCapacitance {
   ) as number[];
   sheet.derive("hvArm.capacitance_F", capacitanceFormulas.string, { C: "element.capacitance_F" });
   const strays = straysOf(j, n);
-  const twoPort = capacitiveLadder(element_F, strays.toEarth_F, strays.toElectrode_F, strays.electrodeToTap_F);
-  const inputs = { C: "element.capacitance_F", Ce: "strays.eachToEarth_F", Ch: "strays.eachToElectrode_F" };
+  const whole = withSeries(j, element_F, strays);
+  const twoPort = capacitiveLadder(whole.element_F, strays.toEarth_F, strays.toElectrode_F, strays.electrodeToTap_F);
+  const inputs = { C: whole.path, Ce: "strays.eachToEarth_F", Ch: "strays.eachToElectrode_F" };
   sheet.given("strays.eachToEarth_F", strays.toEarth_F);
   sheet.given("strays.eachToElectrode_F", strays.toElectrode_F);
   sheet.solved("hvArm.effectiveCapacitance_F", capacitiveLadderRecord, twoPort.transfer_F, inputs, twoPort.residual);
   sheet.solved("input.capacitance_F", capacitiveLadderRecord, twoPort.electrode_F, inputs, twoPort.residual);
-  return { element_F, strays, twoPort };
+  return { element_F: whole.element_F, strays, twoPort };
+}
+
+/** The elements with the couplings along the column that the field has folded onto them. */
+function withSeries(j: Judging, element_F: readonly number[], { series_F }: ColumnStrays) {
+  if (series_F === null) return { element_F, path: "element.capacitance_F" };
+  j.sheet.given("strays.eachSeries_F", series_F);
+  const path = "element.withStray_F";
+  const each = j.sheet.deriveEach(
+    path,
+    capacitanceFormulas.withStray,
+    { C: "element.capacitance_F", Cs: "strays.eachSeries_F" },
+    element_F.length,
+  );
+  return { element_F: each as number[], path };
 }
 
 function straysOf(j: Judging, n: number): ColumnStrays {
   const { strays, geometry } = j.design;
-  if (strays.from !== "typed") {
-    const found = columnStrays(geometry, n, j.sheet);
-    if (j.sheet.number("strays.toEarth_F") === null) notLonger(j);
-    if (strays.from === "field") notSolved(j);
-    return found;
-  }
+  if (strays.from === "typed") return typedStrays(j, n);
+  const solved = strays.from === "field" ? solvedStrays(j, n) : null;
+  if (solved !== null) return solved;
+  const found = columnStrays(geometry, n, j.sheet);
+  if (j.sheet.number("strays.toEarth_F") === null) notLonger(j);
+  return found;
+}
+
+function typedStrays(j: Judging, n: number): ColumnStrays {
+  const { strays } = j.design;
   const inner = Math.max(n - 1, 0);
   const padded = (list: readonly number[]) => Array.from({ length: inner }, (_, i) => list[i] ?? 0);
   for (const [list, of] of [
@@ -89,7 +123,8 @@ function straysOf(j: Judging, n: number): ColumnStrays {
     "strays.toEarth_F",
     toEarth_F.reduce((sum, c) => sum + c, 0),
   );
-  return { toEarth_F, toElectrode_F: padded(strays.toElectrode_F), electrodeToTap_F: strays.electrodeToTap_F };
+  const toElectrode_F = padded(strays.toElectrode_F);
+  return { toEarth_F, toElectrode_F, electrodeToTap_F: strays.electrodeToTap_F, series_F: null, tapToEarth_F: 0 };
 }
 
 function notLonger(j: Judging): void {
@@ -99,17 +134,6 @@ function notLonger(j: Judging): void {
     what: "stray capacitance of the column",
     reason:
       "The column is not longer than it is wide: the formula for its strays does not hold, and none were counted. Correct its length or diameter, or type the strays.",
-    source: strayFormulas.toEarth.source,
-  });
-}
-
-function notSolved(j: Judging): void {
-  plainFinding(j, {
-    id: "strays.field",
-    level: "caution",
-    what: "stray capacitance by the field solve",
-    reason:
-      "The field of the drawing is not solved here: the closed formula of a column was used instead, and knows no ring, wall or screen. Type the strays where you know them.",
     source: strayFormulas.toEarth.source,
   });
 }

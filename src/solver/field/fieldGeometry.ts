@@ -31,7 +31,8 @@ export interface FieldElectrode {
 /**
  * `bands`: node i is an open thin band at i · pitch. `distributed`: the outer surface of the whole column, its potential running
  * evenly from node to node (a graded film on a body); charge is shared between two nodes as the potential is. The field inside
- * that body is the string's own capacitance and is not counted as stray.
+ * that body is the string's own capacitance and is not counted as stray. Single couplings of a film mean little (neighbours share
+ * the charge between them, and may come out negative); its sums and M do not depend on the number of elements.
  */
 export type Idealisation = "bands" | "distributed";
 

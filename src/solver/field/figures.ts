@@ -1,4 +1,5 @@
 import { factor, solve } from "../quantities/linear.ts";
+import { coupling, toEarth } from "./couplings.ts";
 
 /** What a ladder and a screen need of Maxwell's matrix; F. Lists of inner nodes start with node 1, of elements with element 1. */
 export interface StrayFigures {
@@ -29,16 +30,17 @@ export function strayFigures(C: Float64Array): StrayFigures {
   const all = Array.from({ length: nodes }, (_, i) => i);
   const inner = all.slice(1, n);
   const sum = (list: readonly number[], of: (i: number) => number) => list.reduce((total, i) => total + of(i), 0);
-  const earth = (i: number) => sum(all, (j) => at(i, j));
+  const earth = (i: number) => toEarth(C, nodes, i);
+  const between = (i: number, j: number) => coupling(C, nodes, i, j);
   const charge = (i: number) => sum(all, (j) => at(i, j) * x(j));
   return {
     toEarth_F: inner.map(earth),
-    toElectrode_F: inner.map((i) => -at(i, n)),
-    tapToElectrode_F: -at(0, n),
+    toElectrode_F: inner.map((i) => between(i, n)),
+    tapToElectrode_F: between(0, n),
     tapToEarth_F: earth(0),
-    adjacent_F: all.slice(1).map((i) => -at(i - 1, i)),
+    adjacent_F: all.slice(1).map((i) => between(i - 1, i)),
     ceEff_F: 6 * sum(inner, (i) => earth(i) * x(i) * (1 - x(i))),
-    chEff_F: 3 * sum(inner, (i) => -at(i, n) * (1 - x(i)) ** 2),
+    chEff_F: 3 * sum(inner, (i) => between(i, n) * (1 - x(i)) ** 2),
     m_F: sum(all, (i) => charge(i) * (1 - x(i))),
     electrodeSelf_F: at(n, n),
     inputLow_F: sum(all, (i) => charge(i) * x(i)),

@@ -1,3 +1,5 @@
+import { coupling, toEarth } from "./couplings.ts";
+
 /** A ladder that stands for Maxwell's matrix; F. Inner nodes start with node 1, elements with element 1 next to the tap. */
 export interface FoldedLadder {
   readonly toEarth_F: readonly number[];
@@ -11,25 +13,25 @@ export interface FoldedLadder {
 /**
  * Couplings to earth and to the electrode stay where they are. Every other coupling c_ij, the tap's too, spans m elements and
  * becomes m · c_ij across each of them: charges, M and the input capacitance stay exact for the linear profile.
+ * All parts are positive for bands. In a graded film nodes share the charge between them: where the pitch is long against the
+ * diameter a series capacitance may come out negative, right for the linear profile and nothing else.
  * `C` is Maxwell's matrix, (n+1) × (n+1), row by row.
  */
 export function foldedLadder(C: Float64Array): FoldedLadder {
   const nodes = Math.round(Math.sqrt(C.length));
   const n = nodes - 1;
-  const toEarth = new Array<number>(n - 1).fill(0);
-  const toElectrode = new Array<number>(n - 1).fill(0);
+  const inner = Array.from({ length: n - 1 }, (_, k) => k + 1);
   const series = new Array<number>(n).fill(0);
-  for (let i = 1; i < n; i++) {
-    let sum = 0;
-    for (let j = 0; j < nodes; j++) sum += C[i * nodes + j]!;
-    toEarth[i - 1] = sum;
-    toElectrode[i - 1] = -C[i * nodes + n]!;
-  }
   for (let i = 0; i < n; i++) {
     for (let j = i + 1; j < n; j++) {
-      const each = -(j - i) * C[i * nodes + j]!;
+      const each = (j - i) * coupling(C, nodes, i, j);
       for (let element = i; element < j; element++) series[element] = series[element]! + each;
     }
   }
-  return { toEarth_F: toEarth, toElectrode_F: toElectrode, series_F: series, electrodeToTap_F: -C[n]! };
+  return {
+    toEarth_F: inner.map((i) => toEarth(C, nodes, i)),
+    toElectrode_F: inner.map((i) => coupling(C, nodes, i, n)),
+    series_F: series,
+    electrodeToTap_F: coupling(C, nodes, 0, n),
+  };
 }

@@ -1,4 +1,4 @@
-import { factor, solve } from "../quantities/linear.ts";
+import { factor, solveMany } from "../quantities/linear.ts";
 import { epsilon0 } from "../standards/constants.ts";
 import { assemble } from "./assemble.ts";
 import type { Mesh } from "./panel.ts";
@@ -18,35 +18,36 @@ export interface Solved {
 export function maxwell(mesh: Mesh, nodes: number, floor = true, planeWall: number | null = null): Solved {
   const { count, panels, share, weight, stretch } = mesh;
   const matrix = assemble(mesh, floor, planeWall);
-  const pivots = factor(matrix, count);
+  const charge = givenPotentials(mesh, nodes);
+  solveMany(matrix, factor(matrix, count), charge, nodes);
   const raw = new Float64Array(nodes * nodes);
-  const field: Float64Array[] = [];
   const toCharge = 2 * Math.PI * Math.PI * epsilon0;
-  for (let k = 0; k < nodes; k++) {
-    const given = new Float64Array(count);
-    for (const panel of panels) {
-      const end = panel.first + panel.rule.points.length;
-      for (let i = panel.first; i < end; i++) {
-        if (panel.low === k) given[i] = given[i]! + 1 - share[i]!;
-        if (panel.high === k) given[i] = given[i]! + share[i]!;
+  const field = Array.from({ length: nodes }, () => new Float64Array(count));
+  for (const { low, high, first, rule } of panels) {
+    for (let i = first; i < first + rule.points.length; i++) {
+      for (let k = 0; k < nodes; k++) {
+        const density = charge[i * nodes + k]!;
+        field[k]![i] = (Math.PI * density) / stretch[i]!;
+        if (low < 0) continue;
+        const q = toCharge * weight[i]! * density;
+        raw[low * nodes + k] = raw[low * nodes + k]! + q * (1 - share[i]!);
+        raw[high * nodes + k] = raw[high * nodes + k]! + q * share[i]!;
       }
     }
-    const charge = solve(matrix, pivots, given);
-    for (const panel of panels) {
-      if (panel.low < 0) continue;
-      const end = panel.first + panel.rule.points.length;
-      let low = 0;
-      let high = 0;
-      for (let i = panel.first; i < end; i++) {
-        const q = toCharge * weight[i]! * charge[i]!;
-        low += q * (1 - share[i]!);
-        high += q * share[i]!;
-      }
-      raw[panel.low * nodes + k] = raw[panel.low * nodes + k]! + low;
-      raw[panel.high * nodes + k] = raw[panel.high * nodes + k]! + high;
-    }
-    field.push(charge.map((each, i) => (Math.PI * each) / stretch[i]!));
   }
   const C = raw.map((value, at) => (value + raw[(at % nodes) * nodes + Math.floor(at / nodes)]!) / 2);
   return { C, field };
+}
+
+/** Potential of each point with each node at 1 V and all others earthed: count × nodes, row by row. */
+function givenPotentials({ count, panels, share }: Mesh, nodes: number): Float64Array {
+  const given = new Float64Array(count * nodes);
+  for (const { low, high, first, rule } of panels) {
+    if (low < 0) continue;
+    for (let i = first; i < first + rule.points.length; i++) {
+      given[i * nodes + low] = given[i * nodes + low]! + 1 - share[i]!;
+      given[i * nodes + high] = given[i * nodes + high]! + share[i]!;
+    }
+  }
+  return given;
 }

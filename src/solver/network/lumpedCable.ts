@@ -3,7 +3,7 @@ import { conductance } from "./lvSide.ts";
 
 /**
  * The network with its line as what it is to anything slow against its delay: its capacitance delay/impedance, with its resistors in
- * place; the same at dc. A resistor at the tap beside a series protector at the instrument: both stand at the tap.
+ * place; terminated, the resistor alone, since its inductance makes up for its capacitance. The same at dc. A resistor at the tap beside a series protector at the instrument: both stand at the tap.
  */
 export function lumpedCable(network: LadderNetwork): LadderNetwork {
   const { cable, instrument, protector, seriesProtector } = network;
@@ -18,7 +18,10 @@ export function lumpedCable(network: LadderNetwork): LadderNetwork {
     : { ...instrument.protector, resistance_ohm: beside(instrument.protector.resistance_ohm) };
   return {
     ...network,
-    cable: { capacitance_F: cable.capacitance_F + line.delay_s / line.impedance_ohm, line: null },
+    cable: {
+      capacitance_F: cable.capacitance_F + (termination > 0 ? 0 : line.delay_s / line.impedance_ohm),
+      line: null,
+    },
     protector: before ? { ...protector, resistance_ohm: beside(protector.resistance_ohm) } : protector,
     instrument: { ...instrument, protector: end },
     seriesProtector: {

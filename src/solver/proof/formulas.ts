@@ -12,6 +12,8 @@ import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
+import { estimateFormulas } from "../field/estimateFormulas.ts";
+import { fieldRecord } from "../field/fieldRecord.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
@@ -32,6 +34,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     responseFormulas,
     edgeFormulas,
     tapLoadFormulas,
+    estimateFormulas,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
@@ -40,7 +43,12 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
 
 /** Every solution record, by id: what no closed formula gives. */
 export const solutions: ReadonlyMap<string, Solution> = new Map(
-  [capacitiveLadderRecord, faultRecord, resistanceAbove, ...Object.values(responseRecords), ...sizingSolutions].map(
-    (record) => [record.id, record],
-  ),
+  [
+    capacitiveLadderRecord,
+    fieldRecord,
+    faultRecord,
+    resistanceAbove,
+    ...Object.values(responseRecords),
+    ...sizingSolutions,
+  ].map((record) => [record.id, record]),
 );

@@ -58,6 +58,7 @@ export const figures = {
   "hvArm.capacitance_F": "HV arm capacitance C1, string alone",
   "hvArm.effectiveCapacitance_F": "HV arm capacitance with strays",
   "strays.toEarth_F": "stray capacitance of the column to earth",
+  "strays.toElectrode_F": "stray capacitance of the column to the top electrode",
   "element.voltage_Vdc": "element voltage, dc",
   "element.voltage_Vrms": "element voltage, rms",
   "element.voltage_Vpeak": "element voltage, peak",

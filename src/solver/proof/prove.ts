@@ -1,5 +1,6 @@
 import { judgeCable } from "../checks/cableLine.ts";
 import { charge } from "../checks/charge.ts";
+import type { ColumnField } from "../checks/columnField.ts";
 import { edgeOnSheet } from "../checks/edge.ts";
 import { worstFault } from "../checks/faultRow.ts";
 import { faults } from "../checks/faults.ts";
@@ -30,12 +31,13 @@ import { judgeUncertainty } from "./uncertainty.ts";
 
 /**
  * Judges a document's design: every figure with its trace, the responses, the fault table, the findings and the cautions.
+ * Strays that come from the field of the drawing need it solved (`solveColumnField`); without it the closed formula stands in, and is said.
  * Refuses a document without a design, with a part or a principal instrument that it does not hold, with a wire for a resistor. Pure.
  */
-export function prove(document: DividerDocument): Result<Proof> {
+export function prove(document: DividerDocument, field: ColumnField | null = null): Result<Proof> {
   const refused = unusable(document);
   if (refused !== null) return refused;
-  const j = judging(document);
+  const j = judging(document, field);
   const working = workingVoltages(document.brief, j.sheet);
   scaleFactor(j);
   loading(j);

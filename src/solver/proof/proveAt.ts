@@ -1,3 +1,4 @@
+import type { ColumnField } from "../checks/columnField.ts";
 import { judging } from "../checks/judging.ts";
 import { networkOf } from "../checks/networkOf.ts";
 import { stringCapacitance } from "../checks/stringCapacitance.ts";
@@ -6,8 +7,13 @@ import { decibel, degrees, sweep } from "../network/sweep.ts";
 import { timeResponse } from "../network/timeResponse.ts";
 
 /** The design's response at chosen frequencies (Hz) and times (s); the document must have passed `prove`. */
-export function proveAt(document: DividerDocument, frequencies_Hz: readonly number[], times_s: readonly number[]) {
-  const j = judging(document);
+export function proveAt(
+  document: DividerDocument,
+  frequencies_Hz: readonly number[],
+  times_s: readonly number[],
+  field: ColumnField | null = null,
+) {
+  const j = judging(document, field);
   j.sheet.given("/design/hvArm/strings", document.design!.hvArm.strings);
   const network = networkOf(j, stringCapacitance(j));
   const solved = sweep(network, frequencies_Hz)!;

@@ -1,7 +1,7 @@
 import { createContext, useContext } from "react";
 import { useStore } from "zustand";
 import { createStore, type StoreApi } from "zustand/vanilla";
-import type { DividerDocument, Proof, Refusal, Sizing } from "../../solver/index.ts";
+import type { ColumnField, DividerDocument, Proof, Refusal, Sizing } from "../../solver/index.ts";
 import type { Keeper } from "../../store/keeper.ts";
 import type { Store } from "../../store/state.ts";
 import type { DividerStore } from "../../store/store.ts";
@@ -17,6 +17,10 @@ export interface Judged {
   readonly stale: boolean;
   /** The list of candidates is being searched for anew; the one shown is of an earlier brief. */
   readonly searching: boolean;
+  /** The field solved last; the proof uses it where it is that of the drawing. */
+  readonly field: ColumnField | null;
+  /** The field of the drawing is being solved; the closed formula stands in. */
+  readonly solving: boolean;
   /** Time the worker took for it, ms. */
   readonly took_ms: number;
 }
@@ -90,9 +94,25 @@ export function judgeEveryChange(session: Session): () => void {
       if (answer.kind === "refused") judged.setState({ sizing: null, searching: false });
     });
   };
+  /** The field of a drawing that was proved without it; then the proof again. */
+  const solve = (document: DividerDocument) => {
+    judged.setState({ solving: true });
+    runner.field.ask({ kind: "field", document }, (answer) => {
+      if (answer.kind === "refused") judged.setState({ solving: false });
+      if (answer.kind !== "done") return;
+      judged.setState({ field: answer.outcome.field, solving: false });
+      if (store.getState().document === document) prove(document);
+    });
+  };
+  const prove = (document: DividerDocument) =>
+    runner.check.ask({ kind: "prove", document, field: judged.getState().field }, (answer) => {
+      if (answer.kind !== "done") return;
+      judged.setState({ proof: answer.outcome.proof, document, took_ms: answer.took_ms });
+      if (answer.outcome.awaitsField) solve(document);
+    });
   /** The best candidate is chosen again, taken over into the document, and judged. */
   const choose = (document: DividerDocument) =>
-    runner.check.ask({ kind: "follow", document, top: 1 }, (answer) => {
+    runner.check.ask({ kind: "follow", document, top: 1, field: judged.getState().field }, (answer) => {
       if (answer.kind === "refused") {
         judged.setState({ document, refusal: answer.refusal, stale: false, proof: null });
         return;
@@ -104,6 +124,7 @@ export function judgeEveryChange(session: Session): () => void {
       store.getState().adopt(document, outcome.document);
       settled = store.getState().document;
       judged.setState({ document: settled });
+      if (outcome.awaitsField) solve(settled);
     });
   const ask = (document: DividerDocument) => {
     if (document === settled) return;
@@ -114,7 +135,7 @@ export function judgeEveryChange(session: Session): () => void {
       return;
     }
     // The design that stands is judged first, within a frame; a search takes longer and comes after it.
-    runner.check.ask({ kind: "prove", document }, (answer) => {
+    runner.check.ask({ kind: "prove", document, field: judged.getState().field }, (answer) => {
       if (answer.kind !== "done" && answer.kind !== "refused") return;
       if (design.follows) {
         if (answer.kind === "done")
@@ -126,7 +147,10 @@ export function judgeEveryChange(session: Session): () => void {
       const refusal = answer.kind === "refused" ? answer.refusal : null;
       const proof = answer.kind === "done" ? answer.outcome.proof : null;
       judged.setState({ proof, document, refusal, stale: false });
-      if (answer.kind === "done") judged.setState({ took_ms: answer.took_ms });
+      if (answer.kind === "done") {
+        judged.setState({ took_ms: answer.took_ms });
+        if (answer.outcome.awaitsField) solve(document);
+      }
       if (!sameQuestion(searched, document)) search(document);
     });
   };
@@ -155,6 +179,8 @@ export const newJudged = (): StoreApi<Judged> =>
     refusal: null,
     stale: true,
     searching: false,
+    field: null,
+    solving: false,
     took_ms: 0,
   }));
 
