@@ -1,21 +1,8 @@
+import { fieldRecord } from "../field/fieldRecord.ts";
 import { formatQuantity, formatShare } from "../quantities/format.ts";
-import type { Solution } from "../standards/formula.ts";
-import { computedHere } from "../standards/source.ts";
 import { fieldAsked, isFieldOf, ladderOf } from "./columnField.ts";
 import { type ColumnStrays, columnStrays } from "./columnStrays.ts";
 import { type Judging, plainFinding } from "./judging.ts";
-
-export const fieldRecord: Solution = {
-  id: "checks.columnField",
-  title: "Stray capacitances from the drawn column",
-  statement: "∫ σ(r') G(r, r') dA' = φ(r) on every conductor; q = C·x",
-  method:
-    "Boundary elements on the meridian, the floor by images; Maxwell's matrix of all nodes, couplings beyond the neighbour folded onto the elements they span.",
-  holds:
-    "A column round its axis, node i a thin open band; air. C_e = 6 Σ C_i x_i (1 − x_i), C_h = 3 Σ C_i (1 − x_i)², M = Σ q_i (1 − x_i), x from the tap up. A body of another width or a wall on one side moves it by more than the digits shown.",
-  source: computedHere("boundary-element solve of the drawing"),
-  residualBound: 1e-3,
-};
 
 /**
  * Strays from the solved field. Writes `strays.toEarth_F`, `strays.toElectrode_F`, `strays.m_F`, `strays.input_F`, `field.electrode_V_per_m`

@@ -1,3 +1,5 @@
+import type { Geometry } from "../job/design.ts";
+
 /** What the field is solved for: a drawn column and what stands round it; lengths in m. The floor is always there. */
 export interface FieldGeometry {
   /** Elements of the column; nodes are 0 (tap) … elements (top electrode). */
@@ -54,6 +56,23 @@ export const usualAsk: FieldAsk = { idealisation: "bands", resolution: 1, wall: 
 export const noElectrode: FieldElectrode = { kind: "none", radius_m: 0, tubeRadius_m: 0, thickness_m: 0, offset_m: 0 };
 
 export const topOf = (geometry: FieldGeometry): number => geometry.footHeight_m + geometry.columnLength_m;
+
+/** What the field needs of a design's geometry, for a string of so many elements. */
+export function fieldGeometryOf(geometry: Geometry, elements: number): FieldGeometry {
+  const { columnDiameter_m, columnLength_m, footHeight_m, bandFraction, electrode, shield, box, wallDistance_m } =
+    geometry;
+  return {
+    elements,
+    columnDiameter_m,
+    columnLength_m,
+    footHeight_m,
+    bandFraction,
+    electrode,
+    shield,
+    box,
+    wallDistance_m,
+  };
+}
 
 /** Highest point of column, electrode, HV wire and shield. */
 export function highestOf(geometry: FieldGeometry): number {

@@ -38,8 +38,9 @@ export interface FieldOptions extends Partial<FieldAsk> {
 
 /**
  * Strays of a column whose shape was found possible (`shapeFault` gives null): boundary elements on the meridian, the floor by
- * images, vacuum. Figures are within 0.02 % of the converged ones for bands and 0.15 % for a distributed column, over 4 to 60
- * elements, length over diameter 4 to 40, with and without electrode, shield and box (test: convergence).
+ * images, vacuum. Figures are within 0.1 % of the converged ones over 4 to 60 elements, length over diameter 4 to 40, foot height
+ * 0.02 to 5 lengths, with and without electrode, shield and box; the largest field too, unless the electrode is many times
+ * larger than the column is long.
  */
 export function solveField(geometry: FieldGeometry, options: FieldOptions = {}): FieldStrays {
   const ask = { ...usualAsk, ...options };
@@ -53,17 +54,22 @@ export const mostUnknowns = 2500;
 
 /** How many unknowns the solve would have: parts that nearly touch, and many elements, need many. */
 export function unknownsOf(geometry: FieldGeometry, ask: FieldAsk): number {
-  return refine(meridian(geometry, ask)).reduce((sum, piece) => sum + pointsAt(piece, ask), 0);
+  return refine(meridian(geometry, ask)).reduce((sum, piece) => sum + pointsAt(piece, geometry.elements, ask), 0);
 }
 
-const pointsOn = ({ body }: Piece): number => (body === "column" ? 4 : 6);
-const pointsAt = (piece: Piece, { resolution }: FieldAsk): number =>
-  Math.max(2, Math.round(pointsOn(piece) * resolution));
+/** Many short bands need fewer points each; a film's kinks at the nodes need more. */
+function pointsOn({ body }: Piece, n: number, { idealisation }: FieldAsk): number {
+  if (body !== "column") return 6;
+  const more = idealisation === "distributed" ? 2 : 0;
+  return more + (n <= 24 ? 4 : n <= 100 ? 3 : 2);
+}
+const pointsAt = (piece: Piece, n: number, ask: FieldAsk): number =>
+  Math.max(2, Math.round(pointsOn(piece, n, ask) * ask.resolution));
 
 function solveOnce(geometry: FieldGeometry, ask: FieldAsk): FieldStrays {
   const n = geometry.elements;
   const pieces = refine(meridian(geometry, ask));
-  const mesh = meshOf(pieces, (piece) => pointsAt(piece, ask));
+  const mesh = meshOf(pieces, (piece) => pointsAt(piece, n, ask));
   const { C, field } = maxwell(mesh, n + 1, true, ask.wall === "plane" ? geometry.wallDistance_m : null);
   if (ask.idealisation === "distributed") {
     const inside = insideColumn(n, geometry.columnDiameter_m / 2, geometry.columnLength_m);

@@ -14,6 +14,7 @@ import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { estimateFormulas } from "../field/estimateFormulas.ts";
 import { fieldRecord } from "../field/fieldRecord.ts";
+import { underElectrode } from "../field/underElectrode.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
@@ -35,6 +36,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     edgeFormulas,
     tapLoadFormulas,
     estimateFormulas,
+    underElectrode,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])

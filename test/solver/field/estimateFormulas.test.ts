@@ -65,6 +65,29 @@ describe("fitted formulas against the solve", () => {
     const a = estimateFormulas.balancingSphere.compute({ l: 1, d: 1 / 40, h: 0.5, Φ })!;
     expectRelative(balances(sphere(a), 40, 0.5).chOverCe, 0.38, 0.05, "independent solve, two digits");
   });
+  it.each([
+    [8, 0.5, 0.5],
+    [20, 0.4, 1],
+    [20, 2, 0.3],
+    [60, 1, 0.8],
+  ])("under a sphere and a toroid, l/d %f, h/l %f, %f of the balancing size", (l_d, h, s) => {
+    const Φ = estimateFormulas.floor.compute({ l: 1, h })!;
+    const of = { l: 1, d: 1 / l_d, h, Φ };
+    const a = s * estimateFormulas.balancingSphere.compute(of)!;
+    const R = s * estimateFormulas.balancingToroid.compute(of)!;
+    for (const [electrode, allowed] of [
+      [sphere(a), 0.04],
+      [toroid(0.8 * R, 0.2 * R), 0.07],
+    ] as const) {
+      const drawn = column(20, 1, l_d, h, { electrode });
+      const estimate = instantEstimate(drawn);
+      const solved = solveField(drawn, film);
+      const under = estimate.underElectrode!;
+      expectRelative(solved.ceEff_F, under.ceEff_F, allowed, "Ce_eff");
+      expectRelative(solved.chEff_F, under.chEff_F, 0.02, "Ch_eff, of the bare Ce_eff", estimate.ceEff_F!);
+      expectRelative(solved.m_F, under.m_F, allowed, "M, of the bare M", estimate.m_F!);
+    }
+  });
   it("are none outside where they were fitted", () => {
     expect(instantEstimate(column(20, 1, 3, 0.3))).toMatchObject({ ceEff_F: null, chEff_F: null, m_F: null });
     expect(instantEstimate(column(20, 1, 10, 6)).ceEff_F).toBeNull();
