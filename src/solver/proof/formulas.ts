@@ -8,6 +8,7 @@ import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
+import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { tapLoadFormulas } from "../checks/tapLoad.ts";
@@ -34,6 +35,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     protectorFormulas,
     responseFormulas,
     edgeFormulas,
+    slowFastFormulas,
     tapLoadFormulas,
     estimateFormulas,
     underElectrode,
@@ -50,6 +52,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
     fieldRecord,
     faultRecord,
     resistanceAbove,
+    drivenPoleRecord,
     ...Object.values(responseRecords),
     ...sizingSolutions,
   ].map((record) => [record.id, record]),
