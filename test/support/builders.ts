@@ -19,6 +19,8 @@ export interface Sketch {
   others?: readonly Record<string, unknown>[];
   geometry?: Record<string, unknown>;
   strays?: Record<string, unknown>;
+  lvInductance_H?: number;
+  lead?: Record<string, unknown>;
   stays?: string;
   protectors?: readonly unknown[];
   /** Parts beside the resistor family and the two capacitor families. */
@@ -150,7 +152,12 @@ export function invented(s: Sketch): DividerDocument {
           capacitance_F: s.capacitance_F ?? 0,
         })),
       },
-      lvArm: { stays: s.stays ?? "withDivider", branches: s.branches ?? [], capacitanceBy: "none" },
+      lvArm: {
+        stays: s.stays ?? "withDivider",
+        branches: s.branches ?? [],
+        capacitanceBy: "none",
+        inductance_H: s.lvInductance_H ?? 0,
+      },
       protectors: s.protectors ?? [],
       geometry: {
         columnDiameter_m: 0.04,
@@ -165,6 +172,7 @@ export function invented(s: Sketch): DividerDocument {
         ...s.geometry,
       },
       strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0, ...s.strays },
+      lead: { inductance_H: 0, damping_ohm: 0, ...s.lead },
     },
     asBuilt: { readings: [], records: [] },
     origins: s.origins ?? {},

@@ -10,10 +10,11 @@ const greatest_per_s = 1e40;
  * bisection on the number of negative pivots (Sylvester's law of inertia), to rounding. With an LV inductance the same count holds up to
  * the resonance of the LV branch; beyond, its first change is searched in steps. Every node must have a resistance to earth.
  * null where nothing decays so.
+ * @param held the electrode is held by an ideal source instead
  */
-export function slowestDecay(network: LadderNetwork): number | null {
+export function slowestDecay(network: LadderNetwork, held = false): number | null {
   const chain = instrumentChain(network);
-  const changed = (x: number) => negativePivots(network, chain, x) > 0;
+  const changed = (x: number) => negativePivots(network, chain, x, held) > 0;
   const { inductance_H, capacitance_F } = network.lv;
   let low = least_per_s;
   let high = Math.min(greatest_per_s, 1 / Math.sqrt(inductance_H * capacitance_F));
@@ -64,7 +65,7 @@ function instrumentChain(network: LadderNetwork): ChainNode[] {
 }
 
 /** Negative pivots of G − x C, eliminated from the instrument to the electrode by star-mesh steps. */
-function negativePivots(network: LadderNetwork, chain: readonly ChainNode[], x: number): number {
+function negativePivots(network: LadderNetwork, chain: readonly ChainNode[], x: number, held: boolean): number {
   const { n, resistance_ohm, capacitance_F, toEarth_F, toElectrode_F } = network;
   let negative = 0;
   let E = 0;
@@ -92,6 +93,7 @@ function negativePivots(network: LadderNetwork, chain: readonly ChainNode[], x: 
     E = y * (E / S) - x * toEarth_F[i]!;
     H = y * (H / S) - x * toElectrode_F[i]!;
   }
+  if (held) return negative;
   return P - x * network.source.capacitance_F < 0 ? negative + 1 : negative;
 }
 

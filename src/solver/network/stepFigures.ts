@@ -31,8 +31,11 @@ export function responseTime(network: LadderNetwork, reference: Reference = "ele
 }
 
 /** All figures of the step response; null where dc does not pass. */
-export function stepFigures(network: LadderNetwork, reference: Reference = "electrode"): StepFigures | null {
-  const g = timeResponse(network, reference);
+export function stepFigures(
+  network: LadderNetwork,
+  reference: Reference = "electrode",
+  g: TimeResponse | null = timeResponse(network, reference),
+): StepFigures | null {
   const T = responseTime(network, reference);
   if (g === null || T === null) return null;
   const grid = timeGrid(g);

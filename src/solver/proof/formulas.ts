@@ -8,6 +8,7 @@ import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
+import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { tapLoadFormulas } from "../checks/tapLoad.ts";
@@ -36,9 +37,12 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     responseFormulas,
     estimateFormulas,
     edgeFormulas,
+    slowFastFormulas,
     tapLoadFormulas,
     underElectrode,
     pottingFormulas,
+    estimateFormulas,
+    underElectrode,
   ]
     .flatMap((group) => Object.values(group) as unknown as Formula<string, string>[])
     .concat(sizingFormulas as unknown as Formula<string, string>[])
@@ -52,6 +56,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
     fieldRecord,
     faultRecord,
     resistanceAbove,
+    drivenPoleRecord,
     ...Object.values(responseRecords),
     ...sizingSolutions,
   ].map((record) => [record.id, record]),

@@ -19,8 +19,8 @@ export function matches(j: Judging, network: LadderNetwork, residual: number): v
   put("lvArm.capacitanceResponseTime_F", found.responseTime_F);
   put("lvArm.capacitanceHighFrequency_F", found.highFrequency_F);
   put("lvArm.capacitanceFlattest_F", found.flattest_F);
-  // A line or an inductance keeps the instant of the edge to itself.
-  const edgeTells = network.cable.line === null && network.lv.inductance_H === 0;
+  // An inductance keeps the instant of the edge to itself.
+  const edgeTells = network.lv.inductance_H === 0;
   const unmatched = responseTime(withLvCapacitance(network, 0));
   for (const [name, C] of [
     ["responseTime", found.responseTime_F],
@@ -28,8 +28,8 @@ export function matches(j: Judging, network: LadderNetwork, residual: number): v
     ["flattest", found.flattest_F],
   ] as const) {
     const trial = C === null ? null : withLvCapacitance(network, C);
-    const g = trial === null ? null : timeResponse(trial);
-    put(`match.${name}.edgeError`, g === null || !edgeTells ? null : g.initial - 1);
+    const g = trial === null || !edgeTells ? null : timeResponse(trial);
+    put(`match.${name}.edgeError`, g === null ? null : g.initial - 1);
     put(`match.${name}.bandDeviation_dB`, trial === null ? null : greatestDeviation(trial, band));
     put(`match.${name}.responseTime_s`, trial === null ? null : nearlyNought(responseTime(trial), unmatched));
   }

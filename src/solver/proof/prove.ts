@@ -16,6 +16,7 @@ import { networkOf } from "../checks/networkOf.ts";
 import { judgeProtectors } from "../checks/protectors.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
 import { type Show, show } from "../checks/show.ts";
+import { judgeSlowFast } from "../checks/slowFast.ts";
 import { judgeStress } from "../checks/stress.ts";
 import { stringCapacitance } from "../checks/stringCapacitance.ts";
 import { workingVoltages } from "../checks/workingVoltage.ts";
@@ -52,8 +53,10 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   misuse(j, show);
   const rows = faults(j, string, show);
   charge(j, show);
-  const { frequency, step } = response(j, networkOf(j, string), show);
+  const network = networkOf(j, string);
+  const { frequency, step } = response(j, network, show);
   judgeEdge(j, show);
+  judgeSlowFast(j, network, show);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),

@@ -24,7 +24,8 @@ export const responseRecords: Record<"frequency" | "step" | "lvCapacitance", Sol
     title: "Step response",
     statement: "g(t) = F · v_out(t) / V for an ideal step; T = ∫(1 − g) dt",
     method: `${ladder}; inverse Laplace transform on one contour per decade of time.`,
-    holds: "Linear parts; an ideal source at the electrode; the cable as it is set, as a lump or as a line.",
+    holds:
+      "Linear parts; an ideal source at the electrode; the cable as its capacitance with its resistors, without its echoes.",
     source: iec60060,
     residualBound: 1e-6,
   },

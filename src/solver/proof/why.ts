@@ -103,7 +103,7 @@ function originOf(path: string, origins: Origins): Origin {
 export function unitOf(path: string): string {
   const unit = /_([A-Za-z]+)$/.exec(path)?.[1];
   if (unit === undefined) return "1";
-  return unit.replace(/^V(dc|rms|peak)$/, "V");
+  return unit.replace(/^V(dc|rms|peak|pp|step|hotContact)$/, "V");
 }
 
 /** Recomputes a figure from its inputs; null for a given or a solution, which is judged by its residual. */
