@@ -36,6 +36,7 @@ export { jobSentence } from "./proof/jobSentence.ts";
 export * from "./proof/proof.ts";
 export { prove } from "./proof/prove.ts";
 export { proveAt } from "./proof/proveAt.ts";
+export { type Through, throughDivider } from "./proof/throughDivider.ts";
 export * from "./proof/why.ts";
 export { evaluateArithmetic } from "./quantities/arithmetic.ts";
 export * from "./quantities/format.ts";
