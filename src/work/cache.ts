@@ -44,7 +44,8 @@ function keptOfDesign({ design, origins, typed }: DividerDocument): unknown {
   const pointer = "/design/geometry/footHeight_m";
   const stated = typed[pointer] !== undefined || origins[pointer] === "typed" || origins[pointer] === "measured";
   const { protectors = [], lead = null, lvArm = null } = design ?? {};
-  return [protectors, lead, lvArm?.inductance_H ?? 0, stated ? design?.geometry.footHeight_m : null];
+  const inductances = [lead?.inductance_H ?? 0, lead?.damping_ohm ?? 0, lvArm?.inductance_H ?? 0];
+  return [protectors, inductances, stated ? design?.geometry.footHeight_m : null];
 }
 
 const ownOrigins = (origins: DividerDocument["origins"]): DividerDocument["origins"] =>

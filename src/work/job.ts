@@ -1,5 +1,5 @@
 /** One numbered job and its one outcome. Plain data only: everything here crosses to a worker and back. */
-import type { ColumnField, DividerDocument, Proof, Refusal, ResistorFamily, Sizing } from "../solver/index.ts";
+import type { ColumnField, DividerDocument, Proof, Refusal, ResistorFamily, Sizing, Through } from "../solver/index.ts";
 
 /** The field solved last; "solve": solve it within the job where the document asks for it and it is another. */
 export type FieldGiven = ColumnField | null | "solve";
@@ -8,6 +8,14 @@ export type FieldGiven = ColumnField | null | "solve";
 export type Job =
   | { readonly kind: "prove"; readonly document: DividerDocument; readonly field?: FieldGiven }
   | { readonly kind: "field"; readonly document: DividerDocument }
+  | {
+      /** A recorded waveform through the design that stands. */
+      readonly kind: "through";
+      readonly document: DividerDocument;
+      readonly field: ColumnField | null;
+      readonly record: { readonly time_s: readonly number[]; readonly value: readonly number[] };
+      readonly reference: "electrode" | "source";
+    }
   | { readonly kind: "size"; readonly document: DividerDocument; readonly top: number }
   | {
       /** The search when `design.follows`, then the proof of the design chosen. */
@@ -26,6 +34,7 @@ export interface Outcome {
   readonly field: ColumnField | null;
   /** The document asks for the field of its drawing and the proof had to do without. */
   readonly awaitsField: boolean;
+  readonly through: Through | null;
 }
 
 export type JobMessage = { readonly number: number; readonly job: Job };

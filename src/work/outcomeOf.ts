@@ -1,4 +1,13 @@
-import type { Candidate, ColumnField, DividerDocument, FieldGeometry, Proof, Result, Sizing } from "../solver/index.ts";
+import type {
+  Candidate,
+  ColumnField,
+  DividerDocument,
+  FieldGeometry,
+  Proof,
+  Result,
+  Sizing,
+  Through,
+} from "../solver/index.ts";
 import type { FieldGiven, Job, Outcome } from "./job.ts";
 
 /** What a job needs of the solver. */
@@ -8,6 +17,12 @@ export interface SolverDoor {
   readonly fieldAsked: (document: DividerDocument) => Result<FieldGeometry | null>;
   readonly isFieldOf: (field: ColumnField, geometry: FieldGeometry) => boolean;
   readonly solveField: (geometry: FieldGeometry) => ColumnField;
+  readonly through: (
+    document: DividerDocument,
+    record: { readonly time_s: readonly number[]; readonly value: readonly number[] },
+    field: ColumnField | null,
+    reference: "electrode" | "source",
+  ) => Through;
   readonly takeCandidate: (document: DividerDocument, candidate: Candidate) => DividerDocument;
 }
 
@@ -23,6 +38,8 @@ export const jobsOf =
         return provenOf(door, job.document, null, job.field ?? null);
       case "field":
         return fieldOf(door, job.document);
+      case "through":
+        return throughOf(door, job);
       case "size": {
         const sizing = door.size(job.document, { top: job.top });
         return sizing.ok ? ok({ document: job.document, sizing: sizing.value }) : sizing;
@@ -32,7 +49,7 @@ export const jobsOf =
     }
   };
 
-const nothing = { sizing: null, proof: null, field: null, awaitsField: false };
+const nothing = { sizing: null, proof: null, field: null, awaitsField: false, through: null };
 const ok = (found: Pick<Outcome, "document"> & Partial<Outcome>): Result<Outcome> => ({
   ok: true,
   value: { ...nothing, ...found },
@@ -52,6 +69,13 @@ function provenOf(
   const proof = door.prove(document, field);
   if (!proof.ok) return proof;
   return ok({ document, sizing, proof: proof.value, field, awaitsField: geometry !== null && field === null });
+}
+
+function throughOf(door: SolverDoor, job: Extract<Job, { kind: "through" }>): Result<Outcome> {
+  const proven = provenOf(door, job.document, null, job.field);
+  if (!proven.ok) return proven;
+  const { document, field } = proven.value;
+  return ok({ document, field, through: door.through(document, job.record, field, job.reference) });
 }
 
 function fieldOf(door: SolverDoor, document: DividerDocument): Result<Outcome> {

@@ -2,6 +2,7 @@ import { useMemo } from "react";
 import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
 import { type ProveActions, ProveSheet } from "./ProveSheet.tsx";
+import { RecordedWaveform } from "./RecordedWaveform.tsx";
 
 /** Will it work. Shows the last proof with the document that it judged, greyed while a newer one is awaited. */
 export function ProveScreen() {
@@ -15,6 +16,7 @@ export function ProveScreen() {
   return (
     <div className={stale ? "stale" : ""} aria-busy={stale}>
       <ProveSheet document={judged} proof={proof} actions={actions} />
+      <RecordedWaveform />
     </div>
   );
 }
