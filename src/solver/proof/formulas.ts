@@ -9,6 +9,7 @@ import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
+import { edgeShareRecord, stepSharingFormulas } from "../checks/stepSharing.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { tapLoadFormulas } from "../checks/tapLoad.ts";
@@ -36,6 +37,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     responseFormulas,
     edgeFormulas,
     slowFastFormulas,
+    stepSharingFormulas,
     tapLoadFormulas,
     estimateFormulas,
     underElectrode,
@@ -53,6 +55,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
     faultRecord,
     resistanceAbove,
     drivenPoleRecord,
+    edgeShareRecord,
     ...Object.values(responseRecords),
     ...sizingSolutions,
   ].map((record) => [record.id, record]),

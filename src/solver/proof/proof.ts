@@ -63,6 +63,7 @@ export const figures = {
   "element.voltage_Vrms": "element voltage, rms",
   "element.voltage_Vpeak": "element voltage, peak",
   "element.voltageLimit_V": "element voltage limit, derated",
+  "element.edgeShare": "share of the element in a sudden edge",
   "element.dissipation_W": "element dissipation",
   "element.dissipationLimit_W": "element dissipation limit, derated",
   "element.criticalResistance_ohm": "critical resistance, derated",
