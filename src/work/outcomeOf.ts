@@ -1,10 +1,20 @@
-import type { Candidate, ColumnField, DividerDocument, FieldGeometry, Proof, Result, Sizing } from "../solver/index.ts";
+import type {
+  Candidate,
+  ColumnField,
+  DividerDocument,
+  FieldGeometry,
+  Proof,
+  Result,
+  Sizing,
+  Speed,
+} from "../solver/index.ts";
 import type { FieldGiven, Job, Outcome } from "./job.ts";
 
 /** What a job needs of the solver. */
 export interface SolverDoor {
   readonly size: (document: DividerDocument, options: { readonly top: number }) => Result<Sizing>;
   readonly prove: (document: DividerDocument, field: ColumnField | null) => Result<Proof>;
+  readonly speed: (document: DividerDocument, field: ColumnField | null) => Result<Speed>;
   readonly fieldAsked: (document: DividerDocument) => Result<FieldGeometry | null>;
   readonly isFieldOf: (field: ColumnField, geometry: FieldGeometry) => boolean;
   readonly solveField: (geometry: FieldGeometry) => ColumnField;
@@ -21,6 +31,8 @@ export const jobsOf =
     switch (job.kind) {
       case "prove":
         return provenOf(door, job.document, null, job.field ?? null);
+      case "speed":
+        return speedOf(door, job.document, job.field ?? null);
       case "field":
         return fieldOf(door, job.document);
       case "size": {
@@ -45,13 +57,24 @@ function provenOf(
   sizing: Sizing | null,
   given: FieldGiven,
 ): Result<Outcome> {
-  const asked = door.fieldAsked(document);
-  const geometry = asked.ok ? asked.value : null;
-  const held = given === "solve" ? (geometry === null ? null : door.solveField(geometry)) : given;
-  const field = held !== null && geometry !== null && door.isFieldOf(held, geometry) ? held : null;
+  const { geometry, field } = fieldFor(door, document, given);
   const proof = door.prove(document, field);
   if (!proof.ok) return proof;
   return ok({ document, sizing, proof: proof.value, field, awaitsField: geometry !== null && field === null });
+}
+
+/** The geometry that the document asks a field for, and the field of it where it is at hand. */
+function fieldFor(door: SolverDoor, document: DividerDocument, given: FieldGiven) {
+  const asked = door.fieldAsked(document);
+  const geometry = asked.ok ? asked.value : null;
+  const held = given === "solve" ? (geometry === null ? null : door.solveField(geometry)) : given;
+  return { geometry, field: held !== null && geometry !== null && door.isFieldOf(held, geometry) ? held : null };
+}
+
+function speedOf(door: SolverDoor, document: DividerDocument, given: FieldGiven): Result<Outcome> {
+  const { field } = fieldFor(door, document, given);
+  const speed = door.speed(document, field);
+  return speed.ok ? ok({ document, field, speed: speed.value }) : speed;
 }
 
 function fieldOf(door: SolverDoor, document: DividerDocument): Result<Outcome> {

@@ -6,6 +6,7 @@ import {
   prove,
   size,
   solveColumnField,
+  speed,
   takeCandidate,
 } from "../solver/index.ts";
 import { Cache, cachedSize, canonical } from "./cache.ts";
@@ -16,4 +17,4 @@ const solveField = (geometry: FieldGeometry): ColumnField =>
   fields.get(canonical(geometry), () => solveColumnField(geometry));
 
 /** Runs one job here and now. Searches and fields are answered from memory when their inputs have not changed. */
-export const runJob = jobsOf({ size: cachedSize(size), prove, takeCandidate, fieldAsked, isFieldOf, solveField });
+export const runJob = jobsOf({ size: cachedSize(size), prove, takeCandidate, fieldAsked, isFieldOf, solveField, speed });

@@ -13,22 +13,27 @@ export interface Runner {
   readonly long: Lane;
   /** The field of the drawing: one asked for while another runs waits, and replaces any that waits. */
   readonly field: Lane;
+  /** What a panel in view asks for beyond the proof; one asked for while another runs waits, and replaces any that waits. */
+  readonly view: Lane;
   readonly close: () => void;
 }
 
-/** Three lanes of work, each with a worker of its own, started when first needed. */
+/** Four lanes of work, each with a worker of its own, started when first needed. */
 export function createRunner(startWorker: () => WorkerLike, now: () => number = Date.now): Runner {
   const check = new Lane({ startWorker, now, patience_ms: checkPatience_ms });
   const long = new Lane({ startWorker, now, patience_ms: 0 });
   const field = new Lane({ startWorker, now, patience_ms: fieldPatience_ms });
+  const view = new Lane({ startWorker, now, patience_ms: checkPatience_ms });
   return {
     check,
     long,
     field,
+    view,
     close: () => {
       check.close();
       long.close();
       field.close();
+      view.close();
     },
   };
 }

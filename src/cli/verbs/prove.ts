@@ -24,6 +24,8 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
     const outcome = runJob({ kind: "prove", document, field: "solve" });
     if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
     const proof = outcome.value.proof!;
+    const seen = runJob({ kind: "speed", document, field: outcome.value.field });
+    if (!seen.ok) throw new Unusable(refusalText(seen.error));
     const asked = proveAt(document, frequencies ?? [], times ?? [], outcome.value.field);
     const { sheet, frequency, step, ...rest } = proof;
     outside.print(
@@ -33,6 +35,7 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
           ...nested(sheet),
           frequency: { ...frequency, ...(frequencies === null ? {} : { asked: asked.frequency }) },
           step: { ...step, ...(times === null ? {} : { asked: asked.step }) },
+          speed: seen.value.speed,
         },
         null,
         2,

@@ -58,6 +58,7 @@ export function judgeStepSharing(j: Judging, network: LadderNetwork, show: Show)
   sheet.deriveEach(path, stepSharingFormulas.voltage, inputs, element.length);
   const own = edgesBelong(j);
   const even = 1 / element.length;
+  const compensated = j.design.hvArm.elements.every((each) => each.capacitance_F > 0);
   const relieved = slowEdge(j);
   const found = judgeLimit(
     j,
@@ -73,8 +74,10 @@ export function judgeStepSharing(j: Judging, network: LadderNetwork, show: Show)
       reason: (actual, limit, at) =>
         `${own ? "At the instant of an edge" : "Where the voltage is touched on or breaks in at once,"} element ${at} takes ${actual}, ` +
         `${formatShare(element[(at ?? 1) - 1]!)} of it instead of ${formatShare(even)}; its part is rated ${limit} on this basis. ` +
-        `The strays of the column decide it${relieved ? "; the stated edge is slow against the string, which shares it better" : ""}. ` +
-        (own ? "Fit a capacitor across each element." : "Raise the voltage slowly, or fit a capacitor across each element."),
+        `The strays of the column decide it${relieved ? "; the stated edge is slow against the string, which shares it better" : ""}.${compensated ? "" : " "}` +
+        (own
+          ? "Fit a capacitor across each element."
+          : "Raise the voltage slowly, or fit a capacitor across each element."),
       cure: compensate,
     },
     show,
