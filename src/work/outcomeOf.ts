@@ -6,6 +6,7 @@ import type {
   Proof,
   Result,
   Sizing,
+  Speed,
   Through,
 } from "../solver/index.ts";
 import type { FieldGiven, Job, Outcome } from "./job.ts";
@@ -14,6 +15,7 @@ import type { FieldGiven, Job, Outcome } from "./job.ts";
 export interface SolverDoor {
   readonly size: (document: DividerDocument, options: { readonly top: number }) => Result<Sizing>;
   readonly prove: (document: DividerDocument, field: ColumnField | null) => Result<Proof>;
+  readonly speed: (document: DividerDocument, field: ColumnField | null) => Result<Speed>;
   readonly fieldAsked: (document: DividerDocument) => Result<FieldGeometry | null>;
   readonly isFieldOf: (field: ColumnField, geometry: FieldGeometry) => boolean;
   readonly solveField: (geometry: FieldGeometry) => ColumnField;
@@ -36,6 +38,8 @@ export const jobsOf =
     switch (job.kind) {
       case "prove":
         return provenOf(door, job.document, null, job.field ?? null);
+      case "speed":
+        return speedOf(door, job.document, job.field ?? null);
       case "field":
         return fieldOf(door, job.document);
       case "through":
@@ -62,10 +66,7 @@ function provenOf(
   sizing: Sizing | null,
   given: FieldGiven,
 ): Result<Outcome> {
-  const asked = door.fieldAsked(document);
-  const geometry = asked.ok ? asked.value : null;
-  const held = given === "solve" ? (geometry === null ? null : door.solveField(geometry)) : given;
-  const field = held !== null && geometry !== null && door.isFieldOf(held, geometry) ? held : null;
+  const { geometry, field } = fieldFor(door, document, given);
   const proof = door.prove(document, field);
   if (!proof.ok) return proof;
   return ok({ document, sizing, proof: proof.value, field, awaitsField: geometry !== null && field === null });
@@ -76,6 +77,20 @@ function throughOf(door: SolverDoor, job: Extract<Job, { kind: "through" }>): Re
   if (!proven.ok) return proven;
   const { document, field } = proven.value;
   return ok({ document, field, through: door.through(document, job.record, field, job.reference) });
+}
+
+/** The geometry that the document asks a field for, and the field of it where it is at hand. */
+function fieldFor(door: SolverDoor, document: DividerDocument, given: FieldGiven) {
+  const asked = door.fieldAsked(document);
+  const geometry = asked.ok ? asked.value : null;
+  const held = given === "solve" ? (geometry === null ? null : door.solveField(geometry)) : given;
+  return { geometry, field: held !== null && geometry !== null && door.isFieldOf(held, geometry) ? held : null };
+}
+
+function speedOf(door: SolverDoor, document: DividerDocument, given: FieldGiven): Result<Outcome> {
+  const { field } = fieldFor(door, document, given);
+  const speed = door.speed(document, field);
+  return speed.ok ? ok({ document, field, speed: speed.value }) : speed;
 }
 
 function fieldOf(door: SolverDoor, document: DividerDocument): Result<Outcome> {

@@ -6,6 +6,7 @@ import {
   prove,
   size,
   solveColumnField,
+  speed,
   takeCandidate,
   throughDivider,
 } from "../solver/index.ts";
@@ -25,4 +26,5 @@ export const runJob = jobsOf({
   isFieldOf,
   solveField,
   through: throughDivider,
+  speed,
 });

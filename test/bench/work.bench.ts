@@ -7,6 +7,7 @@ import {
   prove,
   size,
   solveColumnField,
+  speed,
   takeCandidate,
   throughDivider,
 } from "../../src/solver/index.ts";
@@ -40,6 +41,7 @@ const follow = jobsOf({
   isFieldOf,
   solveField: solveColumnField,
   through: throughDivider,
+  speed,
 });
 /** A keystroke in the voltage: searched, taken and proved anew, nothing remembered. */
 function keystroke(document: DividerDocument) {

@@ -34,6 +34,7 @@ function door(candidates: Candidate[] = [candidate]) {
     },
     fieldAsked: ({ design }) => ({ ok: true, value: design?.strays.from === "field" ? geometryOf(design) : null }),
     isFieldOf: (field, geometry) => field.geometry.columnLength_m === geometry.columnLength_m,
+    speed: () => ({ ok: false, error: { where: "", why: "not asked here", cure: "" } }),
     solveField: (geometry) => {
       calls.push("field");
       return { geometry, strays: {} as ColumnField["strays"] };

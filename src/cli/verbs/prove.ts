@@ -35,6 +35,8 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
     const outcome = runJob({ kind: "prove", document, field: "solve" });
     if (!outcome.ok) throw new Unusable(refusalText(outcome.error));
     const proof = outcome.value.proof!;
+    const seen = runJob({ kind: "speed", document, field: outcome.value.field });
+    if (!seen.ok) throw new Unusable(refusalText(seen.error));
     const asked = proveAt(document, frequencies ?? [], times ?? [], outcome.value.field);
     const waveform = waveformOf(options, document, outcome.value.field, outside);
     const { sheet, frequency, step, ...rest } = proof;
@@ -46,6 +48,7 @@ Exit 0: clear or caution. 1: a stop stands. 2: unusable input, or no design yet.
           frequency: { ...frequency, ...(frequencies === null ? {} : { asked: asked.frequency }) },
           step: { ...step, ...(times === null ? {} : { asked: asked.step }) },
           ...(waveform === null ? {} : { waveform }),
+          speed: seen.value.speed,
         },
         null,
         2,

@@ -9,6 +9,7 @@ import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
+import { edgeShareRecord, stepSharingFormulas } from "../checks/stepSharing.ts";
 import { resistanceAbove, stressFormulas } from "../checks/stressFormulas.ts";
 import { capacitanceFormulas } from "../checks/stringCapacitance.ts";
 import { tapLoadFormulas } from "../checks/tapLoad.ts";
@@ -38,6 +39,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     estimateFormulas,
     edgeFormulas,
     slowFastFormulas,
+    stepSharingFormulas,
     tapLoadFormulas,
     underElectrode,
     pottingFormulas,
@@ -57,6 +59,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
     faultRecord,
     resistanceAbove,
     drivenPoleRecord,
+    edgeShareRecord,
     ...Object.values(responseRecords),
     ...sizingSolutions,
   ].map((record) => [record.id, record]),

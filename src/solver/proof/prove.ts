@@ -17,6 +17,7 @@ import { judgeProtectors } from "../checks/protectors.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
 import { type Show, show } from "../checks/show.ts";
 import { judgeSlowFast } from "../checks/slowFast.ts";
+import { judgeStepSharing } from "../checks/stepSharing.ts";
 import { judgeStress } from "../checks/stress.ts";
 import { stringCapacitance } from "../checks/stringCapacitance.ts";
 import { workingVoltages } from "../checks/workingVoltage.ts";
@@ -56,6 +57,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   const network = networkOf(j, string);
   const { frequency, step } = response(j, network, show);
   judgeEdge(j, show);
+  judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
   const findings = worstFirst(j.findings);
   return ok({

@@ -17,13 +17,13 @@ export function proveAt(
   j.sheet.given("/design/hvArm/strings", document.design!.hvArm.strings);
   const network = networkOf(j, stringCapacitance(j));
   const solved = sweep(network, frequencies_Hz)!;
-  const g = timeResponse(network)!;
+  const g = times_s.length === 0 ? null : timeResponse(network);
   return {
     frequency: {
       frequency_Hz: frequencies_Hz,
       magnitude_dB: frequencies_Hz.map((_, k) => decibel(solved.real[k]!, solved.imaginary[k]!)),
       phase_deg: frequencies_Hz.map((_, k) => degrees(solved.real[k]!, solved.imaginary[k]!)),
     },
-    step: { time_s: times_s, value: times_s.map((t) => g.at(t)) },
+    step: { time_s: times_s, value: times_s.map((t) => g!.at(t)) },
   };
 }

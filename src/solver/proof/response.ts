@@ -10,13 +10,12 @@ import { stepFigures } from "../network/stepFigures.ts";
 import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
 import { type TimeResponse, timeResponse } from "../network/timeResponse.ts";
 import { formatQuantity, formatShare } from "../quantities/format.ts";
+import { logarithmic } from "./logarithmic.ts";
 import { greatestDeviation, matches } from "./matches.ts";
 import type { FrequencyResponse, StepResponse as StepResponseShape } from "./proof.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
 const points = 241;
-const logarithmic = (from: number, to: number, count: number) =>
-  Array.from({ length: count }, (_, i) => from * (to / from) ** (i / (count - 1)));
 
 /** Frequency and step response of the design's network, their figures on the sheet, and the findings. */
 export function response(
@@ -41,8 +40,12 @@ export function response(
     R2p: "lvArm.withInstrument_ohm",
   };
   const { step: stepRecord, frequency: frequencyRecord } = responseRecords;
+  const put = (path: string, value: number | null) => j.sheet.solved(path, stepRecord, value, inputs, residual);
   j.sheet.solved("response.bandwidth_Hz", frequencyRecord, f3, inputs, residual);
   j.sheet.solved("response.responseTime_s", stepRecord, figures?.responseTime_s ?? null, inputs, residual);
+  put("response.partialResponseTime_s", figures?.partialResponseTime_s ?? null);
+  put("response.residualSettlingTime_s", figures?.residualSettlingTime_s ?? null);
+  put("response.droop", droopOf(j, g));
   j.sheet.solved("response.riseTime_s", stepRecord, figures?.riseTime_s ?? null, inputs, residual);
   j.sheet.solved("response.overshoot", stepRecord, figures?.overshoot ?? null, inputs, residual);
   j.sheet.solved("response.settlingTime_s", stepRecord, figures?.settlingTime_s["1%"] ?? null, inputs, residual);
@@ -51,6 +54,14 @@ export function response(
   const handover_s = pole === null ? 0 : 1 / (2 * Math.PI * pole);
   const step = stepTraces(g, figures?.settlingTime_s["1%"] ?? 0, handover_s, figures?.overshoot ?? 0);
   return { frequency, step };
+}
+
+/** How much the top of the brief's pulse falls from right after its edge to its end, relative; null where no width is stated. */
+function droopOf(j: Judging, g: TimeResponse): number | null {
+  const { width_s, riseTime_s } = j.document.brief.waveform;
+  if (width_s === null || !(width_s > 0)) return null;
+  const start = g.at(Math.min(riseTime_s ?? 0, width_s / 10));
+  return start === 0 ? null : 1 - g.at(width_s) / start;
 }
 
 /** What is fitted, with cable and instrument, and the pole. Writes `lvArm.capacitanceFitted_F` and `lvArm.capacitanceTotal_F`. */

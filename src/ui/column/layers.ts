@@ -1,7 +1,7 @@
 import { type Design, formatQuantity, type Proof } from "../../solver/index.ts";
 
 /** Views of the column: what the labels beside the bodies say and what the ink of the bodies stands for. */
-export const layers = ["voltage", "heat", "strays", "millimetres"] as const;
+export const layers = ["voltage", "step sharing", "heat", "strays", "millimetres"] as const;
 export type Layer = (typeof layers)[number];
 
 export interface LayerView {
@@ -25,6 +25,17 @@ export function layerView(layer: Layer, design: Design, proof: Proof | null): La
   switch (layer) {
     case "voltage":
       return shaded("potential of each upper end, working peak", list("element.nodePotential_V"), null, "V");
+    case "step sharing": {
+      const own = list("element.voltage_Vstep");
+      return shaded(
+        own.length > 0
+          ? "voltage of each element at the instant of an edge; full ink is its derated limit"
+          : "voltage of each element where the greatest peak is touched on; full ink is its derated limit",
+        own.length > 0 ? own : list("element.voltage_VhotContact"),
+        list("element.voltageLimit_Vpeak"),
+        "V",
+      );
+    }
     case "heat":
       return shaded(
         "dissipation of each element; full ink is its derated limit",

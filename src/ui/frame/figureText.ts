@@ -8,6 +8,9 @@ const shares = new Set([
   "scaleFactor.voltageShift",
   "source.sag",
   "response.overshoot",
+  "response.droop",
+  "element.edgeShare",
+  "lvArm.spikeShare",
 ]);
 
 /** A number in the unit of its path, three or four digits; a dash where it does not exist. */
