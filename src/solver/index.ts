@@ -5,6 +5,7 @@ export { type ColumnField, fieldAsked, isFieldOf, solveColumnField } from "./che
 export type { FaultRow } from "./checks/faultRow.ts";
 export type { InstrumentRow } from "./checks/instruments.ts";
 export { plainPointer } from "./checks/judging.ts";
+export type { ProximityRow } from "./checks/proximity.ts";
 export { crestFactors, greatestOverPeak } from "./checks/workingVoltage.ts";
 export { answerField, type FieldAnswer } from "./field/answerField.ts";
 export { type BalancingElectrode, balancingElectrode } from "./field/balancingElectrode.ts";

@@ -151,6 +151,7 @@ export const inventedDocument: DividerDocument = {
       pollutionDegree: 2,
       materialGroup: "IIIa",
       wallDistance_m: 1,
+      approachDistance_m: null,
     },
     policy: {
       voltageDerating: 0.6,

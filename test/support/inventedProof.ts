@@ -153,6 +153,7 @@ export const inventedProof: Proof = {
       "Silent: the reading is unchanged while the case rises to 24 kV.",
     ),
   ],
+  proximity: [{ what: "wall", distance_m: 0.66, strayChange: 0.08, readingChange: -0.012 }],
   worstFault: null,
   findings: [
     finding({

@@ -7,6 +7,7 @@ import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
+import { proximityFormulas, proximityRecord } from "../checks/proximityFormulas.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
 import { edgeShareRecord, stepSharingFormulas } from "../checks/stepSharing.ts";
@@ -43,6 +44,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     tapLoadFormulas,
     underElectrode,
     pottingFormulas,
+    proximityFormulas,
     estimateFormulas,
     underElectrode,
   ]
@@ -56,6 +58,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
   [
     capacitiveLadderRecord,
     fieldRecord,
+    proximityRecord,
     faultRecord,
     resistanceAbove,
     drivenPoleRecord,

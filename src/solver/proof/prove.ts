@@ -14,6 +14,7 @@ import { judgeLvSpike } from "../checks/lvSpike.ts";
 import { misuse } from "../checks/misuse.ts";
 import { networkOf } from "../checks/networkOf.ts";
 import { judgeProtectors } from "../checks/protectors.ts";
+import { proximityOf } from "../checks/proximity.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
 import { type Show, show } from "../checks/show.ts";
 import { judgeSlowFast } from "../checks/slowFast.ts";
@@ -59,6 +60,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   judgeEdge(j, show);
   judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
+  const proximity = proximityOf(j, string);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -69,6 +71,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
     step,
     instruments: instrumentRows(j),
     faults: rows,
+    proximity,
     worstFault: worstFault(rows),
     findings,
     cautions,

@@ -11,6 +11,7 @@ import { FaultTable } from "./FaultTable.tsx";
 import { FindingList } from "./FindingList.tsx";
 import { faultMark, worstFaultsFirst } from "./faultMarks.ts";
 import { Insulation } from "./Insulation.tsx";
+import { Proximity } from "./Proximity.tsx";
 import "../size/size.css";
 import "./prove.css";
 
@@ -46,6 +47,10 @@ export function ProveSheet({ document, proof, actions }: Props) {
       <section className="sheet-section" aria-labelledby="insulation-heading">
         <h2 id="insulation-heading">insulation</h2>
         <Insulation findings={proof.findings} onWhy={actions.onWhy} />
+      </section>
+      <section className="sheet-section" aria-labelledby="proximity-heading">
+        <h2 id="proximity-heading">what stands near</h2>
+        <Proximity proof={proof} onWhy={actions.onWhy} />
       </section>
       <Faults document={document} proof={proof} />
       <section className="sheet-section" aria-labelledby="findings-heading">
