@@ -21,6 +21,7 @@ import { pottingFormulas } from "../field/potting.ts";
 import { underElectrode } from "../field/underElectrode.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
+import { greatestInputRecord } from "./greatestInput.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
 /** Every formula that may stand behind a figure, by id. */
@@ -59,6 +60,7 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
     capacitiveLadderRecord,
     fieldRecord,
     proximityRecord,
+    greatestInputRecord,
     faultRecord,
     resistanceAbove,
     drivenPoleRecord,

@@ -6,6 +6,7 @@ import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
 import type { Caution } from "./cautions.ts";
+import type { GreatestInput } from "./greatestInput.ts";
 
 export interface FrequencyResponse {
   readonly frequency_Hz: readonly number[];
@@ -45,6 +46,7 @@ export interface Proof {
   readonly faults: readonly FaultRow[];
   /** What stands near the column, and what it does to an edge. */
   readonly proximity: readonly ProximityRow[];
+  readonly greatestInput: GreatestInput;
   readonly worstFault: FaultRow | null;
   readonly findings: readonly Finding[];
   readonly cautions: readonly Caution[];
@@ -125,6 +127,8 @@ export const figures = {
   "insulation.elementCreepage_m": "creepage required along one element",
   "insulation.elementClearance_m": "clearance required along one element",
   "fault.worstOutput_V": "worst single fault at the instrument",
+  "greatestInput.low_V": "greatest sine at 10 Hz, peak",
+  "greatestInput.high_V": "greatest sine at the upper end of the frequencies looked at, peak",
   "keepOut.proximity_m": "distance below which a wall moves the reading of an edge",
   "keepOut.distance_m": "keep-out distance",
   "charge.waitTime_s": "time to fall to 60 V through the divider alone",

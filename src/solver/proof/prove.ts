@@ -26,6 +26,7 @@ import type { DividerDocument } from "../job/document.ts";
 import { ok, type Result, refuse } from "../quantities/result.ts";
 import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
+import { greatestInput } from "./greatestInput.ts";
 import { jobSentence } from "./jobSentence.ts";
 import { noResistance } from "./noResistance.ts";
 import type { Proof } from "./proof.ts";
@@ -61,6 +62,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
   const proximity = proximityOf(j, string);
+  const greatest = greatestInput(j, network);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -72,6 +74,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
     instruments: instrumentRows(j),
     faults: rows,
     proximity,
+    greatestInput: greatest,
     worstFault: worstFault(rows),
     findings,
     cautions,

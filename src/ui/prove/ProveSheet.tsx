@@ -3,6 +3,7 @@ import type { Cure, DividerDocument, Proof } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 import { ElementChart } from "../charts/ElementChart.tsx";
 import { FrequencyChart } from "../charts/FrequencyChart.tsx";
+import { GreatestInputChart } from "../charts/GreatestInputChart.tsx";
 import { StepChart } from "../charts/StepChart.tsx";
 import { sheetNumber } from "../size/sheetNumber.ts";
 import { Cautions } from "./Cautions.tsx";
@@ -76,6 +77,7 @@ function Stress({ proof }: { readonly proof: Proof }) {
         bases={dissipation}
         file="element-dissipation"
       />
+      <GreatestInputChart greatest={proof.greatestInput} file="greatest-input" />
     </section>
   );
 }
