@@ -17,4 +17,12 @@ const solveField = (geometry: FieldGeometry): ColumnField =>
   fields.get(canonical(geometry), () => solveColumnField(geometry));
 
 /** Runs one job here and now. Searches and fields are answered from memory when their inputs have not changed. */
-export const runJob = jobsOf({ size: cachedSize(size), prove, takeCandidate, fieldAsked, isFieldOf, solveField, speed });
+export const runJob = jobsOf({
+  size: cachedSize(size),
+  prove,
+  takeCandidate,
+  fieldAsked,
+  isFieldOf,
+  solveField,
+  speed,
+});

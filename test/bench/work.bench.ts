@@ -7,6 +7,7 @@ import {
   prove,
   size,
   solveColumnField,
+  speed,
   takeCandidate,
 } from "../../src/solver/index.ts";
 import { jobsOf } from "../../src/work/outcomeOf.ts";
@@ -31,7 +32,7 @@ const wide = invented({
   branches: [fixed("R2a", 2.4e6), fixed("R2b", 2.4e6)],
 });
 
-const follow = jobsOf({ size, prove, takeCandidate, fieldAsked, isFieldOf, solveField: solveColumnField });
+const follow = jobsOf({ size, prove, takeCandidate, fieldAsked, isFieldOf, solveField: solveColumnField, speed });
 /** A keystroke in the voltage: searched, taken and proved anew, nothing remembered. */
 function keystroke(document: DividerDocument) {
   const { design, brief } = document;

@@ -124,8 +124,7 @@ function waveOf(network: LadderNetwork, lvCapacitance_F: number) {
   const trial = withLvCapacitance(network, Math.max(0, lvCapacitance_F));
   const g = timeResponse(trial)!;
   // Where the edge itself takes time its start is read once it is over.
-  const over_s =
-    g.initial >= 0.5 ? 0 : 3 * (stepFigures(trial, "electrode", g)?.riseTime_s ?? 0);
+  const over_s = g.initial >= 0.5 ? 0 : 3 * (stepFigures(trial, "electrode", g)?.riseTime_s ?? 0);
   return {
     /** From the settled level of the opposite half, for a step of 1. */
     ends(half_s: number): readonly [number, number] {
