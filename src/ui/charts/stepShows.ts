@@ -1,7 +1,7 @@
 import { type EdgeTraces, formatQuantity, type StepResponse, type TracePair } from "../../solver/index.ts";
 
 /** What the step chart can show. */
-export type StepShow = "step" | "edge" | "source" | "spread";
+export type StepShow = "step" | "edge" | "echoes" | "source" | "spread";
 
 export interface ShownTrace {
   readonly id: string;
@@ -23,6 +23,7 @@ export function stepShows(given: EdgeTraces | null): readonly (readonly [StepSho
   const found: [StepShow, string][] = [["step", "ideal step"]];
   if (given === null) return found;
   if (given.edge !== null && given.riseTime_s !== null) found.push(["edge", `edge of ${time(given.riseTime_s)}`]);
+  if (given.echoes !== null) found.push(["echoes", "with echoes"]);
   found.push(["source", "from the source"], ["spread", "spread of parts"]);
   return found;
 }
@@ -31,6 +32,7 @@ export function shownOf(show: StepShow, step: StepResponse, given: EdgeTraces | 
   const plain: Shown = { traces: [{ id: "output", name: "", hue: 1, pair: step }], sentence: step.sentence };
   if (given === null || show === "step") return plain;
   if (show === "edge" && given.edge !== null) return edge(given, given.edge);
+  if (show === "echoes" && given.echoes !== null) return echoes(given, given.echoes);
   if (show === "spread") return spread(step, given);
   const atElectrode = given.edge ?? step;
   const atSource = given.edgeFromSource ?? given.stepFromSource;
@@ -50,6 +52,14 @@ function edge(given: EdgeTraces, pair: TracePair): Shown {
   return {
     traces: [{ id: "output", name: "", hue: 1, pair }],
     sentence: `A straight edge of ${time(given.riseTime_s!)} (10–90\u2009%) at the electrode: the output goes ${over} its final value.`,
+  };
+}
+
+function echoes(given: EdgeTraces, pair: TracePair): Shown {
+  const of = given.riseTime_s === null ? "an ideal step" : `an edge of ${time(given.riseTime_s)}`;
+  return {
+    traces: [{ id: "output", name: "", hue: 1, pair }],
+    sentence: `What the instrument at the cable's far end sees of ${of}: the line's own waves on the fast scale, without loss, its delay included.`,
   };
 }
 

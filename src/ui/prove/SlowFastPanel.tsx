@@ -61,7 +61,7 @@ function Table({ check }: { readonly check: SlowFast }) {
               </th>
             ))}
             <th scope="col" className="number">
-              too small, on the screen
+              5&#8201;% too small, edge to edge
             </th>
           </tr>
         </thead>
