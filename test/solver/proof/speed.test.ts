@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { speed } from "../../../src/solver/proof/speed.ts";
-import { bank, figure, finding, fixed, invented, proven, type Sketch } from "../../support/builders.ts";
+import { bank, fault, figure, finding, fixed, invented, proven, type Sketch } from "../../support/builders.ts";
 import { expectRelative } from "../../support/relative.ts";
 
 // Invented scenario, computed independently: R1 = 36 MΩ, 9 pF, F = 1000 with the 1 MΩ of the instrument, C2p 6 % low.
@@ -99,6 +99,8 @@ describe("rings", () => {
     const least = Math.sqrt(1e-6 / 9e-12);
     const at = (damping_ohm: number) =>
       answer(square({ lead: { inductance_H: 1e-6, damping_ohm } })).rings.find((each) => each.id === "network.1");
+    const told = answer(square({ lead: { inductance_H: 1e-6, damping_ohm: least } })).rings;
+    expectRelative(told.find((each) => each.id === "lead")?.damping, 0.5, 2e-3, "R / 2√(L/C)");
     expectRelative(at(least)?.damping, 0.5, 1e-2, "half of critical damping");
     expect(at(2.1 * least)).toBeUndefined();
     expectRelative(
@@ -215,6 +217,9 @@ describe("a cable as a line", () => {
       const G = 1 / R2 + 1 / R;
       const F = (1 + 36e6 * G) * (end === "matchedAtTap" ? 1 + 50 / 1e6 : 1);
       expectRelative(figure(proof, "scaleFactor.predicted"), F, 1e-12, "series and parallel sums");
+      expectRelative(proof.instruments[0]!.scaleFactor, F, 1e-12, "the instrument's own row");
+      const last = end === "matchedAtTap" ? 1 + 50 / 1e6 : 1;
+      expectRelative(fault(proof, "elementShort").output_V, 5000 / last, 1e-12, "its only element a wire");
     },
   );
   it("is a caution where it is long against the edge, and offers to match it", () => {
