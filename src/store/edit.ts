@@ -5,6 +5,9 @@ import { isAtOrBelow, keysOf, valueAt, withoutItemAt, withValueAt } from "../fil
 import type { DividerDocument, Origin, Result } from "../solver/index.ts";
 import { assumedAnew } from "./assumedDefaults.ts";
 
+/** What a search hands on as it is: to change it is no choice of parts. */
+const keptBySearch = ["/design/follows", "/design/lead", "/design/lvArm/inductance_H"];
+
 export interface Change {
   readonly pointer: string;
   readonly value: unknown;
@@ -62,7 +65,7 @@ const isBookkeeping = (pointer: string): boolean =>
   ["/format", "/version", "/origins", "/typed"].some((root) => isAtOrBelow(pointer, root));
 
 function finished(document: DividerDocument, pointer: string): Result<DividerDocument> {
-  const own = isAtOrBelow(pointer, "/design") && !isAtOrBelow(pointer, "/design/follows");
+  const own = isAtOrBelow(pointer, "/design") && !keptBySearch.some((each) => isAtOrBelow(pointer, each));
   const { design } = document;
   const stands = own && design?.follows === true ? { ...document, design: { ...design, follows: false } } : document;
   const value = assumedAnew(stands, pointer);

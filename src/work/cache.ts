@@ -43,9 +43,9 @@ export const sizingKey = (document: DividerDocument, top: number): string => {
 function keptOfDesign({ design, origins, typed }: DividerDocument): unknown {
   const pointer = "/design/geometry/footHeight_m";
   const stated = typed[pointer] !== undefined || origins[pointer] === "typed" || origins[pointer] === "measured";
-  const { protectors = [], lead = null, lvArm = null } = design ?? {};
-  const inductances = [lead?.inductance_H ?? 0, lead?.damping_ohm ?? 0, lvArm?.inductance_H ?? 0];
-  return [protectors, inductances, stated ? design?.geometry.footHeight_m : null];
+  const { inductance_H = 0, damping_ohm = 0 } = design?.lead ?? {};
+  const inductances = [inductance_H, damping_ohm, design?.lvArm.inductance_H ?? 0];
+  return [design?.protectors ?? [], inductances, stated ? design?.geometry.footHeight_m : null];
 }
 
 const ownOrigins = (origins: DividerDocument["origins"]): DividerDocument["origins"] =>

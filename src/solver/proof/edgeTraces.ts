@@ -21,6 +21,8 @@ export interface EdgeTraces {
   /** An edge of that rise time at the electrode, and at the source. */
   readonly edge: TracePair | null;
   readonly edgeFromSource: TracePair | null;
+  /** The same edge, or an ideal step where none is known, with the echoes of a cable that is a line; null: it is a lump. */
+  readonly echoes: TracePair | null;
   /** An ideal step at the source. */
   readonly stepFromSource: TracePair;
   /** An ideal step with the LV capacitance at both ends of what its parts, the cable and the instrument leave open. */
@@ -34,6 +36,7 @@ const fastEnds = [1e-9, 1e-5] as const;
 /** A ramp from end to end over the 10-90 % time of it. */
 const rampOver1090 = 1 / 0.8;
 
+/** Every response beside the proof's own. Needs the figures of the response on the sheet. */
 export function edgeTraces(j: Judging, network: LadderNetwork): EdgeTraces {
   const riseTime_s = j.sheet.number(edgeOnSheet(j));
   const calm = lumpedCable(network);
@@ -51,18 +54,28 @@ export function edgeTraces(j: Judging, network: LadderNetwork): EdgeTraces {
     riseTime_s,
     edge: edge("electrode"),
     edgeFromSource: edge("source"),
+    echoes: network.cable.line === null ? null : withEchoes(network, calm, riseTime_s, end),
     stepFromSource: step(timeResponse(calm, "source") as TimeResponse),
     spread: { halfWidth_F, less: off(-halfWidth_F), more: off(halfWidth_F) },
   };
 }
 
-function pair(at: (t: number) => number, end_s: number): TracePair {
-  const trace = (from: number, to: number): StepTrace => {
-    const time_s = logarithmic(from, to, points);
-    return { time_s, value: time_s.map(at) };
+/** The line's own waves where they are seen, on the fast scale; the slow one has it as a lump. */
+function withEchoes(network: LadderNetwork, calm: LadderNetwork, riseTime_s: number | null, end_s: number): TracePair {
+  const shaped = (of: LadderNetwork) => {
+    const g = timeResponse(of) as TimeResponse;
+    return riseTime_s === null ? (t: number) => g.at(t) : (t: number) => ramp(g, rampOver1090 * riseTime_s, t);
   };
-  return { fast: trace(...fastEnds), slow: trace(1e-6, end_s) };
+  return { fast: fastOf(shaped(network)), slow: slowOf(shaped(calm), end_s) };
 }
+
+const traceOf = (at: (t: number) => number, from_s: number, to_s: number): StepTrace => {
+  const time_s = logarithmic(from_s, to_s, points);
+  return { time_s, value: time_s.map(at) };
+};
+const fastOf = (at: (t: number) => number): StepTrace => traceOf(at, ...fastEnds);
+const slowOf = (at: (t: number) => number, end_s: number): StepTrace => traceOf(at, 1e-6, end_s);
+const pair = (at: (t: number) => number, end_s: number): TracePair => ({ fast: fastOf(at), slow: slowOf(at, end_s) });
 
 /** As far as the proof's slow trace: a decade past settling and past the hand-over. */
 export function slowEnd(j: Judging): number {

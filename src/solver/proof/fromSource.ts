@@ -2,7 +2,6 @@ import type { LadderNetwork } from "../network/ladderNetwork.ts";
 import { lumpedCable } from "../network/lumpedCable.ts";
 import { stepFigures } from "../network/stepFigures.ts";
 import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
-import { logarithmic } from "./logarithmic.ts";
 
 /** What the source's own voltage becomes: source, lead and divider together, against what its terminals would have without the divider. */
 export interface FromSource {
@@ -17,10 +16,10 @@ export interface FromSource {
   readonly settlingTime_s: number | null;
 }
 
-export function fromSource(network: LadderNetwork): FromSource {
+/** @param frequency_Hz those of the proof's own response, so that the two can be laid over each other */
+export function fromSource(network: LadderNetwork, frequency_Hz: readonly number[]): FromSource {
   const figures = stepFigures(lumpedCable(network), "source");
   const f3 = bandwidth(network, "source");
-  const frequency_Hz = logarithmic(1, Math.max(1e9, (f3 ?? 1e8) * 10), 241);
   const solved = sweep(network, frequency_Hz, "source")!;
   return {
     frequency_Hz,

@@ -30,6 +30,7 @@ export interface InstrumentSpeed {
   readonly seenRise_s: number | null;
 }
 
+/** Every instrument of the document with its cable on the LV arm as it is fitted. Needs the figures of the scale factor on the sheet. */
 export function instrumentSpeeds(j: Judging): InstrumentSpeed[] {
   const string = stringCapacitance(j);
   const band = wantedBand(j.document.brief);

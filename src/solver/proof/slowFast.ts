@@ -156,7 +156,7 @@ function sentence(rows: readonly SquareRow[], signal_Vpp: number): string {
   const settled = slow.end_V[under]! / signal_Vpp - 1;
   return (
     `With the LV capacitance ${formatShare(offBy, 1)} too small the fast wave alone is flat within ${formatShare(Math.abs(droop), 2)} and looks right, ` +
-    `${formatShare(Math.abs(wrong), 2)} too ${wrong > 0 ? "high" : "low"}; at ${formatQuantity(slow.frequency_Hz, "Hz", { trailing: false })} the half settles within ${formatShare(Math.abs(settled), 2)}. ` +
+    `${formatShare(Math.abs(wrong), 2)} too ${wrong > 0 ? "high" : "low"}; at ${formatQuantity(slow.frequency_Hz, "Hz", { trailing: false })} the half settles within ${formatShare(Math.max(1e-6, Math.abs(settled)), 2)}. ` +
     "The two amplitudes must agree: neither frequency shows it alone."
   );
 }

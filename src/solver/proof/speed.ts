@@ -35,7 +35,7 @@ export function speed(document: DividerDocument, field: ColumnField | null = nul
   const { j, network } = speeding(document, field, proof.value.sheet);
   return ok({
     traces: edgeTraces(j, network),
-    fromSource: fromSource(network),
+    fromSource: fromSource(network, proof.value.frequency.frequency_Hz),
     slowFast: slowFast(j, network),
     rings: rings(j, network),
     instruments: instrumentSpeeds(j),

@@ -1,10 +1,17 @@
-import { catalogue, type Instrument, type InstrumentFunction } from "../../solver/index.ts";
+import { type CableEnd, catalogue, type Instrument, type InstrumentFunction } from "../../solver/index.ts";
 import { ChoiceField } from "../inputs/ChoiceField.tsx";
 import { QuantityField } from "../inputs/QuantityField.tsx";
 
 const functions: readonly (readonly [InstrumentFunction, string])[] = [
   ...new Set(catalogue.instruments.map((each) => each.function)),
 ].map((each) => [each, each] as const);
+
+const ends: readonly (readonly [CableEnd, string])[] = [
+  ["lumped", "its capacitance"],
+  ["open", "a line, open into the instrument"],
+  ["matchedAtTap", "a line, its impedance in series at the tap"],
+  ["terminated", "a line, its impedance across the far end"],
+];
 
 /** Every figure of one instrument on one range, with its cable. */
 export function InstrumentFields({ instrument: i, at }: { readonly instrument: Instrument; readonly at: string }) {
@@ -67,6 +74,7 @@ export function InstrumentFields({ instrument: i, at }: { readonly instrument: I
         greatest={1}
       />
       <QuantityField label="resolution" pointer={`${at}/resolution_V`} unit="V" value={i.resolution_V} />
+      <QuantityField label="noise, rms" pointer={`${at}/noise_Vrms`} unit="V" value={i.noise_Vrms} greatest={1e3} />
       <QuantityField
         label="cable length"
         pointer={`${at}/cable/length_m`}
@@ -81,6 +89,23 @@ export function InstrumentFields({ instrument: i, at }: { readonly instrument: I
         value={i.cable.capacitance_F_per_m}
         greatest={1e-6}
       />
+      <QuantityField
+        label="cable impedance"
+        pointer={`${at}/cable/impedance_ohm`}
+        unit="ohm"
+        value={i.cable.impedance_ohm}
+        least={1}
+        greatest={1e4}
+      />
+      <QuantityField
+        label="cable delay, a metre"
+        pointer={`${at}/cable/delay_s_per_m`}
+        unit="s/m"
+        value={i.cable.delay_s_per_m}
+        least={1e-9}
+        greatest={1e-6}
+      />
+      <ChoiceField label="cable counts as" pointer={`${at}/cable/end`} value={i.cable.end} options={ends} />
     </div>
   );
 }

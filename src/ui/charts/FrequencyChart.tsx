@@ -1,5 +1,5 @@
 import { useDeferredValue, useMemo, useState } from "react";
-import type { FrequencyResponse } from "../../solver/index.ts";
+import type { FrequencyResponse, FromSource } from "../../solver/index.ts";
 import { plainText, signed, withUnit } from "./axisText.ts";
 import { ChartFrame } from "./ChartFrame.tsx";
 import { Choice } from "./Choice.tsx";
@@ -19,25 +19,41 @@ interface Props {
   readonly tolerance: number;
   readonly band_Hz: readonly [number, number];
   readonly bandwidth_Hz: number | null;
+  /** With source and lead counted, over the same frequencies; null: not answered yet. */
+  readonly source?: FromSource | null;
   readonly file: string;
 }
+
+const references = [
+  ["electrode", "at the electrode"],
+  ["source", "with the source"],
+] as const;
 
 const views = [
   ["dB", "dB"],
   ["percent", "%"],
 ] as const;
 const magnitudeTrace = [{ id: "magnitude", name: "magnitude", hue: 1 }] as const;
+const bothTraces = [
+  { id: "magnitude", name: "electrode", hue: 1 },
+  { id: "source", name: "source", hue: 3 },
+] as const;
 const phaseTrace = [{ id: "phase", name: "phase", hue: 2 }] as const;
+const impedanceTrace = [{ id: "impedance", name: "input |Z|", hue: 4 }] as const;
 const noBands: readonly Band[] = [];
 const magnitudeHeight = 244;
 const phaseHeight = 150;
+const impedanceHeight = 150;
 
-/** Magnitude against the dc scale factor and phase, over the same decades. */
+/** Magnitude against the dc scale factor, phase and input impedance, over the same decades. */
 export function FrequencyChart(p: Props) {
   const response = useDeferredValue(p.response);
   const [view, setView] = useState<MagnitudeView>("dB");
   const cursor = useCursor(response.frequency_Hz.length);
-  const series = useMemo(() => seriesOf(response, view), [response, view]);
+  const [reference, setReference] = useState<"electrode" | "source">("electrode");
+  const source =
+    reference === "source" && p.source?.frequency_Hz.length === response.frequency_Hz.length ? p.source : null;
+  const series = useMemo(() => seriesOf(response, view, source), [response, view, source]);
   const [low, high] = p.band_Hz;
   const y = useMemo(
     () => magnitudeAxis(view, response, p.tolerance, [low, high]),
@@ -59,11 +75,18 @@ export function FrequencyChart(p: Props) {
       sentence={response.sentence}
       file={p.file}
       note={noteOf(series.left, view, y)}
-      controls={<Choice label="magnitude in" options={views} value={view} onChange={setView} />}
+      controls={
+        <>
+          {p.source == null ? null : (
+            <Choice label="reference" options={references} value={reference} onChange={setReference} />
+          )}
+          <Choice label="magnitude in" options={views} value={view} onChange={setView} />
+        </>
+      }
       columns={columns}
       cursor={cursor}
       readout={readout}
-      height={magnitudeHeight + phaseHeight}
+      height={magnitudeHeight + phaseHeight + impedanceHeight}
     >
       {(width) => <Panels width={width} {...{ response, series, cursor, y, phase, bands, marks, phaseMarks, view }} />}
     </ChartFrame>
@@ -87,7 +110,10 @@ function Panels({ width, response, series, cursor, y, phase, bands, marks, phase
   const x = useMemo(() => logAxis(response.frequency_Hz, Math.floor((width - 130) / 44)), [response, width]);
   const upper = useMemo(() => plotBox(width, magnitudeHeight, 76), [width]);
   const lower = useMemo(() => plotBox(width, phaseHeight, 76), [width]);
-  const ys = useMemo(() => [series.magnitude], [series]);
+  const lowest = useMemo(() => plotBox(width, impedanceHeight, 76), [width]);
+  const z = useMemo(() => logAxis(response.inputImpedance_ohm, 5), [response]);
+  const ys = useMemo(() => (series.source === null ? [series.magnitude] : [series.magnitude, series.source]), [series]);
+  const impedances = useMemo(() => [response.inputImpedance_ohm], [response]);
   const phases = useMemo(() => [series.phase], [series]);
   if (x === null || y === null || phase === null)
     return <p className="chart-note">Nothing to draw: no finite point.</p>;
@@ -99,7 +125,7 @@ function Panels({ width, response, series, cursor, y, phase, bands, marks, phase
         <LinePlot
           box={upper}
           rows={series.magnitudeRows}
-          traces={magnitudeTrace}
+          traces={series.source === null ? magnitudeTrace : bothTraces}
           {...{ x, y, bands, marks }}
           xName=""
           yName={`magnitude / ${unit}`}
@@ -114,25 +140,56 @@ function Panels({ width, response, series, cursor, y, phase, bands, marks, phase
           y={phase}
           bands={noBands}
           marks={phaseMarks}
-          xName="frequency / Hz"
+          xName={z === null ? "frequency / Hz" : ""}
           yName="phase / °"
         />
       </PlotPanel>
+      {z === null ? null : (
+        <PlotPanel box={lowest} x={x} y={z} xs={xs} from={0} cursor={cursor} ys={impedances}>
+          <LinePlot
+            box={lowest}
+            rows={series.impedanceRows}
+            traces={impedanceTrace}
+            x={x}
+            y={z}
+            bands={noBands}
+            marks={phaseMarks}
+            xName="frequency / Hz"
+            yName="|Z| / Ω"
+          />
+        </PlotPanel>
+      )}
     </>
   );
 }
 
-function seriesOf(response: FrequencyResponse, view: MagnitudeView) {
-  const magnitude = view === "dB" ? response.magnitude_dB : response.magnitude_dB.map(percentOf);
+function seriesOf(response: FrequencyResponse, view: MagnitudeView, from: FromSource | null) {
+  const shown = (dB: readonly number[]) => (view === "dB" ? dB : dB.map(percentOf));
+  const magnitude = shown(response.magnitude_dB);
+  const source = from === null ? null : shown(from.magnitude_dB);
   const phase = unwrapped(response.phase_deg);
   const plain = { x: true, y: false };
-  const upper = checkSeries(response.frequency_Hz, [{ ...magnitudeTrace[0], y: magnitude }], plain);
+  const traces = [
+    { ...magnitudeTrace[0], y: magnitude },
+    ...(source === null ? [] : [{ ...bothTraces[1], y: source }]),
+  ];
+  const upper = checkSeries(response.frequency_Hz, traces, plain);
+  const lowest = checkSeries(response.frequency_Hz, [{ ...impedanceTrace[0], y: response.inputImpedance_ohm }], {
+    x: true,
+    y: true,
+  });
   const lower = checkSeries(response.frequency_Hz, [{ ...phaseTrace[0], y: phase }], plain);
   return {
     magnitude,
+    source,
     phase,
     left: Math.max(upper.left, lower.left),
-    magnitudeRows: thinRows(upper.rows, ["magnitude"], 400),
+    magnitudeRows: thinRows(
+      upper.rows,
+      traces.map((each) => each.id),
+      400,
+    ),
+    impedanceRows: thinRows(lowest.rows, ["impedance"], 400),
     phaseRows: thinRows(lower.rows, ["phase"], 400),
   };
 }
@@ -173,7 +230,7 @@ function noteOf(left: number, view: MagnitudeView, y: Axis | null): string | nul
 function readoutAt(response: FrequencyResponse, i: number): string {
   const dB = response.magnitude_dB[i]!;
   const percent = percentOf(dB);
-  return `${withUnit(response.frequency_Hz[i]!, "Hz")}: ${signed(dB)}\u2009dB (${signed(percent)}\u2009%), ${signed(response.phase_deg[i]!)}°`;
+  return `${withUnit(response.frequency_Hz[i]!, "Hz")}: ${signed(dB)}\u2009dB (${signed(percent)}\u2009%), ${signed(response.phase_deg[i]!)}°, input ${withUnit(response.inputImpedance_ohm[i]!, "ohm", 3)}`;
 }
 
 function columnsOf(response: FrequencyResponse): readonly Column[] {

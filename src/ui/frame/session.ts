@@ -213,7 +213,7 @@ export function openWhy(
 
 /** Whether the page has a field for an input. */
 export const hasField = (pointer: string): boolean =>
-  /^\/(brief|instruments)\/|^\/design\/(geometry\/(footHeight|columnLength|columnDiameter|electrode)|hvArm\/elements\/\d+\/resistance_ohm$)/.test(
+  /^\/(brief|instruments)\/|^\/design\/(geometry\/(footHeight|columnLength|columnDiameter|electrode)|hvArm\/elements\/\d+\/resistance_ohm$|lead\/|lvArm\/inductance_H$)/.test(
     pointer,
   );
 
@@ -224,7 +224,7 @@ export function goToField(session: Session, pointer: string): void {
   const inColumn = pointer.startsWith("/design/geometry");
   looking.setState({ why: null, field: pointer });
   if (element !== undefined) looking.setState({ element: Number(element) + 1 });
-  else if (!inColumn) looking.setState({ screen: "ask" });
+  else if (!inColumn) looking.setState({ screen: screenOf(pointer) });
   const focus = () => {
     if (looking.getState().field !== pointer) return;
     const field = document.querySelector<HTMLElement>(`[data-pointer="${CSS.escape(pointer)}"]`);
@@ -234,4 +234,10 @@ export function goToField(session: Session, pointer: string): void {
   };
   if (store.getState().document.design === null && inColumn) return;
   setTimeout(focus, 60);
+}
+
+/** The screen that has the field of an input. */
+function screenOf(pointer: string): ScreenName {
+  if (pointer === "/brief/generator_Vpp") return "prove";
+  return pointer.startsWith("/design/") ? "size" : "ask";
 }

@@ -3,6 +3,8 @@ import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts
 import { useApply } from "../frame/useApply.ts";
 import { type ProveActions, ProveSheet } from "./ProveSheet.tsx";
 import { RecordedWaveform } from "./RecordedWaveform.tsx";
+import { SpeedSections } from "./SpeedSections.tsx";
+import { useSpeed } from "./useSpeed.ts";
 
 /** Will it work. Shows the last proof with the document that it judged, greyed while a newer one is awaited. */
 export function ProveScreen() {
@@ -12,10 +14,17 @@ export function ProveScreen() {
   const refusal = useJudged((state) => state.refusal);
   const stale = useJudged((state) => state.stale);
   const actions = useProveActions();
+  const speed = useSpeed();
   if (proof === null) return <NoProof text={refusal === null ? null : `${refusal.why} ${refusal.cure}`} />;
   return (
     <div className={stale ? "stale" : ""} aria-busy={stale}>
-      <ProveSheet document={judged} proof={proof} actions={actions} />
+      <ProveSheet
+        document={judged}
+        proof={proof}
+        actions={actions}
+        speed={speed}
+        beyond={<SpeedSections document={judged} proof={proof} speed={speed} />}
+      />
       <RecordedWaveform />
     </div>
   );

@@ -1,5 +1,5 @@
-import { useMemo } from "react";
-import type { Cure, DividerDocument, Proof } from "../../solver/index.ts";
+import { type ReactNode, useMemo } from "react";
+import type { Cure, DividerDocument, Proof, Speed } from "../../solver/index.ts";
 import { withUnit } from "../charts/axisText.ts";
 import { ElementChart } from "../charts/ElementChart.tsx";
 import { FrequencyChart } from "../charts/FrequencyChart.tsx";
@@ -13,6 +13,7 @@ import { FindingList } from "./FindingList.tsx";
 import { faultMark, worstFaultsFirst } from "./faultMarks.ts";
 import { Insulation } from "./Insulation.tsx";
 import { Proximity } from "./Proximity.tsx";
+import { StepFigures } from "./StepFigures.tsx";
 import "../size/size.css";
 import "./prove.css";
 
@@ -25,10 +26,14 @@ interface Props {
   readonly document: DividerDocument;
   readonly proof: Proof;
   readonly actions: ProveActions;
+  /** What is answered when it is looked at; null: not yet. */
+  readonly speed?: Speed | null;
+  /** The sections on speed, after the responses. */
+  readonly beyond?: ReactNode;
 }
 
 /** Will it work: the responses, the stress, the distances, the faults, and every finding in full. */
-export function ProveSheet({ document, proof, actions }: Props) {
+export function ProveSheet({ document, proof, actions, speed = null, beyond = null }: Props) {
   const { brief } = document;
   return (
     <>
@@ -40,10 +45,18 @@ export function ProveSheet({ document, proof, actions }: Props) {
           tolerance={brief.wantedUncertainty}
           band_Hz={brief.band_Hz}
           bandwidth_Hz={sheetNumber(proof.sheet, "response.bandwidth_Hz")}
+          source={speed?.fromSource ?? null}
           file="frequency-response"
         />
-        <StepChart step={proof.step} tolerance={brief.wantedUncertainty} file="step-response" />
+        <StepChart
+          step={proof.step}
+          tolerance={brief.wantedUncertainty}
+          traces={speed?.traces ?? null}
+          file="step-response"
+        />
+        <StepFigures sheet={proof.sheet} source={speed?.fromSource ?? null} onWhy={actions.onWhy} />
       </section>
+      {beyond}
       <Stress proof={proof} />
       <section className="sheet-section" aria-labelledby="insulation-heading">
         <h2 id="insulation-heading">insulation</h2>
@@ -82,7 +95,7 @@ function Stress({ proof }: { readonly proof: Proof }) {
   );
 }
 
-function Faults({ document, proof }: Omit<Props, "actions">) {
+function Faults({ document, proof }: Pick<Props, "document" | "proof">) {
   const limit = document.instruments.find((each) => each.id === document.principal)?.greatestInput_Vpeak ?? null;
   const wanted = document.brief.wantedUncertainty;
   const rows = useMemo(() => worstFaultsFirst(proof.faults), [proof.faults]);

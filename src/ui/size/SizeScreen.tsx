@@ -4,6 +4,7 @@ import type { AddedFamily } from "../families/draftFamily.ts";
 import { type FamilyActions, OwnFamilies } from "../families/OwnFamilies.tsx";
 import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
+import { Connections } from "./Connections.tsx";
 import { type SizeActions, SizeSheet } from "./SizeSheet.tsx";
 
 /** Which parts. Shows the last answer with the document that it was given for; own families are those of the document now. */
@@ -20,6 +21,7 @@ export function SizeScreen() {
       <div className={stale ? "stale" : ""} aria-busy={stale}>
         <SizeSheet document={judged} sizing={sizing} proof={proof} actions={actions} />
       </div>
+      {document.design === null ? null : <Connections design={document.design} />}
       <OwnFamilies document={document} actions={families} />
     </>
   );

@@ -39,6 +39,19 @@ describe("a cable as a lump in place of a line", () => {
       });
     },
   );
+  it("terminated, keeps its magnitude to where its delay begins to turn the phase", () => {
+    const [, network] = networks(0, "instrument")[2]!;
+    const size = (of: LadderNetwork) => {
+      const { real, imaginary } = sweep(of, [1e6])!;
+      return Math.hypot(real[0]!, imaginary[0]!);
+    };
+    expectRelative(
+      size(lumpedCable(network)),
+      size(network),
+      1e-3,
+      "ωT is 0.03; only the instrument's capacitance is off",
+    );
+  });
   it("leaves a network without a line as it is", () => {
     const network = sketch({ n: 1, R: 1e5, C: 1e-12, R2: 300, C2: 1e-9 });
     expect(lumpedCable(network)).toBe(network);

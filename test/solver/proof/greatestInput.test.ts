@@ -30,7 +30,12 @@ describe("greatest input against frequency (an invented divider, computed indepe
     const frail = { ...plain, instruments: [{ ...plain.instruments[0]!, greatestInput_Vpeak: 0.5 }] };
     const proof = proven(frail);
     expect(at(proof, 0)).toMatchObject({ by: "instrument", element: null });
-    expectRelative(at(proof, 0).value!, 0.5 * figure(proof, "scaleFactor.predicted"), 1e-4, "F times its rating; strays at 10 Hz");
+    expectRelative(
+      at(proof, 0).value!,
+      0.5 * figure(proof, "scaleFactor.predicted"),
+      1e-4,
+      "F times its rating; strays at 10 Hz",
+    );
   });
   it("doubling the instrument's rating never lowers it, and it never exceeds what any element bears", () => {
     const one = proven(plain).greatestInput.greatest_Vpeak;
