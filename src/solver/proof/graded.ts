@@ -45,7 +45,7 @@ export function graded(j: Judging, network: LadderNetwork): Graded | null {
   const bought_F = ideal_F.map((C, i) =>
     C === null ? null : nearest(availableValues(capacitorOf(j, elements[i]!.capacitor!)), C),
   );
-  const missing = ideal_F.findIndex((C) => C === null);
+  const missing = ideal_F.indexOf(null);
   const withThese = (list: readonly (number | null)[]): LadderNetwork => ({
     ...network,
     capacitance_F: Float64Array.from(list, (C, i) => strings * (C ?? 0) + beside(i)),
