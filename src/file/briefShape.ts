@@ -114,6 +114,7 @@ export const surroundingsShape = object<Surroundings>("Where the divider stands.
     true,
   ),
   wallDistance_m: quantity("m", "Distance of the nearest earthed wall.", { fallback: 1 }),
+  approachDistance_m: quantityOrNull("m", "Approach distance that local rules set; null: not stated."),
 });
 
 const share = "was a percentage meant? 80 % is 0.8";

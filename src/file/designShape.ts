@@ -199,6 +199,12 @@ const geometryShape = object<Geometry>("Lengths in metres.", {
     }),
   ),
   wallDistance_m: quantityOrNull("m", "Nearest earthed wall; null: as the surroundings say."),
+  potting: orNull(
+    object<NonNullable<Geometry["potting"]>>("Compound cast round the string; null: air.", {
+      permittivity: quantity("1", "Relative permittivity.", { least: 1, greatest: 100, fallback: 3.5 }),
+      radius_m: quantity("m", "Outer radius."),
+    }),
+  ),
 });
 
 const straysShape = object<Strays>("Stray capacitances.", {

@@ -1,5 +1,14 @@
 /** One numbered job and its one outcome. Plain data only: everything here crosses to a worker and back. */
-import type { ColumnField, DividerDocument, Proof, Refusal, ResistorFamily, Sizing, Speed } from "../solver/index.ts";
+import type {
+  ColumnField,
+  DividerDocument,
+  Proof,
+  Refusal,
+  ResistorFamily,
+  Sizing,
+  Speed,
+  Through,
+} from "../solver/index.ts";
 
 /** The field solved last; "solve": solve it within the job where the document asks for it and it is another. */
 export type FieldGiven = ColumnField | null | "solve";
@@ -8,6 +17,14 @@ export type FieldGiven = ColumnField | null | "solve";
 export type Job =
   | { readonly kind: "prove"; readonly document: DividerDocument; readonly field?: FieldGiven }
   | { readonly kind: "field"; readonly document: DividerDocument }
+  | {
+      /** A recorded waveform through the design that stands. */
+      readonly kind: "through";
+      readonly document: DividerDocument;
+      readonly field: ColumnField | null;
+      readonly record: { readonly time_s: readonly number[]; readonly value: readonly number[] };
+      readonly reference: "electrode" | "source";
+    }
   /** What speed comes to beyond the proof; asked for when it is looked at. */
   | { readonly kind: "speed"; readonly document: DividerDocument; readonly field?: FieldGiven }
   | { readonly kind: "size"; readonly document: DividerDocument; readonly top: number }
@@ -28,6 +45,7 @@ export interface Outcome {
   readonly field: ColumnField | null;
   /** The document asks for the field of its drawing and the proof had to do without. */
   readonly awaitsField: boolean;
+  readonly through: Through | null;
   /** Of a speed job alone. */
   readonly speed?: Speed;
 }

@@ -7,6 +7,7 @@ import type {
   Result,
   Sizing,
   Speed,
+  Through,
 } from "../solver/index.ts";
 import type { FieldGiven, Job, Outcome } from "./job.ts";
 
@@ -18,6 +19,12 @@ export interface SolverDoor {
   readonly fieldAsked: (document: DividerDocument) => Result<FieldGeometry | null>;
   readonly isFieldOf: (field: ColumnField, geometry: FieldGeometry) => boolean;
   readonly solveField: (geometry: FieldGeometry) => ColumnField;
+  readonly through: (
+    document: DividerDocument,
+    record: { readonly time_s: readonly number[]; readonly value: readonly number[] },
+    field: ColumnField | null,
+    reference: "electrode" | "source",
+  ) => Through;
   readonly takeCandidate: (document: DividerDocument, candidate: Candidate) => DividerDocument;
 }
 
@@ -35,6 +42,8 @@ export const jobsOf =
         return speedOf(door, job.document, job.field ?? null);
       case "field":
         return fieldOf(door, job.document);
+      case "through":
+        return throughOf(door, job);
       case "size": {
         const sizing = door.size(job.document, { top: job.top });
         return sizing.ok ? ok({ document: job.document, sizing: sizing.value }) : sizing;
@@ -44,7 +53,7 @@ export const jobsOf =
     }
   };
 
-const nothing = { sizing: null, proof: null, field: null, awaitsField: false };
+const nothing = { sizing: null, proof: null, field: null, awaitsField: false, through: null };
 const ok = (found: Pick<Outcome, "document"> & Partial<Outcome>): Result<Outcome> => ({
   ok: true,
   value: { ...nothing, ...found },
@@ -61,6 +70,13 @@ function provenOf(
   const proof = door.prove(document, field);
   if (!proof.ok) return proof;
   return ok({ document, sizing, proof: proof.value, field, awaitsField: geometry !== null && field === null });
+}
+
+function throughOf(door: SolverDoor, job: Extract<Job, { kind: "through" }>): Result<Outcome> {
+  const proven = provenOf(door, job.document, null, job.field);
+  if (!proven.ok) return proven;
+  const { document, field } = proven.value;
+  return ok({ document, field, through: door.through(document, job.record, field, job.reference) });
 }
 
 /** The geometry that the document asks a field for, and the field of it where it is at hand. */

@@ -8,6 +8,7 @@ import {
   solveColumnField,
   speed,
   takeCandidate,
+  throughDivider,
 } from "../solver/index.ts";
 import { Cache, cachedSize, canonical } from "./cache.ts";
 import { jobsOf } from "./outcomeOf.ts";
@@ -24,5 +25,6 @@ export const runJob = jobsOf({
   fieldAsked,
   isFieldOf,
   solveField,
+  through: throughDivider,
   speed,
 });

@@ -9,6 +9,7 @@ import {
   solveColumnField,
   speed,
   takeCandidate,
+  throughDivider,
 } from "../../src/solver/index.ts";
 import { jobsOf } from "../../src/work/outcomeOf.ts";
 import { fixed, invented } from "../support/builders.ts";
@@ -32,7 +33,16 @@ const wide = invented({
   branches: [fixed("R2a", 2.4e6), fixed("R2b", 2.4e6)],
 });
 
-const follow = jobsOf({ size, prove, takeCandidate, fieldAsked, isFieldOf, solveField: solveColumnField, speed });
+const follow = jobsOf({
+  size,
+  prove,
+  takeCandidate,
+  fieldAsked,
+  isFieldOf,
+  solveField: solveColumnField,
+  through: throughDivider,
+  speed,
+});
 /** A keystroke in the voltage: searched, taken and proved anew, nothing remembered. */
 function keystroke(document: DividerDocument) {
   const { design, brief } = document;

@@ -151,6 +151,7 @@ export const inventedDocument: DividerDocument = {
       pollutionDegree: 2,
       materialGroup: "IIIa",
       wallDistance_m: 1,
+      approachDistance_m: null,
     },
     policy: {
       voltageDerating: 0.6,
@@ -203,6 +204,7 @@ export const inventedDocument: DividerDocument = {
       shield: null,
       box: null,
       wallDistance_m: 1,
+      potting: null,
     },
     strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
     lead: { inductance_H: 0, damping_ohm: 0 },

@@ -153,6 +153,14 @@ export const inventedProof: Proof = {
       "Silent: the reading is unchanged while the case rises to 24 kV.",
     ),
   ],
+  proximity: [{ what: "wall", distance_m: 0.66, strayChange: 0.08, readingChange: -0.012 }],
+  greatestInput: {
+    frequency_Hz: [10, 1e3, 1e6],
+    greatest_Vpeak: [60e3, 50e3, 5e3],
+    decidedBy: ["element voltage", "element voltage", "capacitor heat"],
+    element: [24, 24, 1],
+    sentence: "60 kV peak at 10 Hz, set by element voltage.",
+  },
   worstFault: null,
   findings: [
     finding({

@@ -27,7 +27,7 @@ export class FakeWorker implements WorkerLike {
     this.say({
       number,
       kind: "done",
-      outcome: { document, sizing: null, proof: null, field: null, awaitsField: false },
+      outcome: { document, sizing: null, proof: null, field: null, awaitsField: false, through: null },
       took_ms: 1,
     });
   }

@@ -7,6 +7,7 @@ import type {
   FieldGeometry,
   Proof,
   Sizing,
+  Through,
 } from "../../src/solver/index.ts";
 import { answer } from "../../src/work/answer.ts";
 import { Cache, cachedSize, canonical, sizingKey } from "../../src/work/cache.ts";
@@ -38,6 +39,7 @@ function door(candidates: Candidate[] = [candidate]) {
       calls.push("field");
       return { geometry, strays: {} as ColumnField["strays"] };
     },
+    through: (_, record) => ({ sentence: `${record.time_s.length} points` }) as Through,
     takeCandidate: (document, { design }) => ({ ...document, design: { ...design, follows: false } }),
   });
   return { calls, run };
@@ -109,6 +111,14 @@ describe("a design whose strays come from the field of its drawing", () => {
     run({ kind: "prove", document: asking(), field: "solve" });
     expect(calls).toEqual(["field", "prove false with field"]);
   });
+});
+
+it("a recorded waveform is sent through the design that stands, after its proof", () => {
+  const { calls, run } = door();
+  const record = { time_s: [0, 1], value: [0, 1] };
+  const outcome = run({ kind: "through", document: standing(), field: null, record, reference: "electrode" });
+  expect(calls).toEqual(["prove false"]);
+  expect(outcome.ok && outcome.value.through?.sentence).toBe("2 points");
 });
 
 describe("an answer", () => {

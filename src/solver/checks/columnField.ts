@@ -1,7 +1,6 @@
-import { type FieldGeometry, noElectrode } from "../field/fieldGeometry.ts";
+import { type FieldGeometry, fieldGeometryOf } from "../field/fieldGeometry.ts";
 import { shapeFault } from "../field/shapeFault.ts";
 import { type FieldStrays, solveField } from "../field/solveField.ts";
-import type { Geometry } from "../job/design.ts";
 import type { DividerDocument } from "../job/document.ts";
 import { err, ok, type Result } from "../quantities/result.ts";
 
@@ -21,31 +20,15 @@ export interface ColumnField {
 export function fieldAsked(document: DividerDocument): Result<FieldGeometry | null> {
   const { design } = document;
   if (design === null || design.strays.from !== "field" || design.hvArm.elements.length < 2) return ok(null);
-  const geometry = drawn(design.geometry, design.hvArm.elements.length);
+  const geometry = fieldGeometryOf(design.geometry, Math.min(design.hvArm.elements.length, mostNodes));
   const fault = shapeFault(geometry, { idealisation: "bands" });
   return fault === null ? ok(geometry) : err({ ...fault, where: `/design/geometry${fault.where}` });
 }
 
-function drawn(geometry: Geometry, elements: number): FieldGeometry {
-  const { columnDiameter_m, columnLength_m, footHeight_m, bandFraction, electrode, shield, box, wallDistance_m } =
-    geometry;
-  return {
-    elements: Math.min(elements, mostNodes),
-    columnDiameter_m,
-    columnLength_m,
-    footHeight_m,
-    bandFraction,
-    electrode: electrode.kind === "none" ? noElectrode : electrode,
-    shield,
-    box,
-    wallDistance_m,
-  };
-}
-
-/** Solves the drawn column: tens of milliseconds. */
+/** Solves the drawn column, its wall a single plane one: tens of milliseconds. */
 export const solveColumnField = (geometry: FieldGeometry): ColumnField => ({
   geometry,
-  strays: solveField(geometry, { withUncertainty: true }),
+  strays: solveField(geometry, { withUncertainty: true, wall: "plane" }),
 });
 
 /** Whether a solved field is that of the geometry asked for. */

@@ -16,6 +16,8 @@ export interface FieldGeometry {
   readonly box: { readonly radius_m: number; readonly top_m: number } | null;
   /** Plane vertical earthed wall, from the axis. */
   readonly wallDistance_m: number | null;
+  /** Compound cast round the string over its whole length, to this radius; absent: air. */
+  readonly potting?: { readonly permittivity: number; readonly radius_m: number } | null;
   /** Vertical HV wire on the axis, from the electrode (or the column's top) upwards; absent: none. */
   readonly wire?: { readonly radius_m: number; readonly length_m: number } | null;
 }
@@ -59,8 +61,8 @@ export const topOf = (geometry: FieldGeometry): number => geometry.footHeight_m 
 
 /** What the field needs of a design's geometry, for a string of so many elements. */
 export function fieldGeometryOf(geometry: Geometry, elements: number): FieldGeometry {
-  const { columnDiameter_m, columnLength_m, footHeight_m, bandFraction, electrode, shield, box, wallDistance_m } =
-    geometry;
+  const { columnDiameter_m, columnLength_m, footHeight_m, bandFraction, electrode, shield, box } = geometry;
+  const { wallDistance_m, potting } = geometry;
   return {
     elements,
     columnDiameter_m,
@@ -71,6 +73,7 @@ export function fieldGeometryOf(geometry: Geometry, elements: number): FieldGeom
     shield,
     box,
     wallDistance_m,
+    potting,
   };
 }
 

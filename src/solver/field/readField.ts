@@ -46,6 +46,7 @@ const geometryKeys = [
   "shield",
   "box",
   "wallDistance_m",
+  "potting",
   "wire",
 ];
 const least_m = 1e-6;
@@ -70,6 +71,7 @@ function readGeometry(value: unknown): FieldGeometry {
     box: readParts(given.box, `${at}/box`, ["radius_m", "top_m"]) as FieldGeometry["box"],
     wallDistance_m:
       given.wallDistance_m === undefined || given.wallDistance_m === null ? null : length("wallDistance_m"),
+    potting: readPotting(given.potting),
     wire: readParts(given.wire, `${at}/wire`, ["radius_m", "length_m"]) as NonNullable<FieldGeometry["wire"]> | null,
   };
   const slender = geometry.columnLength_m / geometry.columnDiameter_m;
@@ -80,6 +82,16 @@ function readGeometry(value: unknown): FieldGeometry {
       "Check both lengths.",
     );
   return geometry;
+}
+
+function readPotting(value: unknown): NonNullable<FieldGeometry["potting"]> | null {
+  if (value === undefined || value === null) return null;
+  const at = "/geometry/potting";
+  const given = object(value, at, ["permittivity", "radius_m"]);
+  return {
+    permittivity: number(given.permittivity, `${at}/permittivity`, 1, 100),
+    radius_m: number(given.radius_m, `${at}/radius_m`, least_m, greatest_m),
+  };
 }
 
 const needs = {

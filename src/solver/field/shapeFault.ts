@@ -2,13 +2,16 @@ import type { Refusal } from "../quantities/result.ts";
 import { type Curve, heightAt, lengthOf, nearestOn, radiusAt } from "./curve.ts";
 import { electrodePieces, sphereRise } from "./electrodePieces.ts";
 import { type FieldAsk, type FieldGeometry, highestOf, topOf } from "./fieldGeometry.ts";
+import { inAir } from "./potting.ts";
 
 type Fault = Refusal | null;
 const fault = (where: string, why: string, cure: string): Refusal => ({ where, why, cure });
 
 /** Why bodies of this geometry cannot stand as drawn, or null; `where` is the key under the geometry that is meant. */
-export function shapeFault(geometry: FieldGeometry, ask: Pick<FieldAsk, "idealisation">): Fault {
+export function shapeFault(drawn: FieldGeometry, ask: Pick<FieldAsk, "idealisation">): Fault {
+  const geometry = inAir(drawn);
   return (
+    pottingFault(drawn) ??
     electrodeFault(geometry) ??
     toroidFault(geometry, ask) ??
     boxFault(geometry) ??
@@ -16,6 +19,21 @@ export function shapeFault(geometry: FieldGeometry, ask: Pick<FieldAsk, "idealis
     meetings(geometry) ??
     wallFault(geometry)
   );
+}
+
+function pottingFault({ potting, columnDiameter_m, shield }: FieldGeometry): Fault {
+  if (potting === undefined || potting === null) return null;
+  if (!(potting.permittivity >= 1))
+    return fault("/potting/permittivity", "A compound's permittivity is not below that of air.", "Give 1 or more.");
+  if (potting.radius_m < columnDiameter_m / 2)
+    return fault("/potting/radius_m", "The compound is narrower than the column in it.", "Make it wider.");
+  if (shield !== null && potting.radius_m > shield.radius_m)
+    return fault(
+      "/potting/radius_m",
+      "The compound reaches past the shield.",
+      "Make it narrower, or the shield wider.",
+    );
+  return null;
 }
 
 function electrodeFault({ electrode, columnDiameter_m, wire }: FieldGeometry): Fault {

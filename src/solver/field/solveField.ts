@@ -5,6 +5,7 @@ import { type FoldedLadder, foldedLadder } from "./ladder.ts";
 import { maxwell } from "./maxwell.ts";
 import { meridian } from "./meridian.ts";
 import { type Body, meshOf, type Piece } from "./panel.ts";
+import { inAir } from "./potting.ts";
 import { refine } from "./refine.ts";
 import { surfaceField } from "./surfaceField.ts";
 
@@ -54,7 +55,10 @@ export const mostUnknowns = 2500;
 
 /** How many unknowns the solve would have: parts that nearly touch, and many elements, need many. */
 export function unknownsOf(geometry: FieldGeometry, ask: FieldAsk): number {
-  return refine(meridian(geometry, ask)).reduce((sum, piece) => sum + pointsAt(piece, geometry.elements, ask), 0);
+  return refine(meridian(inAir(geometry), ask)).reduce(
+    (sum, piece) => sum + pointsAt(piece, geometry.elements, ask),
+    0,
+  );
 }
 
 /** Many short bands need fewer points each; a film's kinks at the nodes need more. */
@@ -66,7 +70,8 @@ function pointsOn({ body }: Piece, n: number, { idealisation }: FieldAsk): numbe
 const pointsAt = (piece: Piece, n: number, ask: FieldAsk): number =>
   Math.max(2, Math.round(pointsOn(piece, n, ask) * ask.resolution));
 
-function solveOnce(geometry: FieldGeometry, ask: FieldAsk): FieldStrays {
+function solveOnce(drawn: FieldGeometry, ask: FieldAsk): FieldStrays {
+  const geometry = inAir(drawn);
   const n = geometry.elements;
   const pieces = refine(meridian(geometry, ask));
   const mesh = meshOf(pieces, (piece) => pointsAt(piece, n, ask));

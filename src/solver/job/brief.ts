@@ -41,6 +41,8 @@ export interface Surroundings {
   readonly pollutionDegree: PollutionDegree;
   readonly materialGroup: MaterialGroup;
   readonly wallDistance_m: number;
+  /** Approach distance that local rules set; null: not stated. There is no default. */
+  readonly approachDistance_m: number | null;
 }
 
 export interface Policy {

@@ -83,6 +83,8 @@ export interface Geometry {
   readonly shield: { readonly radius_m: number; readonly from_m: number; readonly to_m: number } | null;
   readonly box: { readonly radius_m: number; readonly top_m: number } | null;
   readonly wallDistance_m: number | null;
+  /** Compound cast round the string; null: air. */
+  readonly potting: { readonly permittivity: number; readonly radius_m: number } | null;
 }
 
 export interface Strays {

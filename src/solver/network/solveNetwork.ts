@@ -111,9 +111,7 @@ function waveformAnswers(network: LadderNetwork, ask: NetworkAsk) {
         }),
     ...(half === null ? {} : { halfSine: values(half.times_s, (g) => halfSine(g, half.duration_s)) }),
     ...(wave === null ? {} : { square: values(wave.times_s, (g) => (t) => square(g, wave.period_s, wave.duty, t)) }),
-    ...(record === null
-      ? {}
-      : { samples: values(record.times_s, (g) => (t) => samples(g, record.time_s, record.value, t)) }),
+    ...(record === null ? {} : { samples: values(record.times_s, (g) => samples(g, record.time_s, record.value)) }),
   };
 }
 

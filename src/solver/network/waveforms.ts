@@ -51,17 +51,45 @@ export function square(g: TimeResponse, period_s: number, duty: number, t: numbe
   return sum + integral + (w(periods) - w(last)) / 2 + slope / 12;
 }
 
-/** Linear between points, 0 before the first, the last value held. Two points at one time are a jump. */
-export function samples(g: TimeResponse, time_s: ArrayLike<number>, value: ArrayLike<number>, t: number): number {
-  let sum = t >= time_s[0]! ? value[0]! * g.at(t - time_s[0]!) : 0;
-  for (let k = 0; k + 1 < time_s.length && time_s[k]! < t; k++) {
-    const from = time_s[k]!;
-    const to = time_s[k + 1]!;
-    const rise = value[k + 1]! - value[k]!;
-    if (rise === 0) continue;
-    if (to === from) sum += rise * g.at(t - to);
-    else if (t < to) sum += (rise * (t - from) * g.mean(0, t - from)) / (to - from);
-    else sum += rise * g.mean(t - to, t - from);
+/**
+ * Linear between points, 0 before the first, the last value held. Two points at one time are a jump. What lies so far back that the
+ * step response has settled counts by its last value alone.
+ */
+export function samples(g: TimeResponse, time_s: ArrayLike<number>, value: ArrayLike<number>): (t: number) => number {
+  const settled = settledFrom(g);
+  return (t) => {
+    const held = lastBefore(time_s, t - settled);
+    let sum = held >= 0 ? value[held]! : t >= time_s[0]! ? value[0]! * g.at(t - time_s[0]!) : 0;
+    for (let k = Math.max(held, 0); k + 1 < time_s.length && time_s[k]! < t; k++) {
+      const from = time_s[k]!;
+      const to = time_s[k + 1]!;
+      const rise = value[k + 1]! - value[k]!;
+      if (rise === 0) continue;
+      if (to === from) sum += rise * g.at(t - to);
+      else if (t < to) sum += (rise * (t - from) * g.mean(0, t - from)) / (to - from);
+      else sum += rise * g.mean(t - to, t - from);
+    }
+    return sum;
+  };
+}
+
+/** Time after which the step response stays at 1 to rounding: looked for ten times a decade, and until what rings has died away. */
+function settledFrom(g: TimeResponse): number {
+  const rung = g.ringing.reduce((longest, p) => Math.max(longest, 25 / -p.re), 0);
+  for (let i = 70; i >= -140; i--) {
+    if (Math.abs(g.at(10 ** (i / 10)) - 1) > 2e-10) return Math.max(rung, 10 ** ((i + 1) / 10));
   }
-  return sum;
+  return rung;
+}
+
+/** Index of the last time not after t; -1: none. */
+function lastBefore(time_s: ArrayLike<number>, t: number): number {
+  let low = -1;
+  let high = time_s.length;
+  while (high - low > 1) {
+    const middle = (low + high) >> 1;
+    if (time_s[middle]! <= t) low = middle;
+    else high = middle;
+  }
+  return low;
 }

@@ -7,6 +7,7 @@ import { insulationFormulas } from "../checks/insulation.ts";
 import { loadingFormulas } from "../checks/loadingFormulas.ts";
 import { lvArmFormulas } from "../checks/lvArm.ts";
 import { protectorFormulas } from "../checks/protectors.ts";
+import { proximityFormulas, proximityRecord } from "../checks/proximityFormulas.ts";
 import { scaleFactorFormulas } from "../checks/scaleFactorFormulas.ts";
 import { drivenPoleRecord, slowFastFormulas } from "../checks/slowFastFormulas.ts";
 import { edgeShareRecord, stepSharingFormulas } from "../checks/stepSharing.ts";
@@ -16,9 +17,11 @@ import { tapLoadFormulas } from "../checks/tapLoad.ts";
 import { workingVoltageFormulas } from "../checks/workingVoltage.ts";
 import { estimateFormulas } from "../field/estimateFormulas.ts";
 import { fieldRecord } from "../field/fieldRecord.ts";
+import { pottingFormulas } from "../field/potting.ts";
 import { underElectrode } from "../field/underElectrode.ts";
 import { sizingFormulas, sizingSolutions } from "../sizing/formulas.ts";
 import type { Formula, Solution } from "../standards/formula.ts";
+import { greatestInputRecord } from "./greatestInput.ts";
 import { responseFormulas, responseRecords } from "./responseFormulas.ts";
 
 /** Every formula that may stand behind a figure, by id. */
@@ -35,10 +38,14 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     chargeFormulas,
     protectorFormulas,
     responseFormulas,
+    estimateFormulas,
     edgeFormulas,
     slowFastFormulas,
     stepSharingFormulas,
     tapLoadFormulas,
+    underElectrode,
+    pottingFormulas,
+    proximityFormulas,
     estimateFormulas,
     underElectrode,
   ]
@@ -52,6 +59,8 @@ export const solutions: ReadonlyMap<string, Solution> = new Map(
   [
     capacitiveLadderRecord,
     fieldRecord,
+    proximityRecord,
+    greatestInputRecord,
     faultRecord,
     resistanceAbove,
     drivenPoleRecord,

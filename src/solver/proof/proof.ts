@@ -1,10 +1,12 @@
 /** The whole judgement of a design: every figure with its trace, the responses, the findings and the cautions. Plain data. */
 import type { FaultRow } from "../checks/faultRow.ts";
 import type { InstrumentRow } from "../checks/instruments.ts";
+import type { ProximityRow } from "../checks/proximity.ts";
 import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
 import type { Caution } from "./cautions.ts";
+import type { GreatestInput } from "./greatestInput.ts";
 
 export interface FrequencyResponse {
   readonly frequency_Hz: readonly number[];
@@ -42,6 +44,9 @@ export interface Proof {
   readonly step: StepResponse;
   readonly instruments: readonly InstrumentRow[];
   readonly faults: readonly FaultRow[];
+  /** What stands near the column, and what it does to an edge. */
+  readonly proximity: readonly ProximityRow[];
+  readonly greatestInput: GreatestInput;
   readonly worstFault: FaultRow | null;
   readonly findings: readonly Finding[];
   readonly cautions: readonly Caution[];
@@ -122,6 +127,10 @@ export const figures = {
   "insulation.elementCreepage_m": "creepage required along one element",
   "insulation.elementClearance_m": "clearance required along one element",
   "fault.worstOutput_V": "worst single fault at the instrument",
+  "greatestInput.low_V": "greatest sine at 10 Hz, peak",
+  "greatestInput.high_V": "greatest sine at the upper end of the frequencies looked at, peak",
+  "keepOut.proximity_m": "distance below which a wall moves the reading of an edge",
+  "keepOut.distance_m": "keep-out distance",
   "charge.waitTime_s": "time to fall to 60 V through the divider alone",
 } as const;
 export type FigurePath = keyof typeof figures;

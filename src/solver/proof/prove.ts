@@ -14,6 +14,7 @@ import { judgeLvSpike } from "../checks/lvSpike.ts";
 import { misuse } from "../checks/misuse.ts";
 import { networkOf } from "../checks/networkOf.ts";
 import { judgeProtectors } from "../checks/protectors.ts";
+import { proximityOf } from "../checks/proximity.ts";
 import { scaleFactor, scaleFactorUncertainty } from "../checks/scaleFactor.ts";
 import { type Show, show } from "../checks/show.ts";
 import { judgeSlowFast } from "../checks/slowFast.ts";
@@ -25,6 +26,7 @@ import type { DividerDocument } from "../job/document.ts";
 import { ok, type Result, refuse } from "../quantities/result.ts";
 import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
+import { greatestInput } from "./greatestInput.ts";
 import { jobSentence } from "./jobSentence.ts";
 import { noResistance } from "./noResistance.ts";
 import type { Proof } from "./proof.ts";
@@ -59,6 +61,8 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   judgeEdge(j, show);
   judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
+  const proximity = proximityOf(j, string);
+  const greatest = greatestInput(j, network);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -69,6 +73,8 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
     step,
     instruments: instrumentRows(j),
     faults: rows,
+    proximity,
+    greatestInput: greatest,
     worstFault: worstFault(rows),
     findings,
     cautions,

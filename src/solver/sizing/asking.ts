@@ -33,6 +33,7 @@ const bare: Design = {
     shield: null,
     box: null,
     wallDistance_m: null,
+    potting: null,
   },
   strays: { from: "formula", toEarth_F: [], toElectrode_F: [], electrodeToTap_F: 0 },
   lead: { inductance_H: 0, damping_ohm: 0 },

@@ -80,6 +80,7 @@ export function columnGeometry(document: DividerDocument, shape: ColumnShape): G
     shield: null,
     box: top_m > 0 ? { radius_m: Math.max(boxRadius, columnDiameter_m), top_m } : null,
     wallDistance_m: document.brief.surroundings.wallDistance_m,
+    potting: null,
   };
 }
 

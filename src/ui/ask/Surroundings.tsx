@@ -75,6 +75,15 @@ export function Surroundings({ brief }: { readonly brief: Brief }) {
           least={0.001}
           greatest={1000}
         />
+        <QuantityField
+          label="approach distance by local rules"
+          pointer={`${at}/approachDistance_m`}
+          unit="m"
+          value={s.approachDistance_m}
+          least={0.001}
+          greatest={1000}
+          blank="not stated"
+        />
       </div>
     </AskSection>
   );

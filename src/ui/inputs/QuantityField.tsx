@@ -37,7 +37,7 @@ export function QuantityField(props: QuantityProps) {
           onBlur={field.onBlur}
         />
         {echo === null ? null : <span className="echo">→ {echo}</span>}
-        <span className="origin">{value === null ? "default" : origin}</span>
+        <span className="origin">{value !== null ? origin : blank === "not stated" ? "" : "default"}</span>
       </div>
       <div id={`${id}-said`} className="said" aria-live="polite">
         {wrong ? <Said parsed={parsed} onChoose={field.choose} /> : <FieldFinding pointer={pointer} />}

@@ -2,6 +2,7 @@ import { useMemo } from "react";
 import { openWhy, useDocument, useJudged, useSession } from "../frame/session.ts";
 import { useApply } from "../frame/useApply.ts";
 import { type ProveActions, ProveSheet } from "./ProveSheet.tsx";
+import { RecordedWaveform } from "./RecordedWaveform.tsx";
 import { SpeedSections } from "./SpeedSections.tsx";
 import { useSpeed } from "./useSpeed.ts";
 
@@ -24,6 +25,7 @@ export function ProveScreen() {
         speed={speed}
         beyond={<SpeedSections document={judged} proof={proof} speed={speed} />}
       />
+      <RecordedWaveform />
     </div>
   );
 }

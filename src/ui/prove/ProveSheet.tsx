@@ -3,6 +3,7 @@ import type { Cure, DividerDocument, Proof, Speed } from "../../solver/index.ts"
 import { withUnit } from "../charts/axisText.ts";
 import { ElementChart } from "../charts/ElementChart.tsx";
 import { FrequencyChart } from "../charts/FrequencyChart.tsx";
+import { GreatestInputChart } from "../charts/GreatestInputChart.tsx";
 import { StepChart } from "../charts/StepChart.tsx";
 import { sheetNumber } from "../size/sheetNumber.ts";
 import { Cautions } from "./Cautions.tsx";
@@ -11,6 +12,7 @@ import { FaultTable } from "./FaultTable.tsx";
 import { FindingList } from "./FindingList.tsx";
 import { faultMark, worstFaultsFirst } from "./faultMarks.ts";
 import { Insulation } from "./Insulation.tsx";
+import { Proximity } from "./Proximity.tsx";
 import { StepFigures } from "./StepFigures.tsx";
 import "../size/size.css";
 import "./prove.css";
@@ -60,6 +62,10 @@ export function ProveSheet({ document, proof, actions, speed = null, beyond = nu
         <h2 id="insulation-heading">insulation</h2>
         <Insulation findings={proof.findings} onWhy={actions.onWhy} />
       </section>
+      <section className="sheet-section" aria-labelledby="proximity-heading">
+        <h2 id="proximity-heading">what stands near</h2>
+        <Proximity proof={proof} onWhy={actions.onWhy} />
+      </section>
       <Faults document={document} proof={proof} />
       <section className="sheet-section" aria-labelledby="findings-heading">
         <h2 id="findings-heading">findings in full</h2>
@@ -84,6 +90,7 @@ function Stress({ proof }: { readonly proof: Proof }) {
         bases={dissipation}
         file="element-dissipation"
       />
+      <GreatestInputChart greatest={proof.greatestInput} file="greatest-input" />
     </section>
   );
 }

@@ -78,7 +78,7 @@ describe("a 25 ns edge of a half bridge", () => {
     const spike = edgeFormulas.spike.compute({ F, L2, C1, tr: whole * raisedCosineShare }) as number;
     for (const share of [0.1, 0.3, 0.7]) {
       const times = Array.from({ length: 24 }, (_, k) => share * whole + (k / 24) * ring_s);
-      const extra = times.reduce((sum, t) => sum + samples(g, time_s, value, t) - edge(t), 0) / times.length;
+      const extra = times.reduce((sum, t) => sum + samples(g, time_s, value)(t) - edge(t), 0) / times.length;
       const middle = share * whole + (11.5 / 24) * ring_s;
       expectRelative(extra, spike * Math.cos((Math.PI * middle) / whole), 0.02, "second derivative of the edge", spike);
     }

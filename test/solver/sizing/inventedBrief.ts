@@ -110,6 +110,7 @@ export const brief = (over: Over = {}): Brief => ({
     pollutionDegree: 2,
     materialGroup: "IIIa",
     wallDistance_m: 1,
+    approachDistance_m: null,
     ...over.surroundings,
   },
   policy: {
