@@ -8,9 +8,9 @@ const functions: readonly (readonly [InstrumentFunction, string])[] = [
 
 const ends: readonly (readonly [CableEnd, string])[] = [
   ["lumped", "its capacitance"],
-  ["open", "a line, open into the instrument"],
-  ["matchedAtTap", "a line, its impedance in series at the tap"],
-  ["terminated", "a line, its impedance across the far end"],
+  ["open", "a line, open"],
+  ["matchedAtTap", "a line, matched at the tap"],
+  ["terminated", "a line, terminated"],
 ];
 
 /** Every figure of one instrument on one range, with its cable. */
