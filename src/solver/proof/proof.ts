@@ -5,6 +5,8 @@ import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
 import type { Caution } from "./cautions.ts";
+import type { InstrumentReach } from "./instrumentReach.ts";
+import type { Match } from "./matches.ts";
 
 export interface FrequencyResponse {
   readonly frequency_Hz: readonly number[];
@@ -40,6 +42,10 @@ export interface Proof {
   readonly assumed: readonly string[];
   readonly frequency: FrequencyResponse;
   readonly step: StepResponse;
+  /** The three matches of the LV capacitance; empty where neither arm holds a capacitor. */
+  readonly matches: readonly Match[];
+  /** Links and trimmer against every instrument; null where neither arm holds a capacitor. */
+  readonly reach: InstrumentReach | null;
   readonly instruments: readonly InstrumentRow[];
   readonly faults: readonly FaultRow[];
   readonly worstFault: FaultRow | null;
@@ -80,6 +86,13 @@ export const figures = {
   "match.flattest.responseTime_s": "flattest: response time",
   "match.responseTime.edgeError": "zero response time: error at the edge",
   "match.responseTime.bandDeviation_dB": "zero response time: greatest deviation over the band",
+  "lvArm.share.fixed_F": "fixed LV capacitors",
+  "lvArm.share.links_F": "links fitted",
+  "lvArm.share.trimmer_F": "trimmer at its setting",
+  "lvArm.share.cable_F": "cable capacitance",
+  "lvArm.share.instrument_F": "instrument capacitance",
+  "lvArm.share.protectors_F": "protector capacitance",
+  "lvArm.capacitanceTotal_F": "LV capacitance, cable and instrument counted",
   "lvArm.capacitanceFitted_F": "LV capacitance fitted, cable and instrument not counted",
   "scaleFactor.predicted": "scale factor, predicted",
   "scaleFactor.deviation": "deviation from the wanted scale factor",

@@ -18,6 +18,7 @@ import type { DividerDocument } from "../job/document.ts";
 import { ok, type Result, refuse } from "../quantities/result.ts";
 import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
+import { instrumentReach } from "./instrumentReach.ts";
 import { jobSentence } from "./jobSentence.ts";
 import { noResistance } from "./noResistance.ts";
 import type { Proof } from "./proof.ts";
@@ -46,7 +47,8 @@ export function prove(document: DividerDocument): Result<Proof> {
   misuse(j, show);
   const rows = faults(j, string, show);
   charge(j, show);
-  const { frequency, step } = response(j, networkOf(j, string), show);
+  const { frequency, step, matches } = response(j, networkOf(j, string), show);
+  const reach = instrumentReach(j, string);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -55,6 +57,8 @@ export function prove(document: DividerDocument): Result<Proof> {
     assumed: Object.keys(document.origins).filter((pointer) => document.origins[pointer] === "assumed"),
     frequency,
     step,
+    matches,
+    reach,
     instruments: instrumentRows(j),
     faults: rows,
     worstFault: worstFault(rows),
