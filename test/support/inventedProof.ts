@@ -69,6 +69,13 @@ export const inventedProof: Proof = {
       "lvArm.capacitanceHighFrequency_F": 18.2e-9,
       "lvArm.capacitanceFlattest_F": 18.6e-9,
       "lvArm.capacitanceFitted_F": 18.5e-9,
+      "lvArm.share.fixed_F": 18e-9,
+      "lvArm.share.links_F": 470e-12,
+      "lvArm.share.trimmer_F": 33e-12,
+      "lvArm.share.cable_F": 100e-12,
+      "lvArm.share.instrument_F": 15e-12,
+      "lvArm.share.protectors_F": 0,
+      "lvArm.capacitanceTotal_F": 18.615e-9,
       "scaleFactor.predicted": 1000.4,
       "scaleFactor.deviation": 0.0004,
       "response.bandwidth_Hz": 30e6,
@@ -84,6 +91,42 @@ export const inventedProof: Proof = {
   assumed: ["/brief/source/capacitance_F"],
   frequency: inventedResponse,
   step: inventedStep,
+  matches: (
+    [
+      ["highFrequency", 18.2e-9, 0],
+      ["flattest", 18.6e-9, -0.02],
+      ["responseTime", 19.4e-9, -0.06],
+    ] as const
+  ).map(([by, capacitance_F, edge]) => ({
+    by,
+    capacitance_F,
+    chosen: by === "flattest",
+    step: { time_s: times(-5, 3), value: times(-5, 3).map((t) => 1 + edge * Math.exp(-t / 2e-3)) },
+  })),
+  reach: {
+    sure: { from_F: 18.1e-9, to_F: 19.3e-9 },
+    holes: [{ link_F: 1e-9, from_F: 18.5e-9, to_F: 18.9e-9 }],
+    needs: [
+      {
+        id: "scope",
+        name: "bench oscilloscope",
+        principal: true,
+        least_F: 17.9e-9,
+        nominal_F: 18.6e-9,
+        greatest_F: 19.2e-9,
+        within: false,
+      },
+      {
+        id: "meter",
+        name: "hand meter, dc",
+        principal: false,
+        least_F: 18.15e-9,
+        nominal_F: 18.3e-9,
+        greatest_F: 18.45e-9,
+        within: true,
+      },
+    ],
+  },
   instruments: [
     {
       id: "scope",

@@ -1,7 +1,7 @@
 import { scaleFactorOf } from "./dcSolution.ts";
 import { type LadderNetwork, type Reference, withLvCapacitance } from "./ladderNetwork.ts";
 import { responseTime } from "./stepFigures.ts";
-import { angular, decibel } from "./sweep.ts";
+import { angular } from "./sweep.ts";
 import { tapTwoPort } from "./tapTwoPort.ts";
 import { transfer, transferOf } from "./transfer.ts";
 
@@ -16,10 +16,12 @@ export interface LvCapacitance {
   readonly flattest_dB: number | null;
 }
 
+/** @param points frequencies of the band, evenly spaced in their logarithm, ends included */
 export function lvCapacitance(
   network: LadderNetwork,
   band_Hz: readonly [number, number],
   reference: Reference = "electrode",
+  points = 241,
 ): LvCapacitance {
   const bare = withLvCapacitance(network, 0);
   const scaleFactor = scaleFactorOf(bare, reference);
@@ -27,7 +29,7 @@ export function lvCapacitance(
   const highFrequency = byHighFrequency(bare, scaleFactor, reference);
   const responseTime = byResponseTime(bare, reference);
   const start = [highFrequency, responseTime].find((each) => each !== null && each > 0) ?? 1e-8;
-  const flattest = byFlatness(bare, scaleFactor, band_Hz, start, reference);
+  const flattest = byFlatness(bare, scaleFactor, { band: band_Hz, points }, start, reference);
   return {
     responseTime_F: positive(responseTime),
     highFrequency_F: positive(highFrequency),
@@ -76,28 +78,33 @@ function byHighFrequency(bare: LadderNetwork, scaleFactor: number, reference: Re
 function byFlatness(
   bare: LadderNetwork,
   scaleFactor: number,
-  band: readonly [number, number],
+  over: { readonly band: readonly [number, number]; readonly points: number },
   scale: number,
   reference: Reference,
 ) {
-  const [low, high] = band;
+  const { points } = over;
+  const [low, high] = over.band;
   if (!(low > 0) || !(high >= low)) return { capacitance: null, deviation: null };
-  const points = 241;
   const frequencies = Array.from({ length: points }, (_, i) => low * (high / low) ** (i / (points - 1)));
   const sim = angular(frequencies);
   const sre = new Float64Array(points);
   const port = tapTwoPort(bare, sre, sim);
+  /** Greatest deviation either way, dB: the extremes of |H|² decide it, so that two logarithms do. */
   const worst = (C: number): number => {
-    const H = transferOf(bare, port, sre, sim, reference, C);
+    const { re, im } = transferOf(bare, port, sre, sim, reference, C);
+    let least = Number.POSITIVE_INFINITY;
     let greatest = 0;
     for (let k = 0; k < points; k++) {
-      greatest = Math.max(greatest, Math.abs(decibel(H.re[k]! * scaleFactor, H.im[k]! * scaleFactor)));
+      const square = re[k]! * re[k]! + im[k]! * im[k]!;
+      if (square < least) least = square;
+      if (square > greatest) greatest = square;
     }
-    return greatest;
+    const unit = scaleFactor * scaleFactor;
+    return 10 * Math.max(Math.abs(Math.log10(least * unit)), Math.abs(Math.log10(greatest * unit)));
   };
   let best = 0;
   let at = 0;
-  const grid = [0, ...Array.from({ length: 321 }, (_, i) => scale * 10 ** (i / 40 - 6))];
+  const grid = [0, ...Array.from({ length: 81 }, (_, i) => scale * 10 ** (i / 10 - 6))];
   let least = worst(0);
   grid.forEach((C, i) => {
     const value = worst(C);
@@ -107,16 +114,34 @@ function byFlatness(
       at = i;
     }
   });
-  let from = grid[Math.max(at - 1, 0)]!;
-  let to = grid[Math.min(at + 1, grid.length - 1)]!;
-  const golden = (Math.sqrt(5) - 1) / 2;
-  for (let step = 0; step < 60; step++) {
-    const left = to - golden * (to - from);
-    const right = from + golden * (to - from);
-    if (worst(left) < worst(right)) to = right;
-    else from = left;
-  }
-  const refined = (from + to) / 2;
+  const from = grid[Math.max(at - 1, 0)]!;
+  const to = grid[Math.min(at + 1, grid.length - 1)]!;
+  const refined = narrowed(worst, from, to);
   const value = worst(refined);
   return value < least ? { capacitance: refined, deviation: value } : { capacitance: best, deviation: least };
+}
+
+const golden = (Math.sqrt(5) - 1) / 2;
+
+/** Golden section: where a function of one minimum is least between two ends. */
+function narrowed(f: (x: number) => number, low: number, high: number): number {
+  let from = low;
+  let to = high;
+  let left = to - golden * (to - from);
+  let right = from + golden * (to - from);
+  let [fLeft, fRight] = [f(left), f(right)];
+  for (let step = 0; step < 40; step++) {
+    if (fLeft < fRight) {
+      to = right;
+      [right, fRight] = [left, fLeft];
+      left = to - golden * (to - from);
+      fLeft = f(left);
+    } else {
+      from = left;
+      [left, fLeft] = [right, fRight];
+      right = from + golden * (to - from);
+      fRight = f(right);
+    }
+  }
+  return (from + to) / 2;
 }

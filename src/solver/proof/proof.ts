@@ -8,6 +8,8 @@ import type { SheetData } from "../standards/sheet.ts";
 import type { Caution } from "./cautions.ts";
 import type { Graded } from "./graded.ts";
 import type { GreatestInput } from "./greatestInput.ts";
+import type { InstrumentReach } from "./instrumentReach.ts";
+import type { Match } from "./matches.ts";
 
 export interface FrequencyResponse {
   readonly frequency_Hz: readonly number[];
@@ -43,6 +45,10 @@ export interface Proof {
   readonly assumed: readonly string[];
   readonly frequency: FrequencyResponse;
   readonly step: StepResponse;
+  /** The three matches of the LV capacitance; empty where neither arm holds a capacitor. */
+  readonly matches: readonly Match[];
+  /** Links and trimmer against every instrument; null where neither arm holds a capacitor. */
+  readonly reach: InstrumentReach | null;
   readonly instruments: readonly InstrumentRow[];
   readonly faults: readonly FaultRow[];
   /** What stands near the column, and what it does to an edge. */
@@ -90,6 +96,13 @@ export const figures = {
   "match.flattest.responseTime_s": "flattest: response time",
   "match.responseTime.edgeError": "zero response time: error at the edge",
   "match.responseTime.bandDeviation_dB": "zero response time: greatest deviation over the band",
+  "lvArm.share.fixed_F": "fixed LV capacitors",
+  "lvArm.share.links_F": "links fitted",
+  "lvArm.share.trimmer_F": "trimmer at its setting",
+  "lvArm.share.cable_F": "cable capacitance",
+  "lvArm.share.instrument_F": "instrument capacitance",
+  "lvArm.share.protectors_F": "protector capacitance",
+  "lvArm.capacitanceTotal_F": "LV capacitance, cable and instrument counted",
   "lvArm.capacitanceFitted_F": "LV capacitance fitted, cable and instrument not counted",
   "scaleFactor.predicted": "scale factor, predicted",
   "scaleFactor.deviation": "deviation from the wanted scale factor",

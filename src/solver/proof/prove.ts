@@ -28,6 +28,7 @@ import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
 import { graded } from "./graded.ts";
 import { greatestInput } from "./greatestInput.ts";
+import { instrumentReach } from "./instrumentReach.ts";
 import { jobSentence } from "./jobSentence.ts";
 import { noResistance } from "./noResistance.ts";
 import type { Proof } from "./proof.ts";
@@ -58,12 +59,13 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   const rows = faults(j, string, show);
   charge(j, show);
   const network = networkOf(j, string);
-  const { frequency, step } = response(j, network, show);
+  const { frequency, step, matches } = response(j, network, show);
   judgeEdge(j, show);
   judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
   const proximity = proximityOf(j, string);
   const greatest = greatestInput(j, network);
+  const reach = instrumentReach(j, string);
   const findings = worstFirst(j.findings);
   return ok({
     job: jobSentence(document.brief, j.instrument),
@@ -72,6 +74,8 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
     assumed: Object.keys(document.origins).filter((pointer) => document.origins[pointer] === "assumed"),
     frequency,
     step,
+    matches,
+    reach,
     instruments: instrumentRows(j),
     faults: rows,
     proximity,

@@ -1,6 +1,5 @@
 import { wantedBand } from "../checks/band.ts";
 import { type Judging, plainFinding } from "../checks/judging.ts";
-import { capacitanceOf, protectorCapacitance } from "../checks/lvArm.ts";
 import type { Show } from "../checks/show.ts";
 import { wantedOf } from "../checks/wanted.ts";
 import { dcSolution } from "../network/dcSolution.ts";
@@ -11,9 +10,10 @@ import { bandwidth, decibel, degrees, sweep } from "../network/sweep.ts";
 import { type TimeResponse, timeResponse } from "../network/timeResponse.ts";
 import { formatQuantity, formatShare } from "../quantities/format.ts";
 import { logarithmic } from "./logarithmic.ts";
-import { greatestDeviation, matches } from "./matches.ts";
+import { fittedCapacitance } from "./lvShares.ts";
+import { greatestDeviation, type Match, matches } from "./matches.ts";
 import type { FrequencyResponse, StepResponse as StepResponseShape } from "./proof.ts";
-import { responseFormulas, responseRecords } from "./responseFormulas.ts";
+import { responseRecords } from "./responseFormulas.ts";
 
 const points = 241;
 
@@ -22,15 +22,17 @@ export function response(
   j: Judging,
   network: LadderNetwork,
   show: Show,
-): { frequency: FrequencyResponse; step: StepResponseShape } {
+): { frequency: FrequencyResponse; step: StepResponseShape; matches: Match[] } {
   const dc = dcSolution(network, 1);
   if (dc === null) throw new Error("a design's string passes dc");
   const predicted = j.sheet.number("scaleFactor.predicted") as number;
   const residual = Math.abs(dc.scaleFactor / predicted - 1);
   // The responses in time have the cable as a lump: its echoes cost too much for every keystroke and are answered when looked at.
   const calm = lumpedCable(network);
-  matches(j, calm, residual);
   fittedCapacitance(j);
+  const pole = j.sheet.number("response.lvPole_Hz");
+  const handover_s = pole === null ? 0 : 1 / (2 * Math.PI * pole);
+  const sketches = matches(j, calm, residual, handover_s);
   const g = timeResponse(calm) as TimeResponse;
   const figures = stepFigures(calm, "electrode", g);
   const f3 = bandwidth(network);
@@ -50,10 +52,8 @@ export function response(
   j.sheet.solved("response.overshoot", stepRecord, figures?.overshoot ?? null, inputs, residual);
   j.sheet.solved("response.settlingTime_s", stepRecord, figures?.settlingTime_s["1%"] ?? null, inputs, residual);
   const frequency = frequencyResponse(j, network, f3, residual, show);
-  const pole = j.sheet.number("response.lvPole_Hz");
-  const handover_s = pole === null ? 0 : 1 / (2 * Math.PI * pole);
   const step = stepTraces(g, figures?.settlingTime_s["1%"] ?? 0, handover_s, figures?.overshoot ?? 0);
-  return { frequency, step };
+  return { frequency, step, matches: sketches };
 }
 
 /** How much the top of the brief's pulse falls from right after its edge to its end, relative; null where no width is stated. */
@@ -62,34 +62,6 @@ function droopOf(j: Judging, g: TimeResponse): number | null {
   if (width_s === null || !(width_s > 0)) return null;
   const start = g.at(Math.min(riseTime_s ?? 0, width_s / 10));
   return start === 0 ? null : 1 - g.at(width_s) / start;
-}
-
-/** What is fitted, with cable and instrument, and the pole. Writes `lvArm.capacitanceFitted_F` and `lvArm.capacitanceTotal_F`. */
-function fittedCapacitance(j: Judging): void {
-  const { sheet, design, instrument, document } = j;
-  sheet.given("/design/lvArm/branches/*/capacitance_F", design.lvArm.branches.map(capacitanceOf));
-  sheet.derive("lvArm.capacitanceFitted_F", responseFormulas.fitted, { C: "/design/lvArm/branches/*/capacitance_F" });
-  const at = document.instruments.indexOf(instrument);
-  sheet.given(`/instruments/${at}/capacitance_F`, instrument.capacitance_F);
-  sheet.given(`/instruments/${at}/cable/length_m`, instrument.cable.length_m);
-  sheet.given(`/instruments/${at}/cable/capacitance_F_per_m`, instrument.cable.capacitance_F_per_m);
-  sheet.given(
-    "/design/protectors:capacitance_F",
-    protectorCapacitance(j, "divider") + protectorCapacitance(j, "instrument"),
-  );
-  sheet.derive("lvArm.capacitanceTotal_F", responseFormulas.sum, {
-    fitted: "lvArm.capacitanceFitted_F",
-    length: `/instruments/${at}/cable/length_m`,
-    perMetre: `/instruments/${at}/cable/capacitance_F_per_m`,
-    instrument: `/instruments/${at}/capacitance_F`,
-    protectors: "/design/protectors:capacitance_F",
-  });
-  sheet.derive("response.lvPole_Hz", responseFormulas.lvPole, {
-    R1: "hvArm.resistance_ohm",
-    R2p: "lvArm.withInstrument_ohm",
-    C1: "hvArm.effectiveCapacitance_F",
-    C2p: "lvArm.capacitanceTotal_F",
-  });
 }
 
 function frequencyResponse(

@@ -70,18 +70,29 @@ export const responseFormulas = {
   sum: formula({
     id: "response.lvCapacitanceSum",
     title: "LV capacitance, cable and instrument counted",
-    statement: "{=} = {fitted} + {length} · {perMetre} + {instrument} + {protectors}",
+    statement: "{=} = {fitted} + {cable} + {instrument} + {protectors}",
     result: { symbol: "C_2p", unit: "F", meaning: "all that stands from tap to earth" },
     inputs: {
       fitted: { symbol: "C_2", unit: "F", meaning: "fitted" },
-      length: { symbol: "l_k", unit: "m", meaning: "cable length" },
-      perMetre: { symbol: "C_k'", unit: "F/m", meaning: "cable capacitance a metre" },
+      cable: { symbol: "C_k", unit: "F", meaning: "cable" },
       instrument: { symbol: "C_m", unit: "F", meaning: "instrument" },
       protectors: { symbol: "C_p", unit: "F", meaning: "protectors" },
     },
     holds: "Lumped cable.",
     source: computedHere("parallel sum"),
-    compute: ({ fitted, length, perMetre, instrument, protectors }) =>
-      fitted + length * perMetre + instrument + protectors,
+    compute: ({ fitted, cable, instrument, protectors }) => fitted + cable + instrument + protectors,
+  }),
+  cable: formula({
+    id: "response.cableCapacitance",
+    title: "Capacitance of the cable",
+    statement: "{=} = {length} · {perMetre}",
+    result: { symbol: "C_k", unit: "F", meaning: "cable" },
+    inputs: {
+      length: { symbol: "l_k", unit: "m", meaning: "cable length" },
+      perMetre: { symbol: "C_k'", unit: "F/m", meaning: "cable capacitance a metre" },
+    },
+    holds: "A cable short against the edge.",
+    source: computedHere("capacitance a metre times length"),
+    compute: ({ length, perMetre }) => length * perMetre,
   }),
 };

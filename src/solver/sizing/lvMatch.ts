@@ -11,8 +11,8 @@ import { found } from "./found.ts";
 import type { LvCapacitanceNeed } from "./lvCapacitors.ts";
 
 /** Half-width of a cable's capacitance, relative, and of the strays by the closed formula. */
-const cableSpread = 0.05;
-const strayDoubt = 0.3;
+export const cableSpread = 0.05;
+export const strayDoubt = 0.3;
 
 /** What the string's capacitors are to the match. */
 export interface StringMatched {

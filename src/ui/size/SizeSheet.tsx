@@ -1,5 +1,5 @@
 import { useCallback, useMemo } from "react";
-import type { Candidate, Cure, DividerDocument, Proof, Sizing } from "../../solver/index.ts";
+import type { Candidate, Cure, Design, DividerDocument, Proof, Sizing } from "../../solver/index.ts";
 import { CandidateTable } from "./CandidateTable.tsx";
 import { CapacitanceReach } from "./CapacitanceReach.tsx";
 import { ColumnDrawings } from "./ColumnDrawings.tsx";
@@ -10,9 +10,14 @@ import { GradedTable } from "./GradedTable.tsx";
 import { InstrumentTable } from "./InstrumentTable.tsx";
 import { LostFamilies } from "./LostFamilies.tsx";
 import { LvDrawing } from "./LvDrawing.tsx";
+import { LvShareBar } from "./LvShareBar.tsx";
 import { LvTable } from "./LvTable.tsx";
+import { Matches } from "./Matches.tsx";
+import { ReachBars } from "./ReachBars.tsx";
 import { sheetNumber } from "./sheetNumber.ts";
 import { WindowBar } from "./WindowBar.tsx";
+import "../charts/charts.css";
+import "./compensation.css";
 import "./size.css";
 
 export interface SizeActions {
@@ -111,17 +116,56 @@ function LvSection({ document, proof, actions }: Omit<Props, "sizing">) {
         <>
           <h3>exact and fitted</h3>
           <Exactness sheet={proof.sheet} onWhy={onWhy} />
-          <h3>LV capacitance, three matches</h3>
-          {design.lvArm.capacitanceBy === "none" ? (
-            <p className="finding-sentence">No LV capacitor is asked for: the divider is matched at dc only.</p>
-          ) : (
-            <>
-              <CapacitanceReach sheet={proof.sheet} lvArm={design.lvArm} />
-              <CapacitanceChoice sheet={proof.sheet} lvArm={design.lvArm} onWhy={onWhy} />
-            </>
-          )}
+          <Capacitance document={document} design={design} proof={proof} onWhy={onWhy} onCure={actions.onCure} />
         </>
       )}
     </section>
+  );
+}
+
+interface CapacitanceProps {
+  readonly document: DividerDocument;
+  readonly design: Design;
+  readonly proof: Proof;
+  readonly onWhy: (path: string) => void;
+  readonly onCure: (cure: Cure) => void;
+}
+
+/** The LV capacitance: three ways to choose it, what it is made of, what can be set against what may be needed. */
+function Capacitance({ document, design, proof, onWhy, onCure }: CapacitanceProps) {
+  const { sheet, matches, reach } = proof;
+  if (matches.length === 0) {
+    return (
+      <>
+        <h3>LV capacitance</h3>
+        <p className="finding-sentence">No capacitor is fitted in either arm: the divider is matched at dc only.</p>
+      </>
+    );
+  }
+  return (
+    <>
+      <h3>LV capacitance, three matches</h3>
+      <Matches
+        matches={matches}
+        sheet={sheet}
+        lvArm={design.lvArm}
+        wanted={document.brief.wantedUncertainty}
+        onWhy={onWhy}
+        onCure={onCure}
+      />
+      <details className="table-on-request">
+        <summary>table: three matches and what is fitted</summary>
+        <CapacitanceChoice sheet={sheet} lvArm={design.lvArm} onWhy={onWhy} />
+        <CapacitanceReach sheet={sheet} lvArm={design.lvArm} />
+      </details>
+      <h3>what the LV capacitance is made of</h3>
+      <LvShareBar sheet={sheet} onWhy={onWhy} />
+      {reach === null ? null : (
+        <>
+          <h3>what can be set, and what may be needed</h3>
+          <ReachBars reach={reach} fitted_F={sheetNumber(sheet, "lvArm.capacitanceFitted_F")} />
+        </>
+      )}
+    </>
   );
 }

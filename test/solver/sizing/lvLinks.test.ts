@@ -2,6 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { fittedLinks, linkHoles, linkSet } from "../../../src/solver/sizing/lvLinks.ts";
 import { preferredBetween } from "../../../src/solver/standards/preferred.ts";
+import { expectRelative } from "../../support/relative.ts";
 
 const pF = (...values: number[]) => values.map((value) => value * 1e-12);
 
@@ -10,6 +11,30 @@ describe("links and trimmer", () => {
   it("39/82/150/330/680 pF leaves two holes, 39/75/150/270/470/820 none", () => {
     expect(linkHoles(pF(39, 82, 150, 330, 680), 0.05, 55e-12).map((hole) => hole.link)).toEqual([3, 4]);
     expect(linkHoles(pF(39, 75, 150, 270, 470, 820), 0.05, 55e-12)).toEqual([]);
+  });
+
+  // Independent route: every assignment of tolerances' ends, every sum of links, the widest gap between neighbours.
+  it.each([
+    [39, 82, 150, 330, 680],
+    [39, 75, 150, 270, 470, 820],
+    [47, 100, 220],
+    [56, 56, 120, 390],
+  ])("the rule finds the widest gap that exhaustive sums find: %f, %f, %f …", (...values) => {
+    const t = 0.05;
+    const span = 55e-12;
+    const links = pF(...values);
+    let widest = 0;
+    for (let ends = 0; ends < 2 ** links.length; ends++) {
+      const sums = [0];
+      links.forEach((link, i) => {
+        const value = link * (1 + ((ends >> i) & 1 ? t : -t));
+        sums.push(...sums.map((sum) => sum + value));
+      });
+      sums.sort((a, b) => a - b);
+      for (let i = 1; i < sums.length; i++) widest = Math.max(widest, sums[i]! - sums[i - 1]! - span);
+    }
+    const found = Math.max(0, ...linkHoles(links, t, span).map((hole) => hole.missing_F));
+    expectRelative(found, widest, 1e-9, "the same gap", 1e-12);
   });
 
   it("a set that was chosen reaches its end, and every sum of links at any tolerance leaves no gap above the span", () => {
