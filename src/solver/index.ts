@@ -35,6 +35,7 @@ export * from "./proof/cautions.ts";
 export type { EdgeTraces, TracePair } from "./proof/edgeTraces.ts";
 export { formulas, solutions } from "./proof/formulas.ts";
 export type { FromSource } from "./proof/fromSource.ts";
+export type { Graded, GradedRow } from "./proof/graded.ts";
 export type { GreatestInput } from "./proof/greatestInput.ts";
 export type { InstrumentSpeed } from "./proof/instrumentSpeed.ts";
 export { jobSentence } from "./proof/jobSentence.ts";

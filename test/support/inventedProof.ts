@@ -161,6 +161,7 @@ export const inventedProof: Proof = {
     element: [24, 24, 1],
     sentence: "60 kV peak at 10 Hz, set by element voltage.",
   },
+  graded: null,
   worstFault: null,
   findings: [
     finding({

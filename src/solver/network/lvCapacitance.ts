@@ -48,6 +48,13 @@ function byResponseTime(bare: LadderNetwork, reference: Reference): number | nul
   return first <= 0 ? first : first - (at(first) * first) / (at(first) - T0);
 }
 
+/** The LV capacitance that makes the scale factor at the edge equal to dc, all else held, F; negative or null where none can. */
+export function edgeMatch(network: LadderNetwork, reference: Reference = "electrode"): number | null {
+  const bare = withLvCapacitance(network, 0);
+  const scaleFactor = scaleFactorOf(bare, reference);
+  return scaleFactor === null ? null : byHighFrequency(bare, scaleFactor, reference);
+}
+
 const edge = 1e40;
 
 /** At the edge v_tap = C_12/(C_tap + C2), solved for F·v_out = 1. null where the edge does not depend on it, or passes nothing. */

@@ -6,6 +6,7 @@ import type { Origin } from "../job/part.ts";
 import type { Finding, Level } from "../standards/finding.ts";
 import type { SheetData } from "../standards/sheet.ts";
 import type { Caution } from "./cautions.ts";
+import type { Graded } from "./graded.ts";
 import type { GreatestInput } from "./greatestInput.ts";
 
 export interface FrequencyResponse {
@@ -47,6 +48,8 @@ export interface Proof {
   /** What stands near the column, and what it does to an edge. */
   readonly proximity: readonly ProximityRow[];
   readonly greatestInput: GreatestInput;
+  /** Element capacitors graded against the strays; null where an element has none. */
+  readonly graded: Graded | null;
   readonly worstFault: FaultRow | null;
   readonly findings: readonly Finding[];
   readonly cautions: readonly Caution[];

@@ -26,6 +26,7 @@ import type { DividerDocument } from "../job/document.ts";
 import { ok, type Result, refuse } from "../quantities/result.ts";
 import { type Level, worstFirst } from "../standards/finding.ts";
 import { cautions } from "./cautions.ts";
+import { graded } from "./graded.ts";
 import { greatestInput } from "./greatestInput.ts";
 import { jobSentence } from "./jobSentence.ts";
 import { noResistance } from "./noResistance.ts";
@@ -75,6 +76,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
     faults: rows,
     proximity,
     greatestInput: greatest,
+    graded: graded(j, network),
     worstFault: worstFault(rows),
     findings,
     cautions,

@@ -3,6 +3,7 @@ import { useDocument, useJudged, useLooking } from "../frame/session.ts";
 import { columnScale, middleOf } from "./columnScale.ts";
 import { Drawing, height } from "./Drawing.tsx";
 import { GeometryFields } from "./GeometryFields.tsx";
+import { Handles } from "./Handles.tsx";
 import { type Layer, type LayerView, layers, layerView } from "./layers.ts";
 import { Slip } from "./Slip.tsx";
 import "./column.css";
@@ -31,6 +32,7 @@ export function Column() {
         <div className={stale ? "stale" : ""}>
           <Drawing document={document_} design={design} view={view} />
         </div>
+        <Handles design={design} />
         {at === null ? null : <Slip at={at} />}
       </div>
       <fieldset className="layers">

@@ -6,9 +6,11 @@ import { bodies, type ColumnScale, columnScale, labelled, middleOf, rulerStep_m 
 import { Foot } from "./Foot.tsx";
 import type { LayerView } from "./layers.ts";
 
+/** Size of the drawing. */
 export const width = 190;
 export const height = 600;
-const axis = 62;
+/** Where the column stands on the drawing, px from its left. */
+export const axis = 62;
 
 interface DrawnProps {
   readonly document: DividerDocument;

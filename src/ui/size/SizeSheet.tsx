@@ -6,6 +6,7 @@ import { ColumnDrawings } from "./ColumnDrawings.tsx";
 import { chosenCandidate } from "./candidateText.ts";
 import { CapacitanceChoice, Exactness } from "./Exactness.tsx";
 import { Follows } from "./Follows.tsx";
+import { GradedTable } from "./GradedTable.tsx";
 import { InstrumentTable } from "./InstrumentTable.tsx";
 import { LostFamilies } from "./LostFamilies.tsx";
 import { LvDrawing } from "./LvDrawing.tsx";
@@ -35,6 +36,12 @@ export function SizeSheet({ document, sizing, proof, actions }: Props) {
       <WindowSection sizing={sizing} document={document} proof={proof} actions={actions} />
       <CandidateSection sizing={sizing} document={document} actions={actions} />
       <LvSection document={document} proof={proof} actions={actions} />
+      {proof === null || proof.graded === null ? null : (
+        <section className="sheet-section" aria-labelledby="graded-heading">
+          <h2 id="graded-heading">graded capacitors</h2>
+          <GradedTable graded={proof.graded} onCure={actions.onCure} />
+        </section>
+      )}
       {proof === null || proof.instruments.length === 0 ? null : (
         <section className="sheet-section" aria-labelledby="instruments-heading">
           <h2 id="instruments-heading">instruments on this LV arm</h2>

@@ -1,9 +1,10 @@
-import { render, screen, within } from "@testing-library/react";
+import { fireEvent, render, screen, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, vi } from "vitest";
 import { formatQuantity } from "../../../src/solver/index.ts";
 import { Column } from "../../../src/ui/column/Column.tsx";
 import { SessionContext } from "../../../src/ui/frame/session.ts";
+import { expectRelative } from "../../support/relative.ts";
 import { solvedSession } from "../../support/solvedSession.ts";
 
 function opened() {
@@ -13,7 +14,7 @@ function opened() {
       <Column />
     </SessionContext>,
   );
-  return { session, column: screen.getByRole("slider") };
+  return { session, column: screen.getByRole("slider", { name: /element of the string/ }) };
 }
 
 describe("the column", () => {
@@ -52,6 +53,33 @@ describe("the column", () => {
     await userEvent.click(screen.getByLabelText("heat"));
     expect(screen.getByText(/full ink is its derated limit/)).toBeInTheDocument();
     await userEvent.click(screen.getByLabelText("millimetres"));
-    expect(screen.getByRole("slider").getAttribute("aria-valuetext")).toMatch(/mm$/);
+    expect(screen.getByRole("slider", { name: /element of the string/ }).getAttribute("aria-valuetext")).toMatch(/mm$/);
+  });
+
+  it("has handles for the keyboard: a run of arrows on one is one step of undo", async () => {
+    const { session } = opened();
+    const handle = screen.getByRole("slider", { name: "length of the column" });
+    const before = session.store.getState().document.design!.geometry.columnLength_m;
+    handle.focus();
+    await userEvent.keyboard("{ArrowUp}{ArrowUp}{Shift>}{ArrowUp}{/Shift}");
+    const after = session.store.getState().document.design!.geometry.columnLength_m;
+    expectRelative(after / before, 1.01 * 1.01 * 1.1, 1e-3, "four digits are kept");
+    expect(handle.getAttribute("aria-valuetext")).toBe(`${Number((after * 1000).toPrecision(4))} mm`);
+    session.store.getState().undo();
+    expect(session.store.getState().document.design!.geometry.columnLength_m).toBe(before);
+  });
+
+  it("a drag moves the length, at most once a frame, and is one step of undo", async () => {
+    const { session } = opened();
+    const handle = screen.getByRole("slider", { name: "length of the column" });
+    const before = session.store.getState().document.design!.geometry.columnLength_m;
+    fireEvent.pointerDown(handle, { clientY: 100, pointerId: 1 });
+    for (const clientY of [98, 95, 90]) fireEvent.pointerMove(handle, { clientY, pointerId: 1 });
+    fireEvent.pointerUp(handle, { pointerId: 1 });
+    await vi.waitFor(() =>
+      expect(session.store.getState().document.design!.geometry.columnLength_m).toBeGreaterThan(before),
+    );
+    session.store.getState().undo();
+    expect(session.store.getState().document.design!.geometry.columnLength_m).toBe(before);
   });
 });
