@@ -7,9 +7,10 @@ export type MagnitudeView = "dB" | "percent";
 export const percentOf = (magnitude_dB: number): number => 100 * (10 ** (magnitude_dB / 20) - 1);
 
 const deepest_dB = -12;
+const highest_dB = 12;
 
 /**
- * The magnitude axis. In dB it holds the −3 dB point, where there is one, and stops at −12 dB; in percent it closes in on the wanted tolerance,
+ * The magnitude axis. In dB it holds the −3 dB point, where there is one, and stops at ±12 dB; in percent it closes in on the wanted tolerance,
  * or on the greatest deviation inside the wanted band where that is larger.
  */
 export function magnitudeAxis(
@@ -23,7 +24,7 @@ export function magnitudeAxis(
   if (view === "dB") {
     const low = Math.min(...finite);
     const high = Math.max(...finite);
-    if (low <= -3) return linearAxis([deepest_dB, Math.max(3, high)], 6);
+    if (low <= -3 || high > highest_dB) return linearAxis([deepest_dB, Math.min(highest_dB, Math.max(3, high))], 6);
     const reach = 1.5 * Math.max(-low, high, 20 * Math.log10(1 + tolerance));
     return linearAxis([-reach, reach], 6);
   }

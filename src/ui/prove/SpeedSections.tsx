@@ -19,6 +19,7 @@ export function SpeedSections({ document, proof, speed }: Props) {
       <SlowFast document={document} proof={proof} speed={speed} />
       <section className="sheet-section" aria-labelledby="rings-heading">
         <h2 id="rings-heading">could this divider have made that ringing</h2>
+        <InLine figures={ringFigures} />
         {speed === null ? <Waiting /> : <RingPanel rings={speed.rings} />}
       </section>
       <section className="sheet-section" aria-labelledby="side-by-side-heading">
@@ -55,26 +56,47 @@ function SlowFast({ document, proof, speed }: Props) {
               least={1e-3}
               greatest={1e5}
             />
-            <dl className="in-line">
-              <dt>at the instrument</dt>
-              <dd>
-                <Figure path="slowFast.signal_Vpp" label="signal at the instrument" />
-              </dd>
-              <dt>clear of its noise from</dt>
-              <dd>
-                <Figure path="slowFast.needed_Vpp" label="signal clear of noise" />
-              </dd>
-              <dt>slowest decay</dt>
-              <dd>
-                <Figure path="slowFast.pole_Hz" label="slowest decay" />
-              </dd>
-            </dl>
+            <InLine figures={slowFastFigures} />
           </div>
           {signal === undefined || signal.level === "clear" ? null : <p className="finding-reason">{signal.reason}</p>}
           {check === null ? <Waiting /> : <SlowFastPanel check={check} />}
         </>
       )}
     </section>
+  );
+}
+
+const slowFastFigures = [
+  ["at the instrument", "slowFast.signal_Vpp", "signal at the instrument"],
+  ["clear of its noise from", "slowFast.needed_Vpp", "signal clear of noise"],
+  ["slowest decay", "slowFast.pole_Hz", "slowest decay"],
+] as const;
+const ringFigures = [
+  ["HV lead rings at", "lead.ring_Hz", "ring of the HV lead"],
+  ["damped from", "lead.dampingLeast_ohm", "damping resistor, least"],
+  ["to", "lead.dampingGreatest_ohm", "damping resistor, critical"],
+  ["LV inductance adds to the edge", "lvArm.spikeShare", "spike over the height of the edge"],
+  ["LV capacitors resonate at", "lvArm.resonance_Hz", "resonance of the LV capacitors"],
+] as const;
+
+interface InLineProps {
+  /** What it says, the figure's path, what a screen reader says. */
+  readonly figures: readonly (readonly [string, string, string])[];
+}
+
+/** A few figures side by side, each with its why. */
+function InLine({ figures }: InLineProps) {
+  return (
+    <dl className="in-line">
+      {figures.map(([name, path, label]) => (
+        <div key={path}>
+          <dt>{name}</dt>
+          <dd>
+            <Figure path={path} label={label} />
+          </dd>
+        </div>
+      ))}
+    </dl>
   );
 }
 
