@@ -25,9 +25,9 @@ const drawn = async (container: HTMLElement, traces: number) =>
   });
 
 describe("frequency response", () => {
-  it("draws two traces with their end labels, decade ticks, band limit and −3 dB mark", async () => {
+  it("draws magnitude, phase and input impedance with their end labels, decade ticks, band limit and −3 dB mark", async () => {
     const { container } = render(frequency);
-    await drawn(container, 2);
+    await drawn(container, 3);
     for (const text of ["magnitude", "phase", "band to 3.5 MHz", "−3 dB at 30 MHz", "wanted ±3 %"])
       expect(screen.getByText(text)).toBeInTheDocument();
     for (const tick of ["1", "10 k", "1 G"]) expect(screen.getAllByText(tick)[0]).toBeInTheDocument();
@@ -35,7 +35,7 @@ describe("frequency response", () => {
 
   it("reads out the point under a cursor moved by keyboard", async () => {
     const { container } = render(frequency);
-    await drawn(container, 2);
+    await drawn(container, 3);
     const cursor = screen.getByRole("slider");
     fireEvent.keyDown(cursor, { key: "End" });
     expect(cursor.getAttribute("aria-valuetext")).toMatch(/^1\u2009GHz: −30\.\d+\u2009dB/);
@@ -46,7 +46,7 @@ describe("frequency response", () => {
 
   it("copies the cursor's values with every digit", async () => {
     const { container } = render(frequency);
-    await drawn(container, 2);
+    await drawn(container, 3);
     const cursor = screen.getByRole("slider");
     fireEvent.keyDown(cursor, { key: "End" });
     const set = vi.fn();

@@ -26,7 +26,7 @@ describe("slow/fast check", () => {
   it("draws four pictures at each of two frequencies, with their divisions, and the table of them", () => {
     render(<SlowFastPanel check={answer.slowFast!} />);
     expect(screen.getAllByRole("img")).toHaveLength(8);
-    for (const name of ["as designed", "good match", "5 % too small", "5 % too large"])
+    for (const name of ["as designed", "good match", "5.% too small", "5.% too large"])
       expect(screen.getAllByRole("img", { name: new RegExp(name) })).toHaveLength(2);
     const rows = within(screen.getByRole("region", { name: "table of the slow/fast check" })).getAllByRole("row");
     expect(rows).toHaveLength(1 + answer.slowFast!.rows.length);
