@@ -140,14 +140,11 @@ function keepOut(j: Judging, Ce: number | null, shifted: Shifted): void {
   sheet.given(pointer, approach);
   const inputs = { l: "/design/geometry/columnLength_m", Ce: "strays.toEarth_F", C: "element.capacitance_F" };
   sheet.solved("keepOut.proximity_m", proximityRecord, proximity, inputs, 0);
-  const distance =
-    proximity === null
-      ? approach
-      : sheet.derive("keepOut.distance_m", proximityFormulas.keepOut, {
-          approach: pointer,
-          proximity: "keepOut.proximity_m",
-        });
-  if (proximity === null) sheet.given("keepOut.distance_m", approach);
+  // Without a proximity distance the typed one stands alone.
+  const distance = sheet.derive("keepOut.distance_m", proximityFormulas.keepOut, {
+    approach: pointer,
+    proximity: proximity === null ? pointer : "keepOut.proximity_m",
+  });
   const reading =
     proximity === null
       ? "Nothing near moves the reading by as much as counts here, or the waveform is dc."

@@ -1,3 +1,4 @@
+import { mismatchFormulas } from "../checks/armMismatch.ts";
 import { capacitiveLadderRecord } from "../checks/capacitiveLadder.ts";
 import { chargeFormulas } from "../checks/charge.ts";
 import { strayFormulas } from "../checks/columnStrays.ts";
@@ -45,6 +46,7 @@ export const formulas: ReadonlyMap<string, Formula<string, string>> = new Map(
     tapLoadFormulas,
     underElectrode,
     pottingFormulas,
+    mismatchFormulas,
     proximityFormulas,
     estimateFormulas,
     underElectrode,

@@ -39,8 +39,11 @@ export function fittedCapacitance(j: Judging): void {
     perMetre: `${at}/cable/capacitance_F_per_m`,
   });
   sheet.given(`${at}/capacitance_F`, instrument.capacitance_F);
-  sheet.given("lvArm.share.instrument_F", instrument.capacitance_F);
-  sheet.given("lvArm.share.protectors_F", protectorCapacitance(j, "divider") + protectorCapacitance(j, "instrument"));
+  sheet.given(`${at}/capacitance_F:share`, [instrument.capacitance_F]);
+  sheet.derive("lvArm.share.instrument_F", responseFormulas.fitted, { C: `${at}/capacitance_F:share` });
+  const protectors = [protectorCapacitance(j, "divider"), protectorCapacitance(j, "instrument")];
+  sheet.given("/design/protectors:share", protectors);
+  sheet.derive("lvArm.share.protectors_F", responseFormulas.fitted, { C: "/design/protectors:share" });
   sheet.derive("lvArm.capacitanceTotal_F", responseFormulas.sum, {
     fitted: "lvArm.capacitanceFitted_F",
     cable: "lvArm.share.cable_F",

@@ -143,6 +143,8 @@ export const figures = {
   "insulation.elementCreepage_m": "creepage required along one element",
   "insulation.elementClearance_m": "clearance required along one element",
   "fault.worstOutput_V": "worst single fault at the instrument",
+  "mismatch.edge": "scale factor at the edge over the ambient span, from the capacitors' coefficients",
+  "mismatch.dc": "scale factor at dc over the ambient span, from the resistors' coefficients",
   "greatestInput.low_V": "greatest sine at 10 Hz, peak",
   "greatestInput.high_V": "greatest sine at the upper end of the frequencies looked at, peak",
   "keepOut.proximity_m": "distance below which a wall moves the reading of an edge",

@@ -1,3 +1,4 @@
+import { judgeArmMismatch } from "../checks/armMismatch.ts";
 import { judgeCable } from "../checks/cableLine.ts";
 import { charge } from "../checks/charge.ts";
 import type { ColumnField } from "../checks/columnField.ts";
@@ -63,6 +64,7 @@ export function prove(document: DividerDocument, field: ColumnField | null = nul
   judgeEdge(j, show);
   judgeStepSharing(j, network, show);
   judgeSlowFast(j, network, show);
+  judgeArmMismatch(j);
   const proximity = proximityOf(j, string);
   const greatest = greatestInput(j, network);
   const reach = instrumentReach(j, string);
